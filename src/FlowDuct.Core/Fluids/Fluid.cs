@@ -1,0 +1,63 @@
+namespace FlowDuct.Fluids;
+
+/// <summary>An equation of state, the only thing that a device knows about its fluid.</summary>
+/// <remarks>
+/// Members are pure and thread-safe; they allocate nothing. Each returns an outcome and, where it is Ok, the state. Every
+/// inverse closes on the forward equation of state to 1e-11 relative or better in the pair that was given.
+/// </remarks>
+public abstract class Fluid
+{
+    /// <summary>The name used on the command line, for example "water".</summary>
+    public abstract string Name { get; }
+
+    /// <summary>The formulation, with number and year of its publication.</summary>
+    public abstract string Formulation { get; }
+
+    /// <summary>The valid range in one printable line.</summary>
+    public abstract string RangeText { get; }
+
+    /// <summary>True where the fluid has a liquid and a saturation line.</summary>
+    public abstract bool HasSaturation { get; }
+
+    /// <summary>Least pressure of the formulation, Pa (a positive floor for brackets).</summary>
+    internal abstract double LeastPressure { get; }
+
+    /// <summary>Greatest pressure of the formulation, Pa.</summary>
+    internal abstract double GreatestPressure { get; }
+
+    /// <summary>State from pressure, Pa, and temperature, K. On the saturation line: vapour.</summary>
+    internal abstract Outcome FromPT(double p, double T, out FluidState state);
+
+    /// <summary>State from pressure, Pa, and specific enthalpy, J/kg; <paramref name="near"/> is a start (default: none).</summary>
+    internal abstract Outcome FromPH(double p, double h, in FluidState near, out FluidState state);
+
+    /// <summary>State from pressure, Pa, and specific entropy, J/(kg.K); <paramref name="near"/> is a start (default: none).</summary>
+    internal abstract Outcome FromPS(double p, double s, in FluidState near, out FluidState state);
+
+    /// <summary>State from specific enthalpy, J/kg, and specific entropy, J/(kg.K); <paramref name="near"/> is a start (default: none).</summary>
+    internal abstract Outcome FromHS(double h, double s, in FluidState near, out FluidState state);
+
+    /// <summary>State from pressure, Pa, and quality.</summary>
+    internal abstract Outcome FromPX(double p, double x, out FluidState state);
+
+    /// <summary>State from temperature, K, and quality.</summary>
+    internal abstract Outcome FromTX(double T, double x, out FluidState state);
+
+    /// <summary>State from pressure, Pa, and density, kg/m3.</summary>
+    internal abstract Outcome FromPRho(double p, double rho, out FluidState state);
+
+    /// <summary>Saturation temperature, K, at a pressure, Pa; false where there is none.</summary>
+    internal abstract bool TrySaturationTemperature(double p, out double T);
+
+    /// <summary>Saturation pressure, Pa, at a temperature, K; false where there is none.</summary>
+    internal abstract bool TrySaturationPressure(double T, out double p);
+
+    /// <summary>
+    /// The pressure, Pa, at which an isentrope meets the saturation line as the pressure falls, and the single-phase side of that
+    /// point (x = 0 or x = 1, with the single-phase speed of sound); false where the isentrope never meets it inside the range.
+    /// </summary>
+    internal abstract bool TrySaturationOnIsentrope(double s, out FluidState singlePhaseSide);
+
+    /// <summary>Names the limit behind an outcome of the pair (first, second); called only to speak of a failure.</summary>
+    internal abstract RangeViolation Explain(Outcome outcome, StatePair pair, double first, double second);
+}

@@ -1,0 +1,32 @@
+namespace FlowDuct.Quantities;
+
+/// <summary>The figures of a case that belong to no station; the number is the slot in a <c>DeviceCase</c>.</summary>
+internal enum CaseOption
+{
+    /// <summary>Mass flow, kg/s (volume flows are converted at the door).</summary>
+    Flow,
+
+    /// <summary>Isentropic efficiency.</summary>
+    Efficiency,
+
+    /// <summary>Velocity coefficient (nozzle).</summary>
+    VelocityCoefficient,
+
+    /// <summary>Pressure-recovery coefficient (diffuser).</summary>
+    Recovery,
+
+    /// <summary>Stagnation-pressure loss coefficient.</summary>
+    LossCoefficient,
+
+    /// <summary>Heat added per mass of fluid, J/kg.</summary>
+    Heat,
+
+    /// <summary>Heat lost per mass of fluid, J/kg.</summary>
+    HeatLoss,
+
+    /// <summary>Temperature of the boundary that the heat crosses, K.</summary>
+    BoundaryTemperature,
+
+    /// <summary>Gravitational acceleration, m/s2.</summary>
+    Gravity,
+}
