@@ -17,6 +17,23 @@ internal static class UnitSuggestion
             ?? $"{shown} is not a unit of {DimensionWords.Of(dimension)}; write one of {UnitsOf(dimension)}";
     }
 
+    /// <summary>The same for a quantity that may be given in several dimensions: the first guess that any of them offers.</summary>
+    /// <param name="spelling">The spelling as typed.</param>
+    /// <param name="row">The quantity.</param>
+    public static string For(string spelling, QuantityRow row)
+    {
+        string shown = Echo.Ascii(spelling);
+        foreach (Dimension dimension in (Dimension[])[row.Dimension, .. row.AlsoGivenAs])
+        {
+            string? guess = AmbiguousReference(spelling, dimension) ?? BasisProblem(spelling, dimension, shown)
+                ?? KnownSlip(spelling, dimension, shown);
+            if (guess is not null)
+                return guess;
+        }
+
+        return For(spelling, row.Dimension);
+    }
+
     /// <summary>The units of a dimension, comma-separated.</summary>
     public static string UnitsOf(Dimension dimension)
     {

@@ -1,0 +1,42 @@
+namespace FlowDuct.Quantities;
+
+/// <summary>The unit in which a dimension is shown unless somebody asked otherwise.</summary>
+internal static class DisplayUnits
+{
+    /// <summary>Spelling of the default display unit of a dimension.</summary>
+    public static string Of(Dimension dimension, UnitSystem system) => system == UnitSystem.Us ? Us(dimension) : Metric(dimension);
+
+    private static string Metric(Dimension dimension) => dimension switch
+    {
+        Dimension.Pressure or Dimension.PressureDifference => "bar",
+        Dimension.Temperature => "degC",
+        Dimension.SpecificEnergy => "kJ/kg",
+        Dimension.SpecificEntropy => "kJ/(kg.K)",
+        Dimension.Length => "mm",
+        Dimension.Area => "mm2",
+        Dimension.NormalVolumeFlow => "Nm3/h",
+        Dimension.StandardVolumeFlow => "Sm3/h",
+        Dimension.HeatRate => "kW",
+        Dimension.Angle => "deg",
+        _ => DimensionWords.SiUnit(dimension),
+    };
+
+    private static string Us(Dimension dimension) => dimension switch
+    {
+        Dimension.Pressure or Dimension.PressureDifference => "psi",
+        Dimension.Temperature or Dimension.TemperatureDifference => "degF",
+        Dimension.SpecificEnergy => "Btu/lb",
+        Dimension.SpecificEntropy => "Btu/(lb.degF)",
+        Dimension.SpecificVolume => "ft3/lb",
+        Dimension.Density => "lb/ft3",
+        Dimension.Velocity => "ft/s",
+        Dimension.Length => "in",
+        Dimension.Area => "in2",
+        Dimension.MassFlow => "lb/h",
+        Dimension.VolumeFlow => "acfm",
+        Dimension.HeatRate => "Btu/h",
+        Dimension.Acceleration => "ft/s2",
+        Dimension.Force => "lbf",
+        _ => Metric(dimension),
+    };
+}
