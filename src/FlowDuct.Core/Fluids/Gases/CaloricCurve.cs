@@ -10,6 +10,12 @@ internal sealed class CaloricCurve
 {
     private const double ReferenceTemperature = 298.15;
 
+    // Newton from the start table is converged after one or two steps; the limit only guards against a defect.
+    private const int SolveLimit = 60;
+
+    // Relative; rounding of the sums is near 3e-16, the promise to callers 1e-12.
+    private const double Closure = 1e-13;
+
     private readonly CaloricPiece[] pieces;
     private readonly StartTable fromEnthalpy;
     private readonly StartTable fromEntropy;
@@ -88,12 +94,6 @@ internal sealed class CaloricCurve
         at = default;
         return false;
     }
-
-    // Newton from the start table is converged after two or three steps; the limit only guards against a defect.
-    private const int SolveLimit = 60;
-
-    // Relative; rounding of the sums is near 3e-16, the promise to callers 1e-12.
-    private const double Closure = 1e-13;
 
     private static void Narrow(double miss, double T, ref double low, ref double high)
     {
