@@ -65,4 +65,7 @@ internal enum Dimension
 
     /// <summary>Plane angle, rad.</summary>
     Angle,
+
+    /// <summary>Mass flow rate per area, kg/(m2.s).</summary>
+    MassFlux,
 }

@@ -27,6 +27,7 @@ internal static class DimensionWords
         Dimension.Acceleration => "acceleration",
         Dimension.Force => "force",
         Dimension.Angle => "angle",
+        Dimension.MassFlux => "mass flux",
         _ => throw new ArgumentOutOfRangeException(nameof(dimension)),
     };
 
@@ -51,6 +52,7 @@ internal static class DimensionWords
         Dimension.Acceleration => "m/s2",
         Dimension.Force => "N",
         Dimension.Angle => "rad",
+        Dimension.MassFlux => "kg/(m2.s)",
         _ => throw new ArgumentOutOfRangeException(nameof(dimension)),
     };
 }

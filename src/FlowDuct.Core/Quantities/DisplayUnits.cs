@@ -37,6 +37,7 @@ internal static class DisplayUnits
         Dimension.HeatRate => "Btu/h",
         Dimension.Acceleration => "ft/s2",
         Dimension.Force => "lbf",
+        Dimension.MassFlux => "lb/(ft2.s)",
         _ => Metric(dimension),
     };
 }

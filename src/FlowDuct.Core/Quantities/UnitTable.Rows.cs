@@ -159,5 +159,8 @@ internal static partial class UnitTable
 
         new("deg", Dimension.Angle, Math.PI / 180, Si),
         new("rad", Dimension.Angle, 1, Si),
+
+        new("kg/(m2.s)", Dimension.MassFlux, 1, Si),
+        new("lb/(ft2.s)", Dimension.MassFlux, Pound / (Foot * Foot), Sp811),
     ];
 }

@@ -1,0 +1,45 @@
+using FlowDuct.Findings;
+using FlowDuct.Fluids;
+
+namespace FlowDuct.Devices;
+
+/// <summary>The whole answer to a case.</summary>
+internal sealed record DeviceAnswer
+{
+    internal required DeviceCase Case { get; init; }
+
+    internal required StationAnswer Inlet { get; init; }
+
+    internal StationAnswer? Throat { get; init; }
+
+    internal required StationAnswer Exit { get; init; }
+
+    internal required Performance Performance { get; init; }
+
+    /// <summary>Null where the exit is known by an interval only.</summary>
+    internal Ledger? Ledger { get; init; }
+
+    /// <summary>The judgement of the three laws.</summary>
+    internal required Audit Audit { get; init; }
+
+    /// <summary>True where the inlet was given by static properties alone and is taken at rest.</summary>
+    internal bool InletTakenAtRest { get; init; }
+
+    /// <summary>True where no loss was given and none is implied: the expansion is taken isentropic.</summary>
+    internal bool TakenIdeal { get; init; }
+
+    /// <summary>True where the exit reading lies on the saturation line and names a set of states.</summary>
+    internal bool SaturatedReading { get; init; }
+
+    /// <summary>True where the efficiency follows from measured figures, false where it was given or assumed.</summary>
+    internal bool EfficiencyImplied { get; init; }
+
+    /// <summary>What was decided for the reader, in words.</summary>
+    internal IReadOnlyList<string> Assumptions { get; init; } = [];
+
+    internal IReadOnlyList<Finding> Findings { get; init; } = [];
+
+    internal Fluid Fluid => Case.Fluid;
+
+    internal bool Passed => !Findings.Any(f => f.Severity == Severity.Error);
+}

@@ -1,0 +1,98 @@
+using FlowDuct.Fluids;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Devices;
+
+/// <summary>The devices that are solved.</summary>
+internal enum DeviceKind
+{
+    /// <summary>A duct that speeds the flow up.</summary>
+    Nozzle,
+
+    /// <summary>A duct that slows the flow down and raises its pressure.</summary>
+    Diffuser,
+}
+
+/// <summary>The form of a nozzle.</summary>
+internal enum NozzleShape
+{
+    /// <summary>Not given: decided by the figures, and said.</summary>
+    Auto,
+
+    /// <summary>The exit is the narrowest section.</summary>
+    Convergent,
+
+    /// <summary>The exit lies behind a throat.</summary>
+    ConvergentDivergent,
+}
+
+/// <summary>Which of two solutions is wanted.</summary>
+internal enum Branch
+{
+    /// <summary>Not said: several solutions are listed and refused.</summary>
+    Ask,
+
+    /// <summary>The solution slower than sound.</summary>
+    Subsonic,
+
+    /// <summary>The solution faster than sound.</summary>
+    Supersonic,
+}
+
+/// <summary>On which head the pressure recovery is based.</summary>
+internal enum RecoveryBasis
+{
+    /// <summary>p0,1 - p1.</summary>
+    Stagnation,
+
+    /// <summary>rho1 V1^2 / 2.</summary>
+    Dynamic,
+}
+
+/// <summary>One device at one operating point: what is given, SI.</summary>
+internal sealed record DeviceCase
+{
+    private GivenSlots _inlet;
+    private GivenSlots _exit;
+    private GivenSlots _options;
+
+    internal required DeviceKind Device { get; init; }
+
+    internal required Fluid Fluid { get; init; }
+
+    internal NozzleShape Shape { get; init; }
+
+    internal Branch Branch { get; init; }
+
+    internal RecoveryBasis RecoveryBasis { get; init; }
+
+    /// <summary>Ambient pressure, Pa.</summary>
+    internal double AmbientPressure { get; init; } = 101325;
+
+    /// <summary>Ambient temperature, K.</summary>
+    internal double AmbientTemperature { get; init; } = 288.15;
+
+    /// <summary>True where the ambient state was typed, false where the default stands in for it.</summary>
+    internal bool AmbientGiven { get; init; }
+
+    /// <summary>True where the flow is an actual volume flow at the inlet, m3/s; else it is a mass flow, kg/s.</summary>
+    internal bool FlowIsVolume { get; init; }
+
+    /// <summary>True where a gauge or vacuum reading made use of the ambient pressure.</summary>
+    internal bool UsesGauge { get; init; }
+
+    internal ref GivenSlots Inlet => ref _inlet;
+
+    internal ref GivenSlots Exit => ref _exit;
+
+    internal ref GivenSlots Options => ref _options;
+
+    internal bool Has(CaseOption option) => _options.Has((int)option);
+
+    internal double Value(CaseOption option) => _options.Value((int)option);
+
+    internal double ValueOr(CaseOption option, double otherwise) => Has(option) ? Value(option) : otherwise;
+
+    /// <summary>Heat added per mass, J/kg: heat minus heat loss.</summary>
+    internal double Heat => ValueOr(CaseOption.Heat, 0) - ValueOr(CaseOption.HeatLoss, 0);
+}

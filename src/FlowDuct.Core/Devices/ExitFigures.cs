@@ -1,0 +1,65 @@
+using FlowDuct.Errors;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Devices;
+
+/// <summary>The figures of the exit with pressures relative to the inlet made absolute, and the given loss beside them.</summary>
+internal static class ExitFigures
+{
+    internal static StationFigures Read(DeviceCase c, Inlet inlet)
+    {
+        StationFigures given = StationFigures.Read(c.Exit, Station.Exit);
+        if (given.Has(Figure.T0)) throw Refusals.FixedByEnergy("T0");
+        if (given.Has(Figure.H0)) throw Refusals.FixedByEnergy("h0");
+        AddRelativePressures(c, inlet, given);
+        AddRecovery(c, inlet, given);
+        AddLoss(c, given);
+        return given;
+    }
+
+    private static void AddRelativePressures(DeviceCase c, Inlet inlet, StationFigures given)
+    {
+        double p1 = inlet.State.p, p01 = inlet.Station.Stagnation!.Value.p;
+        Add(StationSymbol.PressureDrop, dp => p1 - dp);
+        Add(StationSymbol.PressureRise, rise => p1 + rise);
+        Add(StationSymbol.PressureOverInletStagnation, ratio => ratio * p01);
+        Add(StationSymbol.PressureOverInlet, ratio => ratio * p1);
+
+        void Add(StationSymbol symbol, Func<double, double> toPressure)
+        {
+            if (!c.Exit.Has((int)symbol)) return;
+            double p = toPressure(c.Exit.Value((int)symbol));
+            given.Add(Figure.P, p > 0 ? p : throw Refusals.NoPressureLeft(p), Station.Exit);
+        }
+    }
+
+    private static void AddRecovery(DeviceCase c, Inlet inlet, StationFigures given)
+    {
+        if (!c.Has(CaseOption.Recovery)) return;
+        if (c.Device == DeviceKind.Nozzle) throw Refusals.NotForDevice("--recovery", c.Device);
+        if (given.Has(Figure.P)) throw Refusals.RecoveryTwice();
+        double p1 = inlet.State.p;
+        double head = c.RecoveryBasis == RecoveryBasis.Stagnation
+            ? inlet.Station.Stagnation!.Value.p - p1
+            : inlet.State.rho * inlet.V * inlet.V / 2;
+        double p2 = p1 + (c.Value(CaseOption.Recovery) * head);
+        given.Add(Figure.P, p2 > 0 ? p2 : throw Refusals.NoPressureLeft(p2), Station.Exit);
+    }
+
+    private static void AddLoss(DeviceCase c, StationFigures given)
+    {
+        bool efficiency = c.Has(CaseOption.Efficiency), coefficient = c.Has(CaseOption.VelocityCoefficient), loss = c.Has(CaseOption.LossCoefficient);
+        if (coefficient && c.Device == DeviceKind.Diffuser) throw Refusals.NotForDevice("--velocity-coefficient", c.Device);
+        if ((efficiency ? 1 : 0) + (coefficient ? 1 : 0) + (loss ? 1 : 0) > 1)
+            throw Refusals.LossTwice("efficiency, velocity coefficient, loss coefficient");
+        if (efficiency && c.Heat != 0) throw Refusals.EfficiencyWithHeat();
+        if (efficiency) given.Add(Figure.Efficiency, c.Value(CaseOption.Efficiency), Station.Exit);
+        if (coefficient)
+        {
+            double phi = c.Value(CaseOption.VelocityCoefficient);
+            given.Add(Figure.Efficiency, phi * phi, Station.Exit);
+        }
+
+        if (loss) given.Add(Figure.Loss, c.Value(CaseOption.LossCoefficient), Station.Exit);
+    }
+}

@@ -1,0 +1,60 @@
+namespace FlowDuct.Devices;
+
+/// <summary>The figures of the device as a whole, SI. Null is "cannot be known from what was given".</summary>
+internal sealed record Performance
+{
+    internal string? Regime { get; init; }
+
+    internal bool? Choked { get; init; }
+
+    internal double? MassFlow { get; init; }
+
+    /// <summary>Actual volume flow at the inlet's static state, m3/s.</summary>
+    internal double? VolumeFlow { get; init; }
+
+    internal double? IsentropicEfficiency { get; init; }
+
+    /// <summary>Least and greatest efficiency that the readings allow, where they fix no single one.</summary>
+    internal Interval? EfficiencyRange { get; init; }
+
+    internal double? VelocityCoefficient { get; init; }
+
+    internal double? CriticalPressureRatio { get; init; }
+
+    internal double? AreaRatio { get; init; }
+
+    internal double? ThroatAreaRatio { get; init; }
+
+    internal double? EntropyRise { get; init; }
+
+    internal double? ExitVelocityIdeal { get; init; }
+
+    /// <summary>Least and greatest exit velocity that the readings allow, where they fix no single one.</summary>
+    internal Interval? ExitVelocityRange { get; init; }
+
+    internal double? PressureChange { get; init; }
+
+    internal double? StagnationPressureRatio { get; init; }
+
+    internal double? Recovery { get; init; }
+
+    internal double? RecoveryDynamic { get; init; }
+
+    internal double? IdealRecovery { get; init; }
+
+    internal double? Effectiveness { get; init; }
+
+    internal double? LossCoefficient { get; init; }
+
+    internal double? Thrust { get; init; }
+
+    internal double? AxialForce { get; init; }
+
+    internal double? HeatRate { get; init; }
+
+    /// <summary>Work lost to irreversibility at the temperature of the surroundings, J/kg.</summary>
+    internal double? LostWork { get; init; }
+}
+
+/// <summary>Least and greatest value.</summary>
+internal readonly record struct Interval(double Least, double Greatest);

@@ -1,0 +1,57 @@
+using FlowDuct.Fluids;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Devices;
+
+/// <summary>Works out the figures of the device from its stations, by the definitions of the design.</summary>
+internal static class Performances
+{
+    internal static Performance Of(DeviceAnswer a)
+    {
+        StationAnswer inlet = a.Inlet, exit = a.Exit;
+        FluidState first = inlet.State;
+        double p01 = inlet.Stagnation!.Value.p;
+        double? flow = a.Performance.MassFlow, p02 = exit.Stagnation?.p;
+        Performance performance = a.Performance with
+        {
+            VolumeFlow = flow * first.v,
+            EntropyRise = exit.HasState ? exit.State.s - first.s : null,
+            LostWork = a.Audit.Entropy == Verdict.Broken ? null : LostWork(a),
+            HeatRate = a.Case.Heat != 0 ? flow * a.Case.Heat : null,
+            PressureChange = exit.State.p - first.p,
+            StagnationPressureRatio = p02 / p01,
+            AreaRatio = Quotient(inlet.Flux, exit.Flux),
+            ThroatAreaRatio = a.Throat is null ? null : Quotient(a.Throat.Flux, exit.Flux),
+            Thrust = Thrust(a, flow),
+            AxialForce = AxialForce(a, flow),
+        };
+        return a.Case.Device == DeviceKind.Nozzle ? NozzlePerformance.Add(a, performance) : DiffuserPerformance.Add(a, performance);
+    }
+
+    internal static double? Quotient(double? numerator, double? denominator) => denominator is double d && d > 0 && numerator > 0 ? numerator / d : null;
+
+    // Entropy made inside the device, at the temperature of the surroundings.
+    private static double? LostWork(DeviceAnswer a)
+    {
+        if (!a.Exit.HasState) return null;
+        double made = a.Exit.State.s - a.Inlet.State.s;
+        if (a.Case.Heat != 0) made -= a.Case.Heat / a.Case.ValueOr(CaseOption.BoundaryTemperature, a.Case.AmbientTemperature);
+        return made * a.Case.AmbientTemperature;
+    }
+
+    // Against the exit pressure while the jet is slower than sound, else against the ambient pressure.
+    private static double? Thrust(DeviceAnswer a, double? flow)
+    {
+        if (a.Case.Device != DeviceKind.Nozzle || a.Exit.Area is not double A2) return null;
+        double pa = a.Exit.Mach < 1 ? a.Exit.State.p : a.Case.AmbientPressure;
+        return (flow * a.Exit.Velocity) + ((a.Exit.State.p - pa) * A2 * a.Exit.Openings);
+    }
+
+    private static double? AxialForce(DeviceAnswer a, double? flow)
+    {
+        if (a.Inlet.Area is not double A1 || a.Exit.Area is not double A2) return null;
+        double pa = a.Case.AmbientPressure;
+        return ((a.Inlet.State.p - pa) * A1 * a.Inlet.Openings) + (flow * a.Inlet.Velocity)
+            - ((a.Exit.State.p - pa) * A2 * a.Exit.Openings) - (flow * a.Exit.Velocity);
+    }
+}

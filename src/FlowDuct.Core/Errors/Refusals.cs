@@ -1,0 +1,166 @@
+using FlowDuct.Devices;
+using FlowDuct.Fluids;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Errors;
+
+/// <summary>Every refusal that the devices speak, in one place: reason with value, limit and source, then one next step.</summary>
+internal static class Refusals
+{
+    private static DisplayText Units => DisplayText.Metric;
+
+    internal static FlowDuctException Redundant(Station station, string names) => NotUnderstood(
+        PlaceOf(station), $"{names} is given more than once, under two names", "keep one of them");
+
+    internal static FlowDuctException InletMissing(Station station, StationFigures given, Figure suggestions)
+    {
+        string what = given.Given == Figure.None ? "no property is given" : $"{Figures.Names(given.Given)} alone does not fix the state";
+        return NotUnderstood(PlaceOf(station), what, $"add one of {Figures.Names(suggestions)}");
+    }
+
+    internal static FlowDuctException InletRedundant(Station station, Figure given, Figure enough) => NotUnderstood(
+        PlaceOf(station),
+        $"{Figures.Names(given)} are more than fixes the state",
+        $"leave out {Figures.Names(given & ~enough)}: {Figures.Names(enough)} is enough");
+
+    internal static FlowDuctException PairNotSolved(Station station, Figure given) => NotUnderstood(
+        PlaceOf(station),
+        $"{Figures.Names(given)} is not a set that fixes the state",
+        "give p with one of T, h, s, u, rho, x, superheat; or T with x or rho; or h with s; or p0 with T0");
+
+    internal static FlowDuctException VelocityTwice(Figure given) => NotUnderstood(
+        "--inlet", $"the velocity is given more than once ({Figures.Names(given)})", "keep one of V, M or the pair p and p0");
+
+    internal static FlowDuctException VelocityMissing(Figure given) => NotUnderstood(
+        "--inlet", $"{Figures.Names(given)} needs the velocity too", "add V, M, or A (or d) together with --flow");
+
+    internal static FlowDuctException VelocityRedundant(Figure given) => NotUnderstood(
+        "--inlet", $"with {Figures.Names(given)} the velocity follows; it is also given", "leave V, M or the section out");
+
+    internal static FlowDuctException SectionWithoutFlow() => NotUnderstood(
+        "--inlet", "a section (A or d) without a flow does not give the velocity", "add --flow, for example --flow \"1.4 kg/s\", or V");
+
+    internal static FlowDuctException DiffuserAtRest() => NotUnderstood(
+        "--inlet", "a diffuser slows a stream down, and this inlet has no velocity", "add V, M, p0, or A (or d) together with --flow");
+
+    internal static FlowDuctException SaturatedInlet(Station station, double p, double T, double Tsat) => NoAnswer(
+        PlaceOf(station),
+        $"p={Units.Text(p, Dimension.Pressure)} and T={Units.Text(T, Dimension.Temperature)} lie on the saturation line ({Units.Text(Tsat, Dimension.Temperature, 6)}): one figure, not two",
+        "give x, h or superheat instead of T");
+
+    internal static FlowDuctException OutsideRange(
+        Station station, Fluid fluid, Outcome outcome, StatePairs.Pair pair, double first, double second)
+    {
+        if (outcome == Outcome.NoSaturation && !fluid.HasSaturation)
+        {
+            return NoAnswer(
+                PlaceOf(station), $"{fluid.Name} is an ideal gas here and has no saturation line", "give p with T, h, s or rho");
+        }
+
+        return NoAnswer(PlaceOf(station), Describe(fluid.Explain(outcome, pair.Call, first, second)), $"valid range: {fluid.RangeText}");
+    }
+
+    internal static FlowDuctException OutsideRange(string place, Fluid fluid, Outcome outcome, StatePair pair, double first, double second) =>
+        NoAnswer(place, Describe(fluid.Explain(outcome, pair, first, second)), $"valid range: {fluid.RangeText}");
+
+    internal static FlowDuctException NoSuchInlet(Figure given) => NoAnswer(
+        "--inlet", $"no state has these figures ({Figures.Names(given)}) together", "check the velocity against the stagnation readings");
+
+    internal static FlowDuctException ExitMissing(DeviceKind device) => NotUnderstood(
+        "--exit",
+        "nothing says where the flow leaves",
+        device == DeviceKind.Nozzle
+            ? "give one of p, dp, p/p0, V, T, h, x; for example --exit \"p=3.2 bar\""
+            : "give one of p, rise, V, T, h; for example --exit \"p=1.05 bar\", or --recovery with --exit \"V=30 m/s\"");
+
+    internal static FlowDuctException ExitRedundant(Figure given) => NotUnderstood(
+        "--exit",
+        $"{Figures.Names(given)} are more than fixes the exit",
+        "an exit takes one figure with one of efficiency, velocity coefficient, recovery or loss coefficient, or two measured figures");
+
+    internal static FlowDuctException ExitNotSolved(Figure given) => NotUnderstood(
+        "--exit",
+        $"{Figures.Names(given)} is not a set that fixes the exit",
+        "give p with one other figure, or one of T, h, x, rho, V, M with an efficiency or loss coefficient");
+
+    internal static FlowDuctException FixedByEnergy(string symbol) => NotUnderstood(
+        "--exit", $"{symbol} at the exit follows from the energy balance and fixes nothing", "give p, T, h, x, V or p0 instead");
+
+    internal static FlowDuctException RecoveryTwice() => NotUnderstood(
+        "--recovery", "the recovery fixes the exit pressure, which is also given", "leave one of them out");
+
+    internal static FlowDuctException LossTwice(string names) => NotUnderstood(
+        "--efficiency", $"the loss is given more than once ({names})", "keep one of them");
+
+    internal static FlowDuctException NotForDevice(string option, DeviceKind device) => NotUnderstood(
+        option, $"this option does not belong to a {DeviceWord(device)}", device == DeviceKind.Nozzle ? "it belongs to the diffuser" : "it belongs to the nozzle");
+
+    internal static FlowDuctException NoExit(string figures, string range) => NoAnswer(
+        "--exit", $"no exit state has {figures}", range);
+
+    internal static FlowDuctException ExitAboveStagnation(double p, double p0) => NoAnswer(
+        "--exit",
+        $"p={Units.Text(p, Dimension.Pressure)} is not below the stagnation pressure at the inlet, {Units.Text(p0, Dimension.Pressure)}: nothing drives the flow",
+        "give an exit pressure below it");
+
+    internal static FlowDuctException TooFast(double V, double Vmost) => NoAnswer(
+        "--exit",
+        $"V={Units.Text(V, Dimension.Velocity)} needs more energy than the fluid can give (at most {Units.Text(Vmost, Dimension.Velocity)} inside the formulation)",
+        "give a lower exit velocity, or more enthalpy at the inlet");
+
+    internal static FlowDuctException NoPressureLeft(double p) => NoAnswer(
+        "--exit", $"the exit pressure would be {Units.Text(p, Dimension.PressureDifference)} absolute, and no fluid has that", "give a smaller pressure drop");
+
+    internal static FlowDuctException SeveralExits(IEnumerable<string> roots) => NoAnswer(
+        "--exit", $"several exit states have these figures: {string.Join("; ", roots)}", "choose with --branch subsonic or --branch supersonic");
+
+    internal static FlowDuctException ConvergentBelowCritical(double p, double pCritical) => NoAnswer(
+        "--exit",
+        $"p={Units.Text(p, Dimension.Pressure)} is below the critical pressure {Units.Text(pCritical, Dimension.Pressure)}: a convergent nozzle cannot reach it in its exit plane",
+        "if the nozzle has a throat before its exit, write --shape convergent-divergent; a space beyond the exit is not asked for yet");
+
+    internal static FlowDuctException HeatWithChoking() => NoAnswer(
+        "--heat", "heat beside a throat or choking is not modelled", "leave the heat out, or give an exit above the critical pressure");
+
+    internal static FlowDuctException EfficiencyWithHeat() => NotUnderstood(
+        "--efficiency", "with heat an efficiency can be implied by measured figures, not given", "give two exit figures instead");
+
+    internal static FlowDuctException FlowTooGreat(double flow, double most) => NoAnswer(
+        "--flow",
+        $"{Units.Text(flow, Dimension.MassFlow)} does not pass the inlet section (at most {Units.Text(most, Dimension.MassFlow)})",
+        "give a larger section or a smaller flow");
+
+    internal static string PlaceOf(Station station) => station switch
+    {
+        Station.Inlet => "--inlet",
+        Station.Throat => "--throat",
+        Station.Exit => "--exit",
+        Station.Ambient => "--ambient",
+        _ => "--at",
+    };
+
+    private static string Describe(RangeViolation v)
+    {
+        Dimension dimension = DimensionOf(v.Symbol);
+        string side = v.IsUpper ? "above" : "below";
+        return $"{v.Symbol}={Units.Text(v.Value, dimension, 6)} is {side} the limit {Units.Text(v.Limit, dimension, 6)} of {v.Source}";
+    }
+
+    private static Dimension DimensionOf(string symbol) => symbol switch
+    {
+        "p" => Dimension.Pressure,
+        "T" => Dimension.Temperature,
+        "h" => Dimension.SpecificEnergy,
+        "s" => Dimension.SpecificEntropy,
+        "rho" => Dimension.Density,
+        _ => Dimension.Ratio,
+    };
+
+    private static string DeviceWord(DeviceKind device) => device == DeviceKind.Nozzle ? "nozzle" : "diffuser";
+
+    private static FlowDuctException NotUnderstood(string place, string reason, string next) =>
+        new(new Refusal(RefusalKind.NotUnderstood, place, reason, next));
+
+    private static FlowDuctException NoAnswer(string place, string reason, string next) =>
+        new(new Refusal(RefusalKind.NoAnswer, place, reason, next));
+}

@@ -1,0 +1,17 @@
+using FlowDuct.Devices;
+using FlowDuct.Fluids;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Findings;
+
+/// <summary>A station lies outside the fit of the gas, inside its documented continuation.</summary>
+internal static class Extrapolated
+{
+    internal static Finding? Check(DeviceAnswer a)
+    {
+        StationAnswer?[] stations = [a.Inlet, a.Throat, a.Exit];
+        StationAnswer? cold = Array.Find(stations, at => at is not null && (at.State.Notices & Notices.Extrapolated) != 0);
+        return cold is null ? null : new Finding("extrapolated", Severity.Note, cold.State.T, 200, a.Fluid.Formulation, text =>
+            $"{text.Text(cold.State.T, Dimension.Temperature, 4)} lies below the fit, which begins at {text.Text(200, Dimension.Temperature, 4)}: the heat capacity is held at its value there");
+    }
+}

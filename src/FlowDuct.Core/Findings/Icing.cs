@@ -1,0 +1,20 @@
+using FlowDuct.Devices;
+using FlowDuct.Fluids;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Findings;
+
+/// <summary>Water below its triple point: at equilibrium there would be ice.</summary>
+internal static class Icing
+{
+    // IAPWS R7-97(2012), Eq. (9): triple point of water.
+    private const double TriplePressure = 611.657;
+
+    internal static Finding? Check(DeviceAnswer a)
+    {
+        StationAnswer?[] stations = [a.Inlet, a.Throat, a.Exit];
+        StationAnswer? cold = Array.Find(stations, at => at is not null && (at.State.Notices & Notices.BelowTriplePoint) != 0);
+        return cold is null ? null : new Finding("icing", Severity.Caution, cold.State.p, TriplePressure, "IAPWS R7-97(2012)", text =>
+            $"below the triple point ({text.Text(TriplePressure, Dimension.Pressure)}, {text.Text(273.16, Dimension.Temperature)}) ice forms at equilibrium; the answer is vapour that does not freeze");
+    }
+}

@@ -1,0 +1,27 @@
+namespace FlowDuct.Quantities;
+
+/// <summary>Writes values in a unit system, with units of the reader's own where asked.</summary>
+internal sealed class DisplayText(UnitSystem system, double ambientPressure, IReadOnlyDictionary<Dimension, UnitReading>? own = null) : IQuantityText
+{
+    /// <summary>Metric units; gauge readings do not occur.</summary>
+    internal static readonly DisplayText Metric = new(UnitSystem.Metric, 0);
+
+    /// <summary>The unit in which a dimension is shown.</summary>
+    internal UnitReading UnitOf(Dimension dimension)
+    {
+        if (own is not null && own.TryGetValue(dimension, out UnitReading chosen)) return chosen;
+        return UnitTable.TryFind(DisplayUnits.Of(dimension, system), dimension, out UnitReading usual)
+            ? usual
+            : throw new InvalidOperationException("A dimension has no display unit.");
+    }
+
+    /// <inheritdoc/>
+    public string Text(double si, Dimension dimension, int digits = 5) => Text(si, UnitOf(dimension), digits);
+
+    /// <summary>The value with a unit of its own.</summary>
+    internal string Text(double si, in UnitReading unit, int digits)
+    {
+        string number = NumberFormatter.Shortest(UnitConverter.FromSi(si, unit, ambientPressure), digits);
+        return unit.Dimension is Dimension.Ratio or Dimension.Count ? number : $"{number} {unit.Spelling}";
+    }
+}
