@@ -7,7 +7,7 @@ public static class FluidCatalogue
 {
     private static readonly FluidName[] s_names =
     [
-        new("air", "dry air as an ideal gas", () => IdealGas.Air),
+        new("air", "dry air as an ideal gas", () => GasCatalogue.Air),
     ];
 
     /// <summary>Every accepted name with a word about the fluid.</summary>
