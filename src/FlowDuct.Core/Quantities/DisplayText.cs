@@ -15,6 +15,17 @@ internal sealed class DisplayText(UnitSystem system, double ambientPressure, IRe
             : throw new InvalidOperationException("A dimension has no display unit.");
     }
 
+    /// <summary>The unit of a quantity: one asked for, its own where it has one, else that of its dimension.</summary>
+    internal UnitReading UnitOf(QuantityRow row)
+    {
+        bool asked = own is not null && own.ContainsKey(row.Dimension);
+        return !asked && UnitTable.TryFind(row.DisplayUnit(system), row.Dimension, out UnitReading usual) ? usual : UnitOf(row.Dimension);
+    }
+
+    /// <summary>The number alone, with trailing zeros to the count of digits, as columns want it.</summary>
+    internal string Number(double si, in UnitReading unit, int digits) =>
+        NumberFormatter.Significant(UnitConverter.FromSi(si, unit, ambientPressure), digits);
+
     /// <inheritdoc/>
     public string Text(double si, Dimension dimension, int digits = 5) => Text(si, UnitOf(dimension), digits);
 

@@ -1,0 +1,35 @@
+using System.Text.Json;
+using FlowDuct.Devices;
+using FlowDuct.Fluids;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Cli.Rendering;
+
+/// <summary>What every JSON answer begins with.</summary>
+internal static class JsonHead
+{
+    private const int Schema = 1;
+
+    internal static void Write(Utf8JsonWriter json, string verdict, Fluid fluid)
+    {
+        json.WriteNumber("schema", Schema);
+        json.WriteString("verdict", verdict);
+        json.WriteStartObject("tool");
+        json.WriteString("name", "flowduct");
+        json.WriteString("version", ToolVersion.Version);
+        json.WriteString("commit", ToolVersion.Commit);
+        json.WriteEndObject();
+        json.WriteStartObject("method");
+        json.WriteString(fluid.Name, fluid.Formulation);
+        json.WriteEndObject();
+    }
+
+    /// <summary>The given figures of a station, SI.</summary>
+    internal static void Given(Utf8JsonWriter json, string prefix, in GivenSlots slots)
+    {
+        foreach (QuantityRow row in QuantityCatalogue.StationQuantities)
+        {
+            if (row.StationSlot is StationSymbol slot && slots.Has((int)slot)) json.WriteNumber(prefix + row.JsonKey, slots.Value((int)slot));
+        }
+    }
+}

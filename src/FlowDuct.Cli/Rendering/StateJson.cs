@@ -1,0 +1,37 @@
+using System.Text.Json;
+using FlowDuct.Devices;
+
+namespace FlowDuct.Cli.Rendering;
+
+/// <summary>The answer of a property question as JSON, coherent SI.</summary>
+internal static class StateJson
+{
+    internal static void Write(Stream to, StateAnswer answer, RenderOptions options)
+    {
+        using var json = new Utf8JsonWriter(to, JsonNumbers.Options);
+        json.WriteStartObject();
+        JsonHead.Write(json, "pass", answer.Fluid);
+        json.WriteStartObject("case");
+        json.WriteNull("tag");
+        json.WriteNull("name");
+        json.WriteString("device", "state");
+        json.WriteString("fluid", answer.Fluid.Name);
+        json.WriteStartObject("given");
+        JsonHead.Given(json, "at.", answer.Given);
+        json.WriteEndObject();
+        json.WriteStartObject("assumed");
+        json.WriteEndObject();
+        json.WriteEndObject();
+        json.WriteStartObject("units");
+        JsonStation.WriteUnits(json);
+        json.WriteEndObject();
+        json.WriteStartObject("stations");
+        JsonStation.Write(json, "at", answer.Fluid, answer.At);
+        json.WriteEndObject();
+        json.WriteStartArray("findings");
+        json.WriteEndArray();
+        json.WriteEndObject();
+        json.Flush();
+        to.WriteByte((byte)'\n');
+    }
+}

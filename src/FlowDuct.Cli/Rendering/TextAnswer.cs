@@ -1,0 +1,124 @@
+using FlowDuct.Devices;
+using FlowDuct.Findings;
+using FlowDuct.Fluids;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Cli.Rendering;
+
+/// <summary>The text answer: stations down, quantities across, then device, energy, findings, assumptions and the caution.</summary>
+internal static class TextAnswer
+{
+    internal const string Caution =
+        "Engineering estimate: it certifies nothing. The local pressure-equipment and piping codes and a licensed engineer decide.";
+
+    private static readonly string[] s_static = ["p", "T", "x", "h", "s", "V", "M"];
+    private static readonly string[] s_stagnation = ["p0", "T0", "rho", "w", "A", "d"];
+
+    internal static void Write(TextWriter to, DeviceAnswer answer, RenderOptions options)
+    {
+        to.WriteLine($"{(answer.Case.Device == DeviceKind.Nozzle ? "nozzle" : "diffuser")}, {answer.Fluid.Name}");
+        to.WriteLine();
+        Stations(to, answer, options, "static", s_static);
+        to.WriteLine();
+        Stations(to, answer, options, "stagnation", s_stagnation);
+        to.WriteLine();
+        Device(to, answer, options);
+        Energy(to, answer, options);
+        Laws(to, answer, options);
+        Findings(to, answer, options);
+        Assumed(to, answer, options);
+        to.WriteLine();
+        TextWrap.Write(to, string.Empty, Caution, 0);
+    }
+
+    private static void Stations(TextWriter to, DeviceAnswer answer, RenderOptions options, string title, string[] keys)
+    {
+        var table = new TextTable(title);
+        foreach (string key in keys)
+        {
+            UnitReading unit = TextFigures.UnitOf(key, options);
+            table.Column(key, unit.Dimension == Dimension.Ratio ? "-" : unit.Spelling);
+        }
+
+        foreach ((string name, StationAnswer at) in TextFigures.StationsOf(answer))
+            table.Row(name, [.. keys.Select(key => TextFigures.Number(StationFigureTable.Read(answer.Fluid, at, key), TextFigures.UnitOf(key, options), options))]);
+        table.Write(to);
+    }
+
+    private static void Device(TextWriter to, DeviceAnswer answer, RenderOptions options)
+    {
+        to.WriteLine("device");
+        foreach (QuantityRow row in QuantityCatalogue.Performance)
+        {
+            if (row.Key == "regime" && answer.Performance.Regime is string regime) Line(to, "regime", regime, string.Empty);
+            if (PerformanceFigures.Read(answer.Performance, row.Key) is not double value) continue;
+            UnitReading unit = TextFigures.UnitOf(row, options);
+            string unitWord = unit.Dimension is Dimension.Ratio ? string.Empty : unit.Spelling;
+            Line(to, row.Name, TextFigures.Number(value, unit, options), unitWord + Remark(answer, row.Key));
+        }
+    }
+
+    private static string Remark(DeviceAnswer answer, string key) => key switch
+    {
+        "isentropic_efficiency" when answer.EfficiencyImplied => "   implied by the figures",
+        "isentropic_efficiency" when answer.TakenIdeal => "   assumed",
+        _ => string.Empty,
+    };
+
+    private static void Line(TextWriter to, string name, string value, string unit) =>
+        to.WriteLine($"  {name,-34}{value,12} {unit}".TrimEnd());
+
+    private static void Energy(TextWriter to, DeviceAnswer answer, RenderOptions options)
+    {
+        if (answer.Ledger is not Ledger ledger) return;
+        UnitReading unit = options.Units.UnitOf(Dimension.SpecificEnergy);
+        string Text(double value) => TextFigures.Number(value, unit, options);
+        to.WriteLine();
+        var table = new TextTable("energy");
+        foreach (string head in (string[])["h", "V^2/2", "g z", "heat", "total"]) table.Column(head, unit.Spelling);
+        table.Row("in", Text(ledger.InletEnthalpy), Text(ledger.InletKinetic), Text(ledger.InletPotential), Text(ledger.Heat), Text(ledger.In));
+        table.Row("out", Text(ledger.ExitEnthalpy), Text(ledger.ExitKinetic), Text(ledger.ExitPotential), "-", Text(ledger.Out));
+        table.Row("left over", "-", "-", "-", "-", Text(Math.Abs(ledger.Closure) < 1e-6 ? 0 : ledger.Closure));
+        table.Write(to);
+    }
+
+    private static void Laws(TextWriter to, DeviceAnswer answer, RenderOptions options)
+    {
+        Audit audit = answer.Audit;
+        to.WriteLine();
+        string margin = audit.Entropy == Verdict.Holds && audit.EntropyMargin is double rise
+            ? $" (rise {options.Units.Text(Math.Abs(rise) < 1e-6 ? 0 : rise, Dimension.SpecificEntropy, 4)})"
+            : string.Empty;
+        TextWrap.Write(to, "laws      ", $"mass {Word(audit.Mass)}, energy {Word(audit.Energy)}, entropy {Word(audit.Entropy)}{margin}", 10);
+    }
+
+    private static string Word(Verdict verdict) => verdict switch
+    {
+        Verdict.Holds => "holds",
+        Verdict.WithinRounding => "holds within rounding",
+        Verdict.Broken => "IS BROKEN",
+        _ => "not judged",
+    };
+
+    private static void Findings(TextWriter to, DeviceAnswer answer, RenderOptions options)
+    {
+        List<Finding> shown = [.. answer.Findings.Where(f => !options.Quiet || f.Severity != Severity.Note)];
+        if (shown.Count == 0) return;
+        to.WriteLine();
+        to.WriteLine("findings");
+        foreach (Finding finding in shown)
+        {
+            string severity = TextFigures.SeverityWord(finding.Severity);
+            string prose = $"{finding.Code}: {finding.Message(options.Units)} ({finding.Standing})";
+            TextWrap.Write(to, $"  {TextFigures.Coloured(severity.PadRight(9), finding.Severity, options)}", prose, 11);
+        }
+    }
+
+    private static void Assumed(TextWriter to, DeviceAnswer answer, RenderOptions options)
+    {
+        if (options.Quiet) return;
+        to.WriteLine();
+        to.WriteLine("assumed");
+        foreach (string line in Assumptions.Of(answer)) TextWrap.Write(to, "  - ", line, 4);
+    }
+}

@@ -1,0 +1,28 @@
+namespace FlowDuct.Cli.Rendering;
+
+/// <summary>Breaks prose at spaces so that no line passes 80 columns.</summary>
+internal static class TextWrap
+{
+    internal const int Width = 80;
+
+    /// <summary>Writes a first prefix and prose, continued under the prose.</summary>
+    internal static void Write(TextWriter to, string prefix, string prose, int indent)
+    {
+        string line = prefix;
+        bool empty = true;
+        foreach (string word in prose.Split(' '))
+        {
+            if (!empty && line.Length + 1 + word.Length > Width)
+            {
+                to.WriteLine(line);
+                line = new string(' ', indent);
+                empty = true;
+            }
+
+            line += empty ? word : " " + word;
+            empty = false;
+        }
+
+        to.WriteLine(line);
+    }
+}

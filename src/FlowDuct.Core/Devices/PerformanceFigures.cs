@@ -1,0 +1,45 @@
+namespace FlowDuct.Devices;
+
+/// <summary>Reads the numbers of a <see cref="Performance"/> by their key in the catalogue of quantities.</summary>
+internal static class PerformanceFigures
+{
+    /// <summary>Every number that is worked out, by key; what the catalogue names beside these is not worked out yet and is null.</summary>
+    internal static readonly (string Key, Func<Performance, double?> Read)[] All =
+    [
+        ("mass_flow", p => p.MassFlow),
+        ("volume_flow", p => p.VolumeFlow),
+        ("isentropic_efficiency", p => p.IsentropicEfficiency),
+        ("velocity_coefficient", p => p.VelocityCoefficient),
+        ("critical_pressure_ratio", p => p.CriticalPressureRatio),
+        ("area_ratio", p => p.AreaRatio),
+        ("throat_area_ratio", p => p.ThroatAreaRatio),
+        ("entropy_rise", p => p.EntropyRise),
+        ("exit_velocity_ideal", p => p.ExitVelocityIdeal),
+        ("exit_velocity_range.least", p => p.ExitVelocityRange?.Least),
+        ("exit_velocity_range.greatest", p => p.ExitVelocityRange?.Greatest),
+        ("efficiency_range.least", p => p.EfficiencyRange?.Least),
+        ("efficiency_range.greatest", p => p.EfficiencyRange?.Greatest),
+        ("pressure_change", p => p.PressureChange),
+        ("stagnation_pressure_ratio", p => p.StagnationPressureRatio),
+        ("recovery", p => p.Recovery),
+        ("recovery_dynamic", p => p.RecoveryDynamic),
+        ("ideal_recovery", p => p.IdealRecovery),
+        ("effectiveness", p => p.Effectiveness),
+        ("loss_coefficient", p => p.LossCoefficient),
+        ("thrust", p => p.Thrust),
+        ("axial_force", p => p.AxialForce),
+        ("heat_rate", p => p.HeatRate),
+        ("lost_work", p => p.LostWork),
+    ];
+
+    /// <summary>The number of a key, or null where it cannot be known.</summary>
+    internal static double? Read(Performance performance, string key)
+    {
+        foreach ((string known, Func<Performance, double?> read) in All)
+        {
+            if (known == key) return read(performance);
+        }
+
+        return null;
+    }
+}

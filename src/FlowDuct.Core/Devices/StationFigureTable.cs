@@ -1,0 +1,46 @@
+using FlowDuct.Fluids;
+
+namespace FlowDuct.Devices;
+
+/// <summary>Reads the numbers of a <see cref="StationAnswer"/> by their key in the catalogue of quantities.</summary>
+internal static class StationFigureTable
+{
+    /// <summary>Every number of a station, by key, in the order of the JSON answer.</summary>
+    internal static readonly (string Key, Func<Fluid, StationAnswer, double?> Read)[] All =
+    [
+        ("p", (_, at) => at.State.p),
+        ("T", (_, at) => at.State.T),
+        ("x", (_, at) => at.State.HasQuality ? at.State.x : null),
+        ("h", (_, at) => at.HasState ? at.State.h : null),
+        ("s", (_, at) => at.HasState ? at.State.s : null),
+        ("u", (_, at) => at.HasState ? at.State.u : null),
+        ("rho", (_, at) => at.HasState ? at.State.rho : null),
+        ("cp", (_, at) => at.State.HasHeatCapacities ? at.State.cp : null),
+        ("cv", (_, at) => at.State.HasHeatCapacities ? at.State.cv : null),
+        ("w", (_, at) => at.HasState ? at.State.w : null),
+        ("V", (_, at) => at.Velocity),
+        ("M", (_, at) => at.Mach),
+        ("A", (_, at) => at.Area),
+        ("d", (_, at) => at.Diameter),
+        ("n", (_, at) => at.Openings),
+        ("z", (_, at) => at.Elevation),
+        ("p0", (_, at) => at.Stagnation?.p),
+        ("T0", (_, at) => at.Stagnation?.T),
+        ("h0", (_, at) => at.StagnationEnthalpy),
+        ("superheat", Superheat),
+    ];
+
+    /// <summary>The number of a key, or null where it cannot be known.</summary>
+    internal static double? Read(Fluid fluid, StationAnswer at, string key)
+    {
+        foreach ((string known, Func<Fluid, StationAnswer, double?> read) in All)
+        {
+            if (known == key) return read(fluid, at);
+        }
+
+        return null;
+    }
+
+    private static double? Superheat(Fluid fluid, StationAnswer at) =>
+        at.HasState && !at.State.HasQuality && fluid.TrySaturationTemperature(at.State.p, out double T) ? at.State.T - T : null;
+}
