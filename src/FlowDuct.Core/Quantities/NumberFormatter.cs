@@ -20,7 +20,7 @@ internal static class NumberFormatter
         if (!double.IsFinite(value))
             throw new ArgumentOutOfRangeException(nameof(value), value, "Only finite numbers are printed.");
 
-        // "E" rounds the exact binary value, once; its digits are only put in place below.
+        // "E" rounds the exact binary value, once, a tie to the even digit; the digits are only put in place below.
         string scientific = (value == 0 ? 0 : value).ToString("E" + (digits - 1).ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
         int e = scientific.IndexOf('E', StringComparison.Ordinal);
         int exponent = int.Parse(scientific.AsSpan(e + 1), NumberStyles.AllowLeadingSign, CultureInfo.InvariantCulture);

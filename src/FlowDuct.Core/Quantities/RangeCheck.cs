@@ -28,7 +28,7 @@ internal static class RangeCheck
         string named = context.Named(given.Text);
         if (context.Row.Dimension == Dimension.Pressure)
             return context.Refuse(VacuumReason(named, given, ambientPressure), string.Empty);
-        string least = Limit(limits.Least, given, ambientPressure);
+        string least = double.IsFinite(limits.Least) ? Limit(limits.Least, given, ambientPressure) : string.Empty;
         string reason = (context.Row.Dimension, double.IsFinite(limits.Least), double.IsFinite(limits.Greatest)) switch
         {
             (Dimension.Temperature, _, _) => $"{named} is not above absolute zero, {least}",

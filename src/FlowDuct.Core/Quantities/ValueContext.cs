@@ -29,7 +29,7 @@ internal readonly record struct ValueContext(string Place, QuantityRow Row, stri
     public FlowDuctException NotANumber(string text)
     {
         if (text.Length == 0)
-            return Refuse($"{Shown(text)} has no value; write for example {Example()}".TrimStart(), string.Empty);
+            return Refuse($"{(Prefix.Length == 0 ? "there is" : Prefix + " has")} no value; write for example {Example()}", string.Empty);
         ReadOnlySpan<char> chunk = NumberChunk(text);
         if (Row.Dimension == Dimension.Ratio && chunk.Contains(':'))
             return Refuse($"{Shown(text)} is a ratio of two numbers", ColonHint(chunk));
@@ -62,10 +62,18 @@ internal readonly record struct ValueContext(string Place, QuantityRow Row, stri
     /// <summary>The text up to its unit, so that the message shows the number that went wrong.</summary>
     private static ReadOnlySpan<char> NumberChunk(string text)
     {
+        if (NumberParser.Measure(text, out _) == 0)
+            return FirstWord(text);
         int end = 0;
         while (end < text.Length && !IsUnitLetter(text, end))
             end++;
-        return end == 0 ? text : text.AsSpan(0, end).Trim();
+        return text.AsSpan(0, end).Trim();
+    }
+
+    private static ReadOnlySpan<char> FirstWord(string text)
+    {
+        int space = text.IndexOf(' ', StringComparison.Ordinal);
+        return space < 0 ? text : text.AsSpan(0, space);
     }
 
     private static bool IsUnitLetter(string text, int at) =>
