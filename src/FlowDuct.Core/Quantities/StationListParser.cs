@@ -52,7 +52,10 @@ internal static class StationListParser
         refusals.RequireOwnUnit(row, symbol, value);
         if ((row.TakenBy & refusals.List) == 0)
             throw refusals.NotTakenHere(symbol, row);
-        return new StationItem(row, ValueParser.Parse(new ValueContext(refusals.Place, row, symbol + "="), value, ambientPressure));
+        GivenValue given = ValueParser.Parse(new ValueContext(refusals.Place, row, symbol + "="), value, ambientPressure);
+        if (given.WasGauge && refusals.List == StationLists.Ambient)
+            throw refusals.CircularAmbient(piece, given);
+        return new StationItem(row, given);
     }
 
     private static void Add(List<StationItem> items, StationItem item, StationListRefusals refusals)

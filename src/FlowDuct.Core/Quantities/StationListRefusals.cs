@@ -71,6 +71,14 @@ internal sealed class StationListRefusals(string place, StationLists list)
     /// <summary>Refuses a second item of a quantity.</summary>
     public FlowDuctException Twice(QuantityRow row) => Refuse($"{row.Symbol} is given twice", string.Empty);
 
+    /// <summary>Refuses an ambient pressure that is told relative to the ambient pressure.</summary>
+    public FlowDuctException CircularAmbient(string piece, in GivenValue given)
+    {
+        string spelling = given.Unit.Unit.Spelling;
+        string plain = given.Unit.Unit.Basis == UnitBasis.Gauge ? spelling[..^1] : spelling;
+        return Refuse($"{Echo.Ascii(piece)}: gauge and vacuum readings start from the ambient pressure itself", $"give it absolute, in {plain}(a)");
+    }
+
     private FlowDuctException Refuse(string reason, string nextStep) => new(new Refusal(RefusalKind.NotUnderstood, place, reason, nextStep));
 
     private static string ForTwin(QuantityRow twin, string value) => $"for {twin.Name} write {twin.Symbol}={Echo.Ascii(value)}";

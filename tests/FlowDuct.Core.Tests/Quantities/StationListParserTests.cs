@@ -61,7 +61,7 @@ public sealed class StationListParserTests
     [InlineData("x=1.2", "x=1.2 is outside 0 to 1")]
     [InlineData("T=-300 degC", "T=-300 degC is not above absolute zero, -273.15 degC")]
     [InlineData("p=-1.2 barg", "p=-1.2 barg is not above perfect vacuum, -1.01325 barg (ambient pressure 1.01325 bar)")]
-    [InlineData("p=9 baar", "p=9 baar: baar is not a unit here; did you mean bar or bara?")]
+    [InlineData("p=9 baar", "p=9 baar: baar is not a unit here; did you mean bar?")]
     [InlineData("p=nan", "p=nan is not a finite number")]
     public void A_wrong_list_is_refused_with_its_reason(string text, string reason)
     {
@@ -79,6 +79,15 @@ public sealed class StationListParserTests
     public void A_ratio_with_a_colon_is_met_with_the_number_to_write(string text, string reason, string next)
     {
         Refusal refusal = Refused("--exit", StationLists.Exit, text);
+        Assert.Equal((reason, next), (refusal.Reason, refusal.NextStep));
+    }
+
+    [Theory]
+    [InlineData("p=0.1 barg", "p=0.1 barg: gauge and vacuum readings start from the ambient pressure itself", "give it absolute, in bar(a)")]
+    [InlineData("p=1 inHg(vac)", "p=1 inHg(vac): gauge and vacuum readings start from the ambient pressure itself", "give it absolute, in inHg(a)")]
+    public void An_ambient_pressure_is_absolute(string text, string reason, string next)
+    {
+        Refusal refusal = Refused("--ambient", StationLists.Ambient, text);
         Assert.Equal((reason, next), (refusal.Reason, refusal.NextStep));
     }
 
