@@ -16,7 +16,7 @@ public readonly struct AbsolutePressure : IDimensionMarker
     public static bool LeastIsInclusive => false;
 }
 
-/// <summary>Pressure above the ambient pressure, Pa; negative below it. How low it may go is known only with the ambient pressure.</summary>
+/// <summary>Pressure above the ambient pressure, Pa; negative below it. Its lower limit depends on the ambient pressure.</summary>
 public readonly struct GaugePressure : IDimensionMarker
 {
     /// <inheritdoc/>

@@ -21,7 +21,8 @@ internal static class NumberFormatter
             throw new ArgumentOutOfRangeException(nameof(value), value, "Only finite numbers are printed.");
 
         // "E" rounds the exact binary value, once, a tie to the even digit; the digits are only put in place below.
-        string scientific = (value == 0 ? 0 : value).ToString("E" + (digits - 1).ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
+        string format = "E" + (digits - 1).ToString(CultureInfo.InvariantCulture);
+        string scientific = (value == 0 ? 0 : value).ToString(format, CultureInfo.InvariantCulture);
         int e = scientific.IndexOf('E', StringComparison.Ordinal);
         int exponent = int.Parse(scientific.AsSpan(e + 1), NumberStyles.AllowLeadingSign, CultureInfo.InvariantCulture);
         ReadOnlySpan<char> mantissa = scientific.AsSpan(0, e);

@@ -61,7 +61,8 @@ internal static class NumberParser
         ReadOnlySpan<double> common = [0.5, 0.05, 0.005, 0.0005, 0.00005, 0.000005, 0.0000005];
         if (place <= 0 && -place < common.Length)
             return common[-place];
-        return double.Parse(string.Create(CultureInfo.InvariantCulture, $"5E{place - 1}"), NumberStyles.Float, CultureInfo.InvariantCulture);
+        string half = string.Create(CultureInfo.InvariantCulture, $"5E{place - 1}");
+        return double.Parse(half, NumberStyles.Float, CultureInfo.InvariantCulture);
     }
 
     private static int MeasureExponent(ReadOnlySpan<char> text, ref int lastPlace)
@@ -82,7 +83,9 @@ internal static class NumberParser
         ReadOnlySpan<char> significant = digits.TrimStart('0');
         if (significant.IsEmpty)
             return 0;
-        return significant.Length > MostExponentDigits ? 9_999_999 : int.Parse(significant, NumberStyles.None, CultureInfo.InvariantCulture);
+        return significant.Length > MostExponentDigits
+            ? 9_999_999
+            : int.Parse(significant, NumberStyles.None, CultureInfo.InvariantCulture);
     }
 
     private static string SizeProblem(ReadOnlySpan<char> text, double value, double halfPlace)

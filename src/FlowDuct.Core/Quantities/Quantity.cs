@@ -26,10 +26,13 @@ public readonly record struct Quantity<TDimension>
     public bool IsSet => isSet;
 
     /// <summary>Makes a quantity from its value in coherent SI.</summary>
-    /// <param name="si">The value, in <see cref="IDimensionMarker.SiUnit"/>; finite and not below <see cref="IDimensionMarker.Least"/>.</param>
+    /// <param name="si">The value, in <see cref="IDimensionMarker.SiUnit"/>; finite, in range.</param>
     /// <returns>The quantity.</returns>
     /// <exception cref="ArgumentOutOfRangeException">The value is not finite, or is outside the range of its kind.</exception>
-    [SuppressMessage("Design", "CA1000:Do not declare static members on generic types", Justification = "The factory belongs to the kind: Quantity<Velocity>.FromSi(25) says what it makes.")]
+    [SuppressMessage(
+        "Design",
+        "CA1000:Do not declare static members on generic types",
+        Justification = "The factory belongs to the kind: Quantity<Velocity>.FromSi(25) says what it makes.")]
     public static Quantity<TDimension> FromSi(double si)
     {
         bool isAbove = TDimension.LeastIsInclusive ? si >= TDimension.Least : si > TDimension.Least;
@@ -48,6 +51,8 @@ public readonly record struct Quantity<TDimension>
         if (double.IsNegativeInfinity(TDimension.Least))
             return $"The {TDimension.Name} must be finite.";
         string relation = TDimension.LeastIsInclusive ? "not below" : "above";
-        return string.Create(CultureInfo.InvariantCulture, $"The {TDimension.Name} must be finite and {relation} {TDimension.Least} {TDimension.SiUnit}.");
+        return string.Create(
+            CultureInfo.InvariantCulture,
+            $"The {TDimension.Name} must be finite and {relation} {TDimension.Least} {TDimension.SiUnit}.");
     }
 }

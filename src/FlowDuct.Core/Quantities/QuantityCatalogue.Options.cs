@@ -9,7 +9,7 @@ internal static partial class QuantityCatalogue
         new()
         {
             Key = "flow",
-            Symbol = "m",
+            Symbol = "qm",
             Word = "flow",
             Name = "mass flow",
             Dimension = Dimension.MassFlow,
@@ -99,7 +99,7 @@ internal static partial class QuantityCatalogue
         new()
         {
             Key = "heat_loss",
-            Symbol = "q",
+            Symbol = "ql",
             Word = "heat-loss",
             Name = "heat lost",
             Dimension = Dimension.SpecificEnergy,

@@ -8,34 +8,47 @@ internal static partial class QuantityCatalogue
     [
         Result("regime", "", "regime", Dimension.Ratio, "Regime of the flow in words, such as choked-subsonic-exit.", isText: true),
         Result("choked", "", "choked", Dimension.Ratio, "Whether the throat passes the greatest flow it can.", isText: true),
-        Result("mass_flow", "m", "mass flow", Dimension.MassFlow, "Mass flow of all openings together."),
-        Result("volume_flow", "Q", "volume flow", Dimension.VolumeFlow, "Volume flow at inlet static conditions."),
+        Result("mass_flow", "qm", "mass flow", Dimension.MassFlow, "Mass flow of all openings together."),
+        Result("volume_flow", "qV", "volume flow", Dimension.VolumeFlow, "Volume flow at inlet static conditions."),
         Result("isentropic_efficiency", "eta", "isentropic efficiency", Dimension.Ratio,
             "Kinetic energy reached over that of the isentropic expansion; for a diffuser the isentropic over the actual enthalpy rise."),
         Result("velocity_coefficient", "phi", "velocity coefficient", Dimension.Ratio, "Exit velocity over isentropic exit velocity."),
-        Result("discharge_coefficient", "Cd", "discharge coefficient", Dimension.Ratio, "Mass flow over the isentropic flow of the throat."),
-        Result("critical_pressure_ratio", "p*/p0", "critical pressure ratio", Dimension.Ratio, "Throat pressure at choking over inlet stagnation pressure."),
+        Result("discharge_coefficient", "Cd", "discharge coefficient", Dimension.Ratio,
+            "Mass flow over the isentropic flow of the throat."),
+        Result("critical_pressure_ratio", "p*/p0", "critical pressure ratio", Dimension.Ratio,
+            "Throat pressure at choking over inlet stagnation pressure."),
         Result("area_ratio", "A2/A1", "area ratio", Dimension.Ratio, "Exit area over inlet area."),
         Result("throat_area_ratio", "A2/At", "throat area ratio", Dimension.Ratio, "Exit area over throat area."),
         Result("entropy_rise", "s2-s1", "entropy rise", Dimension.SpecificEntropy, "Entropy of the exit minus entropy of the inlet."),
-        Result("exit_velocity_ideal", "V2s", "isentropic exit velocity", Dimension.Velocity, "Exit velocity of the isentropic expansion to the exit pressure."),
-        Result("exit_velocity_range.least", "V2min", "least exit velocity", Dimension.Velocity, "Least exit velocity that a reading on the saturation line allows."),
-        Result("exit_velocity_range.greatest", "V2max", "greatest exit velocity", Dimension.Velocity, "Greatest exit velocity that a reading on the saturation line allows."),
-        Result("efficiency_range.least", "eta_min", "least efficiency", Dimension.Ratio, "Least isentropic efficiency that a reading on the saturation line allows."),
-        Result("efficiency_range.greatest", "eta_max", "greatest efficiency", Dimension.Ratio, "Greatest isentropic efficiency that a reading on the saturation line allows."),
-        Result("pressure_change", "p2-p1", "pressure change", Dimension.PressureDifference, "Exit static pressure minus inlet static pressure."),
-        Result("stagnation_pressure_ratio", "p02/p01", "stagnation pressure ratio", Dimension.Ratio, "Exit stagnation pressure over inlet stagnation pressure."),
+        Result("exit_velocity_ideal", "V2s", "isentropic exit velocity", Dimension.Velocity,
+            "Exit velocity of the isentropic expansion to the exit pressure."),
+        Result("exit_velocity_range.least", "V2min", "least exit velocity", Dimension.Velocity,
+            "Least exit velocity that a reading on the saturation line allows."),
+        Result("exit_velocity_range.greatest", "V2max", "greatest exit velocity", Dimension.Velocity,
+            "Greatest exit velocity that a reading on the saturation line allows."),
+        Result("efficiency_range.least", "eta_min", "least efficiency", Dimension.Ratio,
+            "Least isentropic efficiency that a reading on the saturation line allows."),
+        Result("efficiency_range.greatest", "eta_max", "greatest efficiency", Dimension.Ratio,
+            "Greatest isentropic efficiency that a reading on the saturation line allows."),
+        Result("pressure_change", "p2-p1", "pressure change", Dimension.PressureDifference,
+            "Exit static pressure minus inlet static pressure."),
+        Result("stagnation_pressure_ratio", "p02/p01", "stagnation pressure ratio", Dimension.Ratio,
+            "Exit stagnation pressure over inlet stagnation pressure."),
     ];
 
     /// <summary>Recovery, loss and coefficients.</summary>
     private static QuantityRow[] CoefficientRows() =>
     [
-        Result("recovery", "Cp", "pressure-recovery coefficient", Dimension.Ratio, "Static pressure rise over inlet stagnation minus static pressure."),
-        Result("recovery_dynamic", "Cpd", "dynamic pressure recovery", Dimension.Ratio, "Static pressure rise over half density times velocity squared at the inlet."),
+        Result("recovery", "Cp", "pressure-recovery coefficient", Dimension.Ratio,
+            "Static pressure rise over inlet stagnation minus static pressure."),
+        Result("recovery_dynamic", "Cpd", "dynamic pressure recovery", Dimension.Ratio,
+            "Static pressure rise over half density times velocity squared at the inlet."),
         Result("ideal_recovery", "Cpi", "ideal recovery", Dimension.Ratio, "Recovery of the isentropic flow at the actual area ratio."),
         Result("effectiveness", "eps", "effectiveness", Dimension.Ratio, "Recovery over ideal recovery."),
-        Result("loss_coefficient", "zeta", "loss coefficient", Dimension.Ratio, "Loss of stagnation pressure over the dynamic pressure of the narrower end."),
-        Result("polytropic_efficiency", "etap", "polytropic efficiency", Dimension.Ratio, "Efficiency of an infinitely small step of the process."),
+        Result("loss_coefficient", "zeta", "loss coefficient", Dimension.Ratio,
+            "Loss of stagnation pressure over the dynamic pressure of the narrower end."),
+        Result("polytropic_efficiency", "etap", "polytropic efficiency", Dimension.Ratio,
+            "Efficiency of an infinitely small step of the process."),
         Result("reynolds_throat", "Re", "throat Reynolds number", Dimension.Ratio, "Reynolds number of the throat on its bore."),
     ];
 
@@ -43,12 +56,17 @@ internal static partial class QuantityCatalogue
     private static QuantityRow[] ForceAndLimitRows() =>
     [
         Result("thrust", "F", "thrust", Dimension.Force, "Momentum of the jet plus the excess of exit pressure over the surroundings."),
-        Result("axial_force", "Fx", "axial force", Dimension.Force, "Force of the fluid on the device with ambient pressure outside, positive downstream."),
+        Result("axial_force", "Fx", "axial force", Dimension.Force,
+            "Force of the fluid on the device with ambient pressure outside, positive downstream."),
         Result("heat_rate", "Q", "heat rate", Dimension.HeatRate, "Heat added to the whole flow."),
-        Result("lost_work", "wl", "lost work", Dimension.SpecificEnergy, "Ambient temperature times the entropy generated, per mass."),
-        Result("back_pressure_limits.subsonic", "p_sub", "greatest choking back pressure", Dimension.Pressure, "Above this back pressure the throat is not choked."),
-        Result("back_pressure_limits.shock_at_exit", "p_shock", "back pressure of a shock at the exit", Dimension.Pressure, "Back pressure at which a normal shock stands in the exit plane."),
-        Result("back_pressure_limits.full_expansion", "p_full", "back pressure of full expansion", Dimension.Pressure, "Back pressure equal to that of the supersonic exit plane."),
+        Result("lost_work", "wl", "lost work", Dimension.SpecificEnergy,
+            "Ambient temperature times the entropy generated, per mass."),
+        Result("back_pressure_limits.subsonic", "p_sub", "greatest choking back pressure", Dimension.Pressure,
+            "Above this back pressure the throat is not choked."),
+        Result("back_pressure_limits.shock_at_exit", "p_shock", "back pressure of a shock at the exit", Dimension.Pressure,
+            "Back pressure at which a normal shock stands in the exit plane."),
+        Result("back_pressure_limits.full_expansion", "p_full", "back pressure of full expansion", Dimension.Pressure,
+            "Back pressure equal to that of the supersonic exit plane."),
     ];
 
     /// <summary>The normal shock.</summary>
@@ -61,7 +79,8 @@ internal static partial class QuantityCatalogue
         Result("shock.area_ratio", "As/At", "shock area ratio", Dimension.Ratio, "Area at the shock over throat area."),
     ];
 
-    private static QuantityRow Result(string key, string symbol, string name, Dimension dimension, string help, bool isText = false) => new()
+    private static QuantityRow Result(
+        string key, string symbol, string name, Dimension dimension, string help, bool isText = false) => new()
     {
         Key = key,
         Symbol = symbol.Length == 0 ? key : symbol,

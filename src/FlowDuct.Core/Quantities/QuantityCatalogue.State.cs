@@ -15,7 +15,8 @@ internal static partial class QuantityCatalogue
             Dimension = Dimension.Pressure,
             Kind = QuantityKind.Both,
             StationSlot = StationSymbol.Pressure,
-            TakenBy = StationLists.Inlet | StationLists.Throat | StationLists.Exit | StationLists.Ambient | StationLists.At | StationLists.Back,
+            TakenBy = StationLists.Inlet | StationLists.Throat | StationLists.Exit
+                | StationLists.Ambient | StationLists.At | StationLists.Back,
             JsonKey = "p",
             Limits = QuantityLimits.Positive,
             Help = "Absolute static pressure; gauge and vacuum readings are converted with the ambient pressure.",

@@ -1,3 +1,5 @@
+using System.Diagnostics.CodeAnalysis;
+
 namespace FlowDuct.Quantities;
 
 /// <summary>The one table of quantities. Options, station lists, headers, JSON keys, help and docs are renderings of it.</summary>
@@ -7,8 +9,6 @@ internal static partial class QuantityCatalogue
 
     private static readonly QuantityRow[] OptionTable = OptionRows();
 
-    private static readonly QuantityRow[] PerformanceTable = [.. DeviceRows(), .. CoefficientRows(), .. ForceAndLimitRows(), .. ShockRows()];
-
     /// <summary>Quantities of a station, given and answered; the slots first, in the order of <see cref="StationSymbol"/>.</summary>
     public static IReadOnlyList<QuantityRow> StationQuantities => StationTable;
 
@@ -16,10 +16,10 @@ internal static partial class QuantityCatalogue
     public static IReadOnlyList<QuantityRow> Options => OptionTable;
 
     /// <summary>Results of the device, in the order of the JSON answer.</summary>
-    public static IReadOnlyList<QuantityRow> Performance => PerformanceTable;
+    public static IReadOnlyList<QuantityRow> Performance => Results.Table;
 
     /// <summary>Every row.</summary>
-    public static IEnumerable<QuantityRow> Rows => StationTable.Concat(OptionTable).Concat(PerformanceTable);
+    public static IEnumerable<QuantityRow> Rows => StationTable.Concat(OptionTable).Concat(Results.Table);
 
     /// <summary>The row of a station slot.</summary>
     public static QuantityRow Of(StationSymbol symbol) => StationTable[(int)symbol];
@@ -28,23 +28,23 @@ internal static partial class QuantityCatalogue
     public static QuantityRow Of(CaseOption option) => OptionTable[(int)option];
 
     /// <summary>Finds a station quantity by symbol or word, case-sensitive.</summary>
-    public static bool TryFindStationQuantity(ReadOnlySpan<char> name, [System.Diagnostics.CodeAnalysis.NotNullWhen(true)] out QuantityRow? row)
+    public static bool TryFindStationQuantity(ReadOnlySpan<char> name, [NotNullWhen(true)] out QuantityRow? row)
     {
         row = Find(StationTable, name);
         return row is not null;
     }
 
     /// <summary>Finds an option by name, with hyphens or underscores, without the leading hyphens.</summary>
-    public static bool TryFindOption(ReadOnlySpan<char> name, [System.Diagnostics.CodeAnalysis.NotNullWhen(true)] out QuantityRow? row)
+    public static bool TryFindOption(ReadOnlySpan<char> name, [NotNullWhen(true)] out QuantityRow? row)
     {
         row = Find(OptionTable, name);
         return row is not null;
     }
 
     /// <summary>Finds a result by its key, such as "mass_flow" or "shock.area_ratio".</summary>
-    public static bool TryFindPerformance(ReadOnlySpan<char> key, [System.Diagnostics.CodeAnalysis.NotNullWhen(true)] out QuantityRow? row)
+    public static bool TryFindPerformance(ReadOnlySpan<char> key, [NotNullWhen(true)] out QuantityRow? row)
     {
-        row = Find(PerformanceTable, key);
+        row = Find(Results.Table, key);
         return row is not null;
     }
 
@@ -57,5 +57,11 @@ internal static partial class QuantityCatalogue
         }
 
         return null;
+    }
+
+    /// <summary>Built on first use: reading a command line does not need it.</summary>
+    private static class Results
+    {
+        public static readonly QuantityRow[] Table = [.. DeviceRows(), .. CoefficientRows(), .. ForceAndLimitRows(), .. ShockRows()];
     }
 }

@@ -89,7 +89,8 @@ internal static class Slips
     /// <summary>Superscripts, middle dots, carets and blanks written the ASCII way.</summary>
     private static string? Rewritten(string spelling)
     {
-        string ascii = spelling.Replace('\u00b2', '2').Replace('\u00b3', '3').Replace('\u00b7', '.').Replace('\u22c5', '.').Replace('*', '.')
+        string ascii = spelling
+            .Replace('\u00b2', '2').Replace('\u00b3', '3').Replace('\u00b7', '.').Replace('\u22c5', '.').Replace('*', '.')
             .Replace("^", string.Empty, StringComparison.Ordinal).Replace(" ", string.Empty, StringComparison.Ordinal)
             .Replace("\u2082", "2", StringComparison.Ordinal).Replace("kgK", "(kg.K)", StringComparison.Ordinal)
             .Replace("/kg.K", "/(kg.K)", StringComparison.Ordinal).Replace("/kg/K", "/(kg.K)", StringComparison.Ordinal)

@@ -76,10 +76,12 @@ internal sealed class StationListRefusals(string place, StationLists list)
     {
         string spelling = given.Unit.Unit.Spelling;
         string plain = given.Unit.Unit.Basis == UnitBasis.Gauge ? spelling[..^1] : spelling;
-        return Refuse($"{Echo.Ascii(piece)}: gauge and vacuum readings start from the ambient pressure itself", $"give it absolute, in {plain}(a)");
+        string reason = $"{Echo.Ascii(piece)}: gauge and vacuum readings start from the ambient pressure itself";
+        return Refuse(reason, $"give it absolute, in {plain}(a)");
     }
 
-    private FlowDuctException Refuse(string reason, string nextStep) => new(new Refusal(RefusalKind.NotUnderstood, place, reason, nextStep));
+    private FlowDuctException Refuse(string reason, string nextStep) =>
+        new(new Refusal(RefusalKind.NotUnderstood, place, reason, nextStep));
 
     private static string ForTwin(QuantityRow twin, string value) => $"for {twin.Name} write {twin.Symbol}={Echo.Ascii(value)}";
 
@@ -89,7 +91,8 @@ internal sealed class StationListRefusals(string place, StationLists list)
     {
         foreach (QuantityRow row in QuantityCatalogue.StationQuantities)
         {
-            bool same = symbol.Equals(row.Symbol, StringComparison.OrdinalIgnoreCase) || symbol.Equals(row.Word, StringComparison.OrdinalIgnoreCase);
+            bool same = symbol.Equals(row.Symbol, StringComparison.OrdinalIgnoreCase)
+                || symbol.Equals(row.Word, StringComparison.OrdinalIgnoreCase);
             if (same && row.StationSlot is not null && UnitTable.TryFind(unit.Length == 0 ? "1" : unit, row.Dimension, out _))
                 return row;
         }

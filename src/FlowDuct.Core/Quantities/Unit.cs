@@ -12,8 +12,6 @@ internal sealed class Unit
         Source = source;
         Offset = offset;
         Basis = basis;
-        double inverse = 1 / factor;
-        Divisor = inverse > 1 && inverse == Math.Floor(inverse) ? inverse : 0;
     }
 
     /// <summary>As typed and printed; ASCII, case-sensitive, unique in its dimension.</summary>
@@ -38,5 +36,13 @@ internal sealed class Unit
     /// The whole number of this unit in one SI unit, 0 where it is not whole. Dividing by it is correctly rounded, so that
     /// 18 mm is 0.018 m to the last bit; a product with 0.001 need not be.
     /// </summary>
-    public double Divisor { get; }
+    /// <remarks>Computed on demand: with plain stores only, the table is laid out by the compiler and costs nothing at start.</remarks>
+    public double Divisor
+    {
+        get
+        {
+            double inverse = 1 / Factor;
+            return inverse > 1 && inverse == Math.Floor(inverse) ? inverse : 0;
+        }
+    }
 }

@@ -40,7 +40,15 @@ internal static class UnitConverter
 
     private static double OffsetOf(in UnitReading unit) => unit.Dimension == Dimension.Temperature ? unit.Unit.Offset : 0;
 
-    private static double Scale(double value, Unit unit) => unit.Divisor > 1 ? value / unit.Divisor : value * unit.Factor;
+    private static double Scale(double value, Unit unit)
+    {
+        double divisor = unit.Divisor;
+        return divisor > 1 ? value / divisor : value * unit.Factor;
+    }
 
-    private static double Unscale(double si, Unit unit) => unit.Divisor > 1 ? si * unit.Divisor : si / unit.Factor;
+    private static double Unscale(double si, Unit unit)
+    {
+        double divisor = unit.Divisor;
+        return divisor > 1 ? si * divisor : si / unit.Factor;
+    }
 }

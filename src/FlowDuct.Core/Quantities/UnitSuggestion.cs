@@ -53,7 +53,8 @@ internal static class UnitSuggestion
     /// <summary>Standard flows of which several conventions are in use: none is assumed.</summary>
     private static string? AmbiguousReference(string spelling, Dimension dimension)
     {
-        bool isFlow = dimension is Dimension.MassFlow or Dimension.VolumeFlow or Dimension.NormalVolumeFlow or Dimension.StandardVolumeFlow;
+        bool isFlow = dimension is Dimension.MassFlow or Dimension.VolumeFlow
+            or Dimension.NormalVolumeFlow or Dimension.StandardVolumeFlow;
         return isFlow && IsAmbiguous(spelling)
             ? $"{spelling} names no reference state (conventions differ by up to 8.7 %); add --reference-state "
                 + "\"T=60 degF, p=14.696 psi\", or write Nm3/h (0 degC) or Sm3/h (15 degC)"
@@ -84,7 +85,9 @@ internal static class UnitSuggestion
     private static string? KnownSlip(string spelling, Dimension dimension, string shown)
     {
         string? meant = Slips.Meant(spelling, dimension);
-        return meant is not null && UnitTable.TryFind(meant, dimension, out _) ? $"{shown} is not a unit here; did you mean {meant}?" : null;
+        return meant is not null && UnitTable.TryFind(meant, dimension, out _)
+            ? $"{shown} is not a unit here; did you mean {meant}?"
+            : null;
     }
 
     private static string? NearMiss(string spelling, Dimension dimension, string shown)
@@ -98,7 +101,10 @@ internal static class UnitSuggestion
         foreach (Unit unit in UnitTable.All)
         {
             if (UnitTable.TryFind(spelling, unit.Dimension, out _))
-                return $"{shown} is a unit of {DimensionWords.Of(unit.Dimension)}; for {DimensionWords.Of(dimension)} write one of {UnitsOf(dimension)}";
+            {
+                return $"{shown} is a unit of {DimensionWords.Of(unit.Dimension)}; "
+                    + $"for {DimensionWords.Of(dimension)} write one of {UnitsOf(dimension)}";
+            }
         }
 
         return null;

@@ -73,7 +73,8 @@ internal static class ValueParser
         throw context.WrongUnit(text, spelling);
     }
 
-    private static GivenValue Finish(in ValueContext context, string text, PrintedNumber number, in UnitReading unit, double ambientPressure)
+    private static GivenValue Finish(
+        in ValueContext context, string text, PrintedNumber number, in UnitReading unit, double ambientPressure)
     {
         double si = UnitConverter.ToSi(number.Value, unit, ambientPressure);
         double halfWidth = UnitConverter.IntervalToSi(number.HalfPlace, unit);

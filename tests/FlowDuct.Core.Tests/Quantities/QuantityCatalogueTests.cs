@@ -28,6 +28,7 @@ public sealed class QuantityCatalogueTests
             string[] names = [.. table.SelectMany(r => new[] { r.Key, r.Word }.Where(n => n.Length > 0).Distinct())];
             Assert.Equal(names.Length, names.Distinct().Count());
             Assert.Equal(table.Count, table.Select(r => r.JsonKey).Distinct().Count());
+            Assert.Equal(table.Count, table.Select(r => r.Symbol).Distinct().Count());
         }
     }
 
