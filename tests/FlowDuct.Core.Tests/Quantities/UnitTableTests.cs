@@ -47,6 +47,73 @@ public sealed class UnitTableTests
         ("ft2/s2", "ft2/s2", Dimension.SpecificEnergy),
     ];
 
+    /// <summary>Independent of the expressions of the table: SI prefixes, minutes and hours, international foot, yard and nautical mile.</summary>
+    private static readonly (string Spelling, double Factor)[] Literals =
+    [
+        ("kn", 0.51444444444444444),
+        ("mph", 0.44704),
+        ("km/h", 0.27777777777777778),
+        ("ft/min", 0.00508),
+        ("m/min", 0.016666666666666667),
+        ("in2", 0.00064516),
+        ("ft2", 0.09290304),
+        ("lb/in3", 27679.904710203122),
+        ("ksi", 6894757.2931683613),
+        ("klb/h", 0.12599788055555556),
+        ("lb/min", 0.0075598728333333333),
+        ("t/h", 0.27777777777777778),
+        ("ft3/h", 7.8657907199999998e-6),
+        ("Btu/s", 1055.05585262),
+        ("cal/g", 4186.8),
+        ("kcal/(kg.K)", 4186.8),
+        ("deg", 0.017453292519943296),
+        ("L/min", 1.6666666666666667e-5),
+        ("Nm3/h", 0.00027777777777777778),
+        ("Sm3/min", 0.016666666666666667),
+        ("kg/min", 0.016666666666666667),
+        ("g/min", 1.6666666666666667e-5),
+        ("%", 0.01),
+        ("bara", 100000),
+        ("barg", 100000),
+        ("mbar", 100),
+        ("hPa", 100),
+        ("kPa", 1000),
+        ("psia", 6894.7572931683613),
+        ("psig", 6894.7572931683613),
+        ("degC", 1),
+        ("kJ/kg", 1000),
+        ("MJ/kg", 1000000),
+        ("J/g", 1000),
+        ("m2/s2", 1),
+        ("kJ/(kg.K)", 1000),
+        ("J/(g.K)", 1000),
+        ("L/kg", 0.001),
+        ("cm3/g", 0.001),
+        ("kg/L", 1000),
+        ("g/cm3", 1000),
+        ("g/L", 1),
+        ("km/s", 1000),
+        ("mm/s", 0.001),
+        ("ft/s", 0.3048),
+        ("mm", 0.001),
+        ("cm", 0.01),
+        ("km", 1000),
+        ("um", 0.000001),
+        ("mm2", 0.000001),
+        ("cm2", 0.0001),
+        ("kg/h", 0.00027777777777777778),
+        ("g/s", 0.001),
+        ("m3/min", 0.016666666666666667),
+        ("m3/h", 0.00027777777777777778),
+        ("L/s", 0.001),
+        ("Nm3/min", 0.016666666666666667),
+        ("Sm3/h", 0.00027777777777777778),
+        ("kW", 1000),
+        ("MW", 1000000),
+        ("ft/s2", 0.3048),
+        ("kN", 1000),
+    ];
+
     private static readonly string[] WithoutCounterpart =
     [
         "Btu_IT", "cal_IT", "cal_th", "ft lbf", "metric horsepower", "ton of refrigeration (12000 Btu_IT/h)", "US gallon",
@@ -61,32 +128,17 @@ public sealed class UnitTableTests
         Assert.All(Counterparts, c => AssertClose(exact[c.Reference], Row(c.Spelling, c.Dimension).Factor, 1e-14));
     }
 
-    // Literals independent of the table: SI prefixes, minutes and hours; international yard and nautical mile.
-    [Theory]
-    [InlineData("kn", 0.51444444444444444)]
-    [InlineData("mph", 0.44704)]
-    [InlineData("km/h", 0.27777777777777778)]
-    [InlineData("ft/min", 0.00508)]
-    [InlineData("m/min", 0.016666666666666667)]
-    [InlineData("in2", 0.00064516)]
-    [InlineData("ft2", 0.09290304)]
-    [InlineData("lb/in3", 27679.904710203122)]
-    [InlineData("ksi", 6894757.2931683613)]
-    [InlineData("klb/h", 0.12599788055555556)]
-    [InlineData("lb/min", 0.0075598728333333333)]
-    [InlineData("t/h", 0.27777777777777778)]
-    [InlineData("ft3/h", 7.8657907199999998e-6)]
-    [InlineData("Btu/s", 1055.05585262)]
-    [InlineData("cal/g", 4186.8)]
-    [InlineData("kcal/(kg.K)", 4186.8)]
-    [InlineData("deg", 0.017453292519943296)]
-    [InlineData("L/min", 1.6666666666666667e-5)]
-    [InlineData("Nm3/h", 0.00027777777777777778)]
-    [InlineData("Sm3/min", 0.016666666666666667)]
-    [InlineData("kg/min", 0.016666666666666667)]
-    [InlineData("g/min", 1.6666666666666667e-5)]
-    public void Factors_agree_with_independent_literals(string spelling, double factor) =>
-        AssertClose(factor, UnitTable.All.ToArray().Single(u => u.Spelling == spelling).Factor, 1e-14);
+    [Fact]
+    public void Factors_agree_with_independent_literals() =>
+        Assert.All(Literals, literal => AssertClose(literal.Factor, UnitTable.All.ToArray().Single(u => u.Spelling == literal.Spelling).Factor, 1e-14));
+
+    [Fact]
+    public void No_unit_goes_without_a_check_of_its_factor()
+    {
+        HashSet<string> known = [.. Counterparts.Select(c => c.Spelling), .. Literals.Select(l => l.Spelling)];
+        known.UnionWith(Enum.GetValues<Dimension>().Select(DimensionWords.SiUnit)); // checked to be 1 below
+        Assert.DoesNotContain(UnitTable.All.ToArray(), unit => !known.Contains(unit.Spelling));
+    }
 
     [Fact]
     public void Spellings_are_ascii_and_unique_in_their_dimension()
