@@ -57,12 +57,25 @@ internal static class ExitSolvers
             return (selector == Figure.M ? V / at.w : V / at.v) - target;
         }
 
-        double step = Math.Max(1e3, Math.Abs(c.h0) * 1e-3), low = c.h0 - step;
-        while (Excess(low) < 0) low = c.h0 - (step *= 2);
-        double above = Excess(low);
-        if (double.IsNaN(above)) throw Refusals.NoExit(Figures.Names(Figure.P | selector), "the figure is out of reach at this pressure");
+        double low = LowEnthalpy(Excess, c.h0), above = Excess(low);
+        if (!(above >= 0)) throw Refusals.NoExit(Figures.Names(Figure.P | selector), "the figure is out of reach at this pressure");
         double h = RootFinder.Find(Excess, low, c.h0, above, -target);
         return Check(c, c.Fluid.FromPH(p, h, default, out FluidState state), StatePair.PH, p, h, state);
+    }
+
+    // An enthalpy low enough that the figure is reached; where the formulation ends first, the search turns back towards its edge.
+    private static double LowEnthalpy(Func<double, double> excess, double h0)
+    {
+        double good = h0, step = Math.Max(1e3, Math.Abs(h0) * 1e-3);
+        for (int i = 0; i < 100; i++)
+        {
+            double low = good - step, value = excess(low);
+            if (value >= 0) return low;
+            if (double.IsNaN(value)) step /= 2;
+            else (good, step) = (low, step * 1.5);
+        }
+
+        return good;
     }
 
     private static ExpansionPath Isentrope(ExitContext c, double s) => new(c.Fluid, PathKind.Isentrope, s, c.h0, c.s1, c.p01);

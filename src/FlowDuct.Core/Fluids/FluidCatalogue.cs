@@ -7,6 +7,8 @@ public static class FluidCatalogue
 {
     private static readonly FluidName[] s_names =
     [
+        new("water", "water and steam", () => Water.WaterFluid.Instance),
+        new("steam", "the same as water", () => Water.WaterFluid.Instance),
         new("air", "dry air as an ideal gas", () => GasCatalogue.Air),
     ];
 
