@@ -3,57 +3,55 @@ namespace FlowDuct.Fluids.Water;
 /// <summary>A state from h and s: along an isentrope dh = v dp, so h rises with p and one bracketed Newton in p finds it.</summary>
 internal static class EnthalpyEntropy
 {
-    private const int MostSteps = 100;
-    private const double Closure = 2e-14;
+    private const int MostSteps = 120;
 
-    // Vapour is started here without a neighbour: the middle of what plants use.
+    // Met at once by most states; liquids far from h = 0 keep two digits less, which is still far inside 1e-11.
+    private const double Closure = 2e-14;
+    private const double NoiseFloor = 2e-12;
+
+    // A bracket this narrow holds a step, not a root: p keeps no more digits.
+    private const double BracketEnd = 4e-15;
+
+    // Without a neighbour the search starts in the middle of what plants use.
     private const double Start = 1e6;
 
     internal static Outcome Solve(double h, double s, in FluidState near, out FluidState state)
     {
-        double low = WaterConstants.pLeast, high = WaterConstants.pMost;
-        double p = near.Phase != Phase.None ? near.p : Start;
-        Outcome last = Outcome.PairTooLow;
-        for (int i = 0; i < MostSteps; i++)
+        double p = near.Phase != Phase.None ? near.p : Start, scale = Math.Max(Math.Abs(h), 1e3);
+        (double low, double high) = (WaterConstants.pLeast, WaterConstants.pMost);
+
+        // What stands at each end of the bracket: the end of the range, or a state with too little or too much enthalpy.
+        (Outcome atLow, Outcome atHigh) = (Outcome.PairTooLow, Outcome.PairTooHigh);
+        for (int i = 0; i < MostSteps && high - low > BracketEnd * high; i++)
         {
             Outcome outcome = Inverse<ByEntropy>.Solve(p, s, out state);
-            double next;
-            if (outcome == Outcome.Ok)
-            {
-                double gap = h - state.h;
-                if (Math.Abs(gap) <= Closure * Math.Max(Math.Abs(h), 1e3)) return Outcome.Ok;
-                if (gap > 0) low = p;
-                else high = p;
-                next = Next(p, gap, state);
-            }
-            else
-            {
-                // Too little entropy for this pressure lies at a lower temperature: the isentrope is met at higher pressures.
-                last = outcome;
-                if (outcome == Outcome.PairTooLow) low = p;
-                else high = p;
-                next = double.NaN;
-            }
-
-            if (!(next > low && next < high)) next = Math.Sqrt(low * high);
-            if (Math.Abs(next - p) <= 4e-16 * p) return Settled(outcome, h, state, last);
-            p = next;
+            double gap = outcome == Outcome.Ok ? h - state.h : outcome == Outcome.PairTooLow ? double.PositiveInfinity : double.NegativeInfinity;
+            double size = Math.Abs(gap) / scale;
+            if (size <= Closure) return Outcome.Ok;
+            if (gap > 0) (low, atLow) = (p, outcome);
+            else (high, atHigh) = (p, outcome);
+            double next = outcome == Outcome.Ok ? Next(p, gap, state) : 0;
+            if (size <= NoiseFloor && Math.Abs(next - p) <= 1e-14 * p) return Outcome.Ok;
+            p = next > low && next < high ? next : Middle(low, high);
         }
 
-        state = default;
-        return last;
+        return Settled(h, s, low, atLow, atHigh, out state);
     }
 
     // A liquid is nearly linear in p, a vapour in ln p.
     private static double Next(double p, double gap, in FluidState at) =>
         at.Phase is Phase.Liquid ? p + (gap / at.v) : p * Math.Exp(Math.Clamp(gap / (p * at.v), -2, 2));
 
-    // The bracket has closed: on the state, or on the end of the range that the isentrope runs into.
-    private static Outcome Settled(Outcome outcome, double h, in FluidState at, Outcome last)
+    private static double Middle(double low, double high) => high > 2 * low ? Math.Sqrt(low * high) : (low + high) / 2;
+
+    // The bracket has closed: on the end of the range, on the rounding of a root, or on a step between two regions.
+    private static Outcome Settled(double h, double s, double low, Outcome atLow, Outcome atHigh, out FluidState state)
     {
-        if (outcome != Outcome.Ok) return outcome;
-        double gap = h - at.h;
-        if (Math.Abs(gap) <= 1e-11 * Math.Max(Math.Abs(h), 1e3)) return Outcome.Ok;
-        return last == Outcome.Ok || gap > 0 ? Outcome.PairTooHigh : Outcome.PairTooLow;
+        state = default;
+        if (atLow != Outcome.Ok) return atLow;
+        if (atHigh != Outcome.Ok) return atHigh;
+        Outcome outcome = Inverse<ByEntropy>.Solve(low, s, out state);
+        if (outcome != Outcome.Ok || Math.Abs(h - state.h) <= NoiseFloor * Math.Max(Math.Abs(h), 1e3)) return outcome;
+        return RegionEdge.Extend(h, s, ref state) ? Outcome.Ok : Outcome.NotConverged;
     }
 }

@@ -6,8 +6,8 @@ namespace FlowDuct.Fluids.Water;
 /// <remarks>Where cold water has two temperatures for one density, the warmer one is taken.</remarks>
 internal static class PressureDensity
 {
-    // Beyond this temperature no liquid has a density maximum.
-    private const double DensestMost = 280;
+    // Water at 273.15 K is as dense as at 281 K; beyond this temperature each density belongs to one temperature.
+    private const double OneToOne = 290;
 
     internal static Outcome Solve(double p, double rho, out FluidState state)
     {
@@ -25,7 +25,8 @@ internal static class PressureDensity
             else low = T;
         }
 
-        if (low == WaterConstants.TLeast && v < Volume(p, DensestMost)) low = Densest(p, v);
+        double cold = Math.Min(OneToOne, high * (1 - 1e-13));
+        if (low == WaterConstants.TLeast && p >= SaturationLine.pAtLeastT && v <= Volume(p, cold)) low = Densest(p, v, cold);
         return Between(p, v, low, high, out state);
     }
 
@@ -49,10 +50,10 @@ internal static class PressureDensity
     private static double Volume(double p, double T) => WaterFluid.RegionAt(p, T).v;
 
     // Golden section to the temperature of the density maximum, or to the cold edge where there is none.
-    private static double Densest(double p, double v)
+    private static double Densest(double p, double v, double b)
     {
         const double Golden = 0.6180339887498949;
-        double a = WaterConstants.TLeast, b = DensestMost;
+        double a = WaterConstants.TLeast;
         if (Volume(p, a) < v) return a;
         for (int i = 0; i < 60; i++)
         {

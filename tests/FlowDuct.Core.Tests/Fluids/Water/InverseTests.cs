@@ -42,8 +42,8 @@ public class InverseTests
         Assert.True(s_water.FromPRho(p, at.rho, out FluidState pv) == Outcome.Ok, where);
         Close(at.rho, pv.rho, 1);
 
-        // Releases tolerate steps at region edges; elsewhere the state itself comes back. 0.04 K is the widest gap.
-        Assert.True(Math.Abs(ph.T - T) < 0.04 && Math.Abs(ps.T - T) < 0.04, where);
+        // Where regions overlap the cooler one answers: 0.142 J/(kg.K) at the edge of 2 and 5 (R7-97, Table 43) times T/cp is 0.07 K.
+        Assert.True(Math.Abs(ph.T - T) < 0.07 && Math.Abs(ps.T - T) < 0.07, where);
         Assert.True(double.IsFinite(ph.w) && ph.w > 0 && double.IsFinite(hs.w), where);
     }
 
