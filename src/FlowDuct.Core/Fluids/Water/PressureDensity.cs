@@ -27,7 +27,24 @@ internal static class PressureDensity
 
         double cold = Math.Min(OneToOne, high * (1 - 1e-13));
         if (low == WaterConstants.TLeast && p >= SaturationLine.pAtLeastT && v <= Volume(p, cold)) low = Densest(p, v, cold);
-        return Between(p, v, low, high, out state);
+        Outcome outcome = Between(p, v, low, high, out state);
+        bool dense = state.T > WaterConstants.T13 && state.T <= WaterConstants.TB23Most && p > Boundaries.pB23(state.T);
+        if (outcome == Outcome.Ok && dense) state = AtDensity(p, rho, state);
+        return outcome;
+    }
+
+    // Near the critical point the density hangs on the last bits of T; region 3 knows it exactly, so T is found beside it.
+    private static FluidState AtDensity(double p, double rho, in FluidState near)
+    {
+        double T = near.T;
+        for (int i = 0; i < 8; i++)
+        {
+            RegionState trial = Region3.State(rho, T, out _, out double pT);
+            T -= (trial.p - p) / pT;
+        }
+
+        RegionState at = Region3.State(rho, T);
+        return new FluidState(p, T, 1 / rho, at.h, at.s, at.cp, at.cv, at.w, 0, near.Phase, near.Notices);
     }
 
     private static Outcome Wet(in SaturatedPair pair, double v, out FluidState state)
