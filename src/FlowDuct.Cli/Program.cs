@@ -1,1 +1,5 @@
-return 0;
+using FlowDuct.Cli.CommandLine;
+
+using Stream stdout = Output.Standard(1);
+using Stream stderr = Output.Standard(2);
+return Application.Run(args, stdout, stderr, terminal: Console.IsOutputRedirected is false);

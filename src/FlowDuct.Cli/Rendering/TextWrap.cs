@@ -5,16 +5,16 @@ internal static class TextWrap
 {
     internal const int Width = 80;
 
-    /// <summary>Writes a first prefix and prose, continued under the prose.</summary>
-    internal static void Write(TextWriter to, string prefix, string prose, int indent)
+    /// <summary>Writes a first prefix and prose, continued under the prose; a broken line may end with a mark.</summary>
+    internal static void Write(TextWriter to, string prefix, string prose, int indent, string mark = "")
     {
         string line = prefix;
         bool empty = true;
         foreach (string word in prose.Split(' '))
         {
-            if (!empty && line.Length + 1 + word.Length > Width)
+            if (!empty && line.Length + 1 + word.Length + mark.Length > Width)
             {
-                to.WriteLine(line);
+                to.WriteLine(line + mark);
                 line = new string(' ', indent);
                 empty = true;
             }

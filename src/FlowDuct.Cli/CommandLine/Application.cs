@@ -1,0 +1,116 @@
+using FlowDuct.Cli.Rendering;
+using FlowDuct.Devices;
+using FlowDuct.Errors;
+using FlowDuct.Findings;
+
+namespace FlowDuct.Cli.CommandLine;
+
+/// <summary>The program without its process: arguments and streams in, exit status out.</summary>
+internal static class Application
+{
+    /// <summary>Answers one command line.</summary>
+    /// <param name="args">The arguments.</param>
+    /// <param name="stdout">Takes the answer, written once.</param>
+    /// <param name="stderr">Takes refusals.</param>
+    /// <param name="terminal">True where the answer is shown on a terminal.</param>
+    /// <returns>The documented exit status.</returns>
+    internal static int Run(string[] args, Stream stdout, Stream stderr, bool terminal)
+    {
+        try
+        {
+            using var memory = new MemoryStream(4096);
+            Arguments arguments = Arguments.Read(args);
+            int status = Answer(arguments, memory, terminal);
+            Deliver(arguments, memory, stdout);
+            return status;
+        }
+        catch (FlowDuctException refused)
+        {
+            Complain(stderr, refused.Refusal.ToString());
+            return ExitStatus.Of(refused.Refusal.Kind);
+        }
+#pragma warning disable CA1031 // The last line of defence: a defect is told in one line, never as a stack trace.
+        catch (Exception defect)
+        {
+            Complain(stderr, $"defect: {defect.GetType().Name}: {defect.Message}\n  please report the command line; the answer is missing, nothing was written");
+            return ExitStatus.Defect;
+        }
+#pragma warning restore CA1031
+    }
+
+    private static int Answer(Arguments arguments, MemoryStream memory, bool terminal)
+    {
+        if (arguments.WantsHelp) return Text(memory, to => HelpText.Write(to, arguments.Command));
+        if (arguments.WantsVersion) return Text(memory, to => to.WriteLine($"flowduct {ToolVersion.Version} {ToolVersion.Commit}".TrimEnd()));
+        return arguments.Command switch
+        {
+            CommandName.Fluids => Text(memory, Listings.Fluids),
+            CommandName.Units => Text(memory, to => Listings.Units(to, arguments.Words)),
+            CommandName.State => State(arguments, memory, terminal),
+            _ => Device(arguments, memory, terminal),
+        };
+    }
+
+    private static int State(Arguments arguments, MemoryStream memory, bool terminal)
+    {
+        var binder = new CaseBinder(arguments);
+        RenderOptions options = RenderBinder.Bind(arguments, binder, terminal);
+        StateAnswer answer = StateAnswer.Solve(binder.Fluid(), binder.At());
+        if (RenderBinder.WantsJson(binder)) StateJson.Write(memory, answer, options);
+        else Text(memory, to => StateText.Write(to, answer, options));
+        return ExitStatus.Passed;
+    }
+
+    private static int Device(Arguments arguments, MemoryStream memory, bool terminal)
+    {
+        var binder = new CaseBinder(arguments);
+        RenderOptions options = RenderBinder.Bind(arguments, binder, terminal);
+        bool json = RenderBinder.WantsJson(binder);
+        DeviceAnswer answer = DeviceSolver.Solve(binder.Device(arguments.Command == CommandName.Nozzle ? DeviceKind.Nozzle : DeviceKind.Diffuser));
+        if (json) JsonAnswer.Write(memory, answer, options);
+        else Text(memory, to => TextAnswer.Write(to, answer, options));
+        bool cautioned = options.Strict && answer.Findings.Any(finding => finding.Severity == Severity.Caution);
+        return answer.Passed && !cautioned ? ExitStatus.Passed : ExitStatus.Failed;
+    }
+
+    private static int Text(MemoryStream memory, Action<TextWriter> write)
+    {
+        using StreamWriter to = Output.WriterOn(memory);
+        write(to);
+        return ExitStatus.Passed;
+    }
+
+    private static void Deliver(Arguments arguments, MemoryStream memory, Stream stdout)
+    {
+        ReadOnlySpan<byte> bytes = memory.GetBuffer().AsSpan(0, (int)memory.Length);
+        string? file = arguments.Value("--output");
+        try
+        {
+            if (file is null) Output.WriteAll(stdout, bytes);
+            else Output.WriteFile(file, bytes);
+        }
+        catch (Exception failure) when (failure is IOException or UnauthorizedAccessException or NotSupportedException or ArgumentException)
+        {
+            string place = file is null ? "standard output" : "--output " + file;
+            throw new FlowDuctException(new Refusal(RefusalKind.NotWritten, place, $"could not be written: {failure.Message}", "free some space or name another file"));
+        }
+    }
+
+    private static void Complain(Stream stderr, string text)
+    {
+        using var memory = new MemoryStream();
+        using (StreamWriter to = Output.WriterOn(memory))
+        {
+            foreach (string line in ("flowduct: " + text).Split('\n')) to.WriteLine(Quantities.Echo.Ascii(line));
+        }
+
+        try
+        {
+            Output.WriteAll(stderr, memory.GetBuffer().AsSpan(0, (int)memory.Length));
+        }
+        catch (IOException)
+        {
+            // Nobody listens: the exit status still says it.
+        }
+    }
+}

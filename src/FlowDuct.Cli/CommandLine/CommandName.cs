@@ -1,0 +1,33 @@
+namespace FlowDuct.Cli.CommandLine;
+
+/// <summary>The commands, as flags so that an option can belong to several.</summary>
+[Flags]
+internal enum CommandName
+{
+    /// <summary>No command: the root.</summary>
+    None = 0,
+
+    /// <summary>One state of a fluid.</summary>
+    State = 1,
+
+    /// <summary>A duct that speeds the flow up.</summary>
+    Nozzle = 2,
+
+    /// <summary>A duct that slows the flow down.</summary>
+    Diffuser = 4,
+
+    /// <summary>The list of fluids.</summary>
+    Fluids = 8,
+
+    /// <summary>The list of units.</summary>
+    Units = 16,
+
+    /// <summary>Both devices.</summary>
+    Devices = Nozzle | Diffuser,
+
+    /// <summary>All that answer with numbers.</summary>
+    Answering = State | Devices,
+
+    /// <summary>All commands.</summary>
+    All = Answering | Fluids | Units,
+}

@@ -1,0 +1,24 @@
+namespace FlowDuct.Cli.CommandLine;
+
+/// <summary>One command: name, purpose, and the example that its help begins with.</summary>
+internal sealed record CommandRow(CommandName Name, string Word, string Purpose, string Example);
+
+/// <summary>Every command, in the order of help.</summary>
+internal static class CommandTable
+{
+    internal static readonly CommandRow[] All =
+    [
+        new(CommandName.State, "state", "All properties of a fluid at one state, from two that are known.",
+            "flowduct state --fluid water --at \"p=7 bar, superheat=20 K\""),
+        new(CommandName.Nozzle, "nozzle", "Exit state, velocity, efficiency and choking of a nozzle, and whether its figures obey mass, energy and entropy.",
+            "flowduct nozzle --fluid steam --inlet \"p=9 bar, T=230 degC, V=25 m/s\" --exit \"p=3.2 bar\" --efficiency 96%"),
+        new(CommandName.Diffuser, "diffuser", "Exit state, recovery, efficiency and loss of a diffuser, and whether its figures obey mass, energy and entropy.",
+            "flowduct diffuser --fluid air --inlet \"p=14.2 psi, T=70 degF, V=540 ft/s\" --exit \"V=120 ft/s\" --recovery 0.72"),
+        new(CommandName.Fluids, "fluids", "The fluids with their formulations and ranges.", "flowduct fluids"),
+        new(CommandName.Units, "units", "The units by quantity, with their SI size and source; a word picks a quantity.", "flowduct units pressure"),
+    ];
+
+    internal static CommandRow Of(CommandName name) => Array.Find(All, row => row.Name == name)!;
+
+    internal static string WordOf(CommandName name) => name == CommandName.None ? string.Empty : Of(name).Word;
+}

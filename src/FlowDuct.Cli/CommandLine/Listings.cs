@@ -1,0 +1,46 @@
+using System.Globalization;
+using FlowDuct.Cli.Rendering;
+using FlowDuct.Fluids;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Cli.CommandLine;
+
+/// <summary>The lists of fluids and units.</summary>
+internal static class Listings
+{
+    internal static void Fluids(TextWriter to)
+    {
+        foreach (FluidName row in FluidCatalogue.Names)
+        {
+            Fluid fluid = row.Fluid();
+            to.WriteLine(row.Name);
+            TextWrap.Write(to, "  what        ", row.Description, 14);
+            TextWrap.Write(to, "  properties  ", fluid.Formulation, 14);
+            TextWrap.Write(to, "  range       ", fluid.RangeText, 14);
+        }
+    }
+
+    internal static void Units(TextWriter to, IReadOnlyList<string> words)
+    {
+        Dimension[] all = [.. Enum.GetValues<Dimension>().Where(dimension => UnitTable.RowsOf(dimension) == dimension)];
+        Dimension[] chosen = words.Count == 0 ? all : [.. all.Where(dimension => DimensionWords.Of(dimension).Contains(string.Join(' ', words), StringComparison.Ordinal))];
+        if (chosen.Length == 0)
+        {
+            throw Usage.Refuse("units", $"{Echo.Ascii(string.Join(' ', words))} is no kind of quantity", $"write one of {string.Join(", ", all.Select(DimensionWords.Of))}");
+        }
+
+        foreach (Dimension dimension in chosen) Kind(to, dimension);
+    }
+
+    private static void Kind(TextWriter to, Dimension dimension)
+    {
+        to.WriteLine($"{DimensionWords.Of(dimension)}, SI {DimensionWords.SiUnit(dimension)}");
+        foreach (Unit unit in UnitTable.All)
+        {
+            if (unit.Dimension != dimension) continue;
+            string factor = unit.Factor.ToString("R", CultureInfo.InvariantCulture);
+            string offset = unit.Offset == 0 ? string.Empty : $" after adding {unit.Offset.ToString("R", CultureInfo.InvariantCulture)}";
+            TextWrap.Write(to, $"  {unit.Spelling,-14}", $" {factor}{offset} ({unit.Source})", 17);
+        }
+    }
+}

@@ -1,0 +1,48 @@
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Cli.CommandLine;
+
+/// <summary>Every option of every command, in the order of help.</summary>
+internal static class OptionTable
+{
+    internal static readonly OptionRow[] All =
+    [
+        new("--fluid", "NAME", "Fluid by name; flowduct fluids lists them.", "steam", CommandName.Answering, IsRequired: true),
+        new("--at", "LIST", "Two independent properties, each with its unit.", "\"p=7 bar, superheat=20 K\"", CommandName.State, IsRequired: true),
+        new("--inlet", "LIST", "State and velocity at the inlet.", "\"p=9 bar, T=230 degC, V=25 m/s\"", CommandName.Devices, IsRequired: true),
+        new("--exit", "LIST", "What is known of the exit plane.", "\"p=3.2 bar\"", CommandName.Devices),
+        new("--ambient", "LIST", "Pressure and temperature of the surroundings; 1 atm, 15 degC if not given.", "\"p=0.98 bar\"", CommandName.Answering),
+        Of(CaseOption.Flow, "FLOW", CommandName.Devices),
+        Of(CaseOption.Efficiency, "RATIO", CommandName.Devices),
+        Of(CaseOption.VelocityCoefficient, "RATIO", CommandName.Nozzle),
+        Of(CaseOption.Recovery, "RATIO", CommandName.Diffuser),
+        new("--recovery-basis", "HEAD", "Head of the recovery: stagnation (p0,1 - p1, the default) or dynamic (rho V^2/2).", "dynamic", CommandName.Diffuser),
+        Of(CaseOption.LossCoefficient, "RATIO", CommandName.Devices),
+        Of(CaseOption.Heat, "HEAT", CommandName.Devices),
+        Of(CaseOption.HeatLoss, "HEAT", CommandName.Devices),
+        Of(CaseOption.BoundaryTemperature, "TEMP", CommandName.Devices),
+        Of(CaseOption.Gravity, "ACCEL", CommandName.Devices),
+        new("--shape", "SHAPE", "convergent or convergent-divergent; decided by the figures if not given.", "convergent", CommandName.Nozzle),
+        new("--branch", "BRANCH", "subsonic or supersonic, where two exits have the same figures.", "subsonic", CommandName.Devices),
+        new("--format", "FORMAT", "text (the default) or json (coherent SI whatever the units).", "json", CommandName.Answering, OfTheCase: false),
+        new("--output", "FILE", "Write to a file, whole or not at all.", "answer.txt", CommandName.Answering, OfTheCase: false),
+        new("--units", "SYSTEM", "metric (the default) or us.", "us", CommandName.Answering, OfTheCase: false),
+        new("--show-in", "LIST", "Units of your own for some quantities.", "\"T=degF, p=inH2O(g)\"", CommandName.Answering, OfTheCase: false),
+        new("--digits", "N", "Significant digits, 1 to 15.", "7", CommandName.Answering, OfTheCase: false),
+        new("--quiet", "", "Leave notes and assumptions out.", "", CommandName.Answering, OfTheCase: false),
+        new("--strict", "", "A caution fails the answer: exit status 1.", "", CommandName.Devices, OfTheCase: false),
+        new("--color", "WHEN", "auto (the default), always or never; NO_COLOR is honoured.", "never", CommandName.Answering, OfTheCase: false),
+        new("--help", "", "This help; also -h.", "", CommandName.All, OfTheCase: false),
+    ];
+
+    /// <summary>The options of a command, in the order of help.</summary>
+    internal static IEnumerable<OptionRow> Of(CommandName command) => All.Where(row => (row.Commands & command) != 0);
+
+    /// <summary>The value placeholder and help of a numeric option stand in the catalogue of quantities.</summary>
+    private static OptionRow Of(CaseOption option, string value, CommandName commands)
+    {
+        QuantityRow row = QuantityCatalogue.Of(option);
+        string example = row.Example.Contains(' ', StringComparison.Ordinal) ? $"\"{row.Example}\"" : row.Example;
+        return new OptionRow("--" + row.Word, value, row.Help, example, commands);
+    }
+}

@@ -1,0 +1,53 @@
+using System.Text;
+
+namespace FlowDuct.Cli.CommandLine;
+
+/// <summary>Writes finished bytes: to a stream at once, or to a file whole or not at all.</summary>
+internal static class Output
+{
+    // EPIPE; Windows says ERROR_NO_DATA or ERROR_BROKEN_PIPE.
+    private const int BrokenPipe = 32;
+    private const int WindowsNoData = unchecked((int)0x800700E8);
+    private const int WindowsBrokenPipe = unchecked((int)0x8007006D);
+
+    /// <summary>The standard stream of a file descriptor, unbuffered.</summary>
+    internal static Stream Standard(int descriptor)
+    {
+        if (!OperatingSystem.IsWindows()) return new DescriptorStream(descriptor);
+        return descriptor == 1 ? Console.OpenStandardOutput() : Console.OpenStandardError();
+    }
+
+    /// <summary>A writer into memory with the line ends of this program.</summary>
+    internal static StreamWriter WriterOn(Stream memory) => new(memory, new UTF8Encoding(false), leaveOpen: true) { NewLine = "\n" };
+
+    /// <summary>Writes all bytes; false where the other end of a pipe has gone, which is no failure.</summary>
+    internal static bool WriteAll(Stream to, ReadOnlySpan<byte> bytes)
+    {
+        try
+        {
+            to.Write(bytes);
+            to.Flush();
+            return true;
+        }
+        catch (IOException failure) when (failure.HResult is BrokenPipe or WindowsNoData or WindowsBrokenPipe)
+        {
+            return false;
+        }
+    }
+
+    /// <summary>Writes beside the file and renames: a reader never sees half of it.</summary>
+    internal static void WriteFile(string path, ReadOnlySpan<byte> bytes)
+    {
+        string part = path + ".part";
+        try
+        {
+            File.WriteAllBytes(part, bytes);
+            File.Move(part, path, overwrite: true);
+        }
+        catch
+        {
+            File.Delete(part);
+            throw;
+        }
+    }
+}

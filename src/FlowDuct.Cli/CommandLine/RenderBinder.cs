@@ -1,0 +1,57 @@
+using FlowDuct.Cli.Rendering;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Cli.CommandLine;
+
+/// <summary>Turns output options into <see cref="RenderOptions"/>.</summary>
+internal static class RenderBinder
+{
+    private const int MostDigits = 15;
+
+    internal static RenderOptions Bind(Arguments arguments, CaseBinder binder, bool terminal)
+    {
+        UnitSystem system = binder.Choice("--units", UnitSystem.Metric, ("metric", UnitSystem.Metric), ("us", UnitSystem.Us));
+        return new RenderOptions(
+            new DisplayText(system, binder.AmbientPressure, ShowIn(arguments)),
+            Digits(arguments),
+            Colour(binder, terminal),
+            arguments.Has("--quiet"),
+            arguments.Has("--strict"));
+    }
+
+    /// <summary>True for JSON, false for text.</summary>
+    internal static bool WantsJson(CaseBinder binder) => binder.Choice("--format", false, ("text", false), ("json", true));
+
+    private static bool Colour(CaseBinder binder, bool terminal)
+    {
+        bool? chosen = binder.Choice<bool?>("--color", null, ("auto", null), ("always", true), ("never", false));
+        bool forbidden = !string.IsNullOrEmpty(Environment.GetEnvironmentVariable("NO_COLOR"));
+        return chosen ?? (terminal && !forbidden);
+    }
+
+    private static int? Digits(Arguments arguments)
+    {
+        if (arguments.Value("--digits") is not string text) return null;
+        bool read = NumberParser.TryParse(text, out PrintedNumber number, out _);
+        bool whole = read && number.Value == Math.Floor(number.Value) && number.Value is >= 1 and <= MostDigits;
+        return whole ? (int)number.Value : throw Usage.Refuse("--digits", $"{Echo.Ascii(text)} is not a whole number from 1 to {MostDigits}", "write for example --digits 7");
+    }
+
+    // "T=degF, p=inH2O(g)": a symbol and a unit of its dimension.
+    private static Dictionary<Dimension, UnitReading>? ShowIn(Arguments arguments)
+    {
+        if (arguments.Value("--show-in") is not string list) return null;
+        Dictionary<Dimension, UnitReading> units = [];
+        foreach (string piece in list.Split(',', StringSplitOptions.TrimEntries))
+        {
+            string[] sides = piece.Split('=', StringSplitOptions.TrimEntries);
+            if (sides.Length != 2 || !(QuantityCatalogue.TryFindStationQuantity(sides[0], out QuantityRow? row) || QuantityCatalogue.TryFindPerformance(sides[0], out row)))
+                throw Usage.Refuse("--show-in", $"{Echo.Ascii(piece)} is not symbol=unit", "write for example --show-in \"T=degF, p=inH2O(g)\"");
+            if (!UnitTable.TryFind(sides[1], row.Dimension, out UnitReading unit))
+                throw Usage.Refuse("--show-in", UnitTable.Suggest(sides[1], row.Dimension), string.Empty);
+            units[row.Dimension] = unit;
+        }
+
+        return units;
+    }
+}

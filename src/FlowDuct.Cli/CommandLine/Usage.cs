@@ -1,0 +1,53 @@
+using FlowDuct.Errors;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Cli.CommandLine;
+
+/// <summary>Refusals of the command line itself; each ends with status 2.</summary>
+internal static class Usage
+{
+    internal static FlowDuctException Refuse(string place, string reason, string next) =>
+        new(new Refusal(RefusalKind.NotUnderstood, place, reason, next));
+
+    internal static FlowDuctException UnknownCommand(string word) => Refuse(
+        string.Empty,
+        $"{Echo.Ascii(word)} is not a command",
+        Nearest(word, CommandTable.All.Select(row => row.Word)) is string near ? $"did you mean {near}?" : "write one of state, nozzle, diffuser, fluids, units");
+
+    internal static FlowDuctException UnknownOption(string word, CommandName command)
+    {
+        string name = word.Split('=')[0];
+        string shown = Echo.Ascii(name);
+        if (!word.StartsWith('-')) return Refuse(string.Empty, $"{Echo.Ascii(word)} belongs to no option", "quote lists that hold spaces: --inlet \"p=9 bar, T=230 degC\"");
+        OptionRow? elsewhere = Array.Find(OptionTable.All, row => row.Name == name);
+        string reason = elsewhere is null ? $"{shown} is not an option" : $"{shown} is not an option of {CommandTable.WordOf(command)}";
+        string next = elsewhere is null && Nearest(name, OptionTable.Of(command).Select(row => row.Name)) is string near
+            ? $"did you mean {near}?"
+            : $"flowduct {CommandTable.WordOf(command)} --help lists the options";
+        return Refuse(string.Empty, reason, next);
+    }
+
+    internal static FlowDuctException NoValue(OptionRow row) => Refuse(row.Name, "has no value", $"write for example {row.Name} {row.Example}");
+
+    internal static FlowDuctException Twice(OptionRow row) => Refuse(row.Name, "is given twice", "keep one of them");
+
+    internal static FlowDuctException Missing(OptionRow row) => Refuse(row.Name, "is missing", $"write for example {row.Name} {row.Example}");
+
+    internal static FlowDuctException NotOneOf(string name, string value, string choices) =>
+        Refuse(name, $"{Echo.Ascii(value)} is not one of {choices}", string.Empty);
+
+    /// <summary>The word at the least distance, if it is near enough to be a slip.</summary>
+    internal static string? Nearest(string word, IEnumerable<string> words)
+    {
+        string? best = null;
+        int least = Math.Max(1, word.Length / 3) + 1;
+        foreach (string candidate in words)
+        {
+            int distance = Slips.Distance(word, candidate);
+            if (candidate.StartsWith(word, StringComparison.Ordinal) && word.Length > 3) distance = 1;
+            if (distance < least) (least, best) = (distance, candidate);
+        }
+
+        return best;
+    }
+}
