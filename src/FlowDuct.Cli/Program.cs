@@ -2,4 +2,4 @@ using FlowDuct.Cli.CommandLine;
 
 using Stream stdout = Output.Standard(1);
 using Stream stderr = Output.Standard(2);
-return Application.Run(args, stdout, stderr, terminal: Console.IsOutputRedirected is false);
+return Application.Run(args, stdout, stderr, Output.IsTerminal());

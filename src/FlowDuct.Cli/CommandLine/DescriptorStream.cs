@@ -24,6 +24,9 @@ internal sealed partial class DescriptorStream(int descriptor) : Stream
         set => throw new NotSupportedException();
     }
 
+    /// <summary>True where a descriptor leads to a terminal; asking the console class instead costs start-up time.</summary>
+    internal static bool IsTerminal(int descriptor) => IsATerminal(descriptor) == 1;
+
     public override void Write(ReadOnlySpan<byte> buffer)
     {
         while (buffer.Length > 0)
@@ -47,6 +50,10 @@ internal sealed partial class DescriptorStream(int descriptor) : Stream
     public override long Seek(long offset, SeekOrigin origin) => throw new NotSupportedException();
 
     public override void SetLength(long value) => throw new NotSupportedException();
+
+    [LibraryImport("libc", EntryPoint = "isatty")]
+    [DefaultDllImportSearchPaths(DllImportSearchPath.SafeDirectories)]
+    private static partial int IsATerminal(int descriptor);
 
     [LibraryImport("libc", EntryPoint = "write", SetLastError = true)]
     [DefaultDllImportSearchPaths(DllImportSearchPath.SafeDirectories)]

@@ -17,6 +17,9 @@ internal static class Output
         return descriptor == 1 ? Console.OpenStandardOutput() : Console.OpenStandardError();
     }
 
+    /// <summary>True where the answer is shown on a terminal.</summary>
+    internal static bool IsTerminal() => OperatingSystem.IsWindows() ? !Console.IsOutputRedirected : DescriptorStream.IsTerminal(1);
+
     /// <summary>A writer into memory with the line ends of this program.</summary>
     internal static StreamWriter WriterOn(Stream memory) => new(memory, new UTF8Encoding(false), leaveOpen: true) { NewLine = "\n" };
 

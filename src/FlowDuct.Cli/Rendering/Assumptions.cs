@@ -6,16 +6,16 @@ namespace FlowDuct.Cli.Rendering;
 /// <summary>What was assumed, in words.</summary>
 internal static class Assumptions
 {
-    internal static IEnumerable<string> Of(DeviceAnswer answer)
+    internal static IEnumerable<string> Of(DeviceAnswer answer, IQuantityText text)
     {
         yield return $"properties: {answer.Fluid.Formulation}";
         yield return answer.Case.Heat == 0 ? "steady, one-dimensional, adiabatic, no work" : "steady, one-dimensional, no work";
         if (answer.Fluid.HasSaturation && answer.Exit.State.Phase == Fluids.Phase.Wet) yield return "wet states: one homogeneous mixture at equilibrium";
         foreach (string line in answer.Assumptions) yield return line;
         if (answer.Performance.Thrust is not null && answer.Exit.Mach >= 1) yield return "thrust: against the ambient pressure";
-        if (!answer.Case.AmbientGiven) yield return AmbientWords(answer.Case);
+        if (!answer.Case.AmbientGiven) yield return AmbientWords(answer.Case, text);
     }
 
-    private static string AmbientWords(DeviceCase c) =>
-        $"ambient: {DisplayText.Metric.Text(c.AmbientPressure, Dimension.Pressure, 6)}, {DisplayText.Metric.Text(c.AmbientTemperature, Dimension.Temperature, 4)} (default)";
+    private static string AmbientWords(DeviceCase c, IQuantityText text) =>
+        $"ambient: {text.Text(c.AmbientPressure, Dimension.Pressure, 6)}, {text.Text(c.AmbientTemperature, Dimension.Temperature, 4)} (default)";
 }

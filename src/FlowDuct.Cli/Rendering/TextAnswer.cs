@@ -62,6 +62,8 @@ internal static class TextAnswer
     {
         "isentropic_efficiency" when answer.EfficiencyImplied => "   implied by the figures",
         "isentropic_efficiency" when answer.TakenIdeal => "   assumed",
+        "isentropic_efficiency" when answer.Case.Has(CaseOption.Efficiency) => "   given",
+        "recovery" when answer.Case.Has(CaseOption.Recovery) => "   given",
         _ => string.Empty,
     };
 
@@ -119,6 +121,6 @@ internal static class TextAnswer
         if (options.Quiet) return;
         to.WriteLine();
         to.WriteLine("assumed");
-        foreach (string line in Assumptions.Of(answer)) TextWrap.Write(to, "  - ", line, 4);
+        foreach (string line in Assumptions.Of(answer, options.Units)) TextWrap.Write(to, "  - ", line, 4);
     }
 }

@@ -44,7 +44,8 @@ internal sealed class PathSearch(ExpansionPath path, Figure figure, double targe
     {
         if (_samples.Count == 0) return "no point of the path lies inside the formulation";
         double least = _samples.Min(at => at.f) + target, most = _samples.Max(at => at.f) + target;
-        return $"on this path it lies between {text.Text(least, DimensionOf)} and {text.Text(most, DimensionOf)}";
+        string range = $"on this path it lies between {text.Text(least, DimensionOf)} and {text.Text(most, DimensionOf)}";
+        return target > least && target < most ? range + ", and steps over this value where the flow meets saturation" : range;
     }
 
     private double Scale => figure is Figure.X or Figure.M ? 1 : figure == Figure.Superheat ? 1e3 : Math.Max(Math.Abs(target), 1e-3);

@@ -12,6 +12,6 @@ internal static class Choked
         if (a.Performance is not { Choked: true, CriticalPressureRatio: double ratio }) return null;
         double critical = ratio * a.Inlet.Stagnation!.Value.p;
         return new Finding("choked", Severity.Note, a.Exit.State.p, critical, "greatest mass flux on the isentrope", text =>
-            $"choked: the exit pressure is at or below the critical pressure {text.Text(critical, Dimension.Pressure)}; lowering it passes no more flow");
+            $"the exit pressure is at or below the critical pressure {text.Text(critical, Dimension.Pressure)}; lowering it passes no more flow");
     }
 }

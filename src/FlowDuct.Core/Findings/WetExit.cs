@@ -12,6 +12,6 @@ internal static class WetExit
         if (a.Inlet.State.Phase is Phase.Liquid or Phase.SaturatedLiquid || a.Exit.State.Phase != Phase.Wet) return null;
         double moisture = 1 - a.Exit.State.x;
         return new Finding("wet-exit", Severity.Caution, moisture, 0, "IAPWS R7-97(2012), equilibrium", text =>
-            $"the exit is wet: moisture {text.Text(moisture, Dimension.Ratio, 3)} at equilibrium; fast expansions condense later than that");
+            $"moisture {text.Text(moisture, Dimension.Ratio, 3)} in the exit at equilibrium; a fast expansion condenses later than that");
     }
 }

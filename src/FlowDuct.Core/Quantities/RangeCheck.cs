@@ -15,11 +15,11 @@ internal static class RangeCheck
     public static void Require(in ValueContext context, in GivenValue given, double ambientPressure)
     {
         if (!double.IsFinite(given.Si))
-            throw context.Refuse($"{context.Named(given.Text)} is too large", string.Empty);
+            throw context.Refuse($"{context.Named(given.Text)} is too large");
         if (!context.Row.Limits.Contains(given.Si))
             throw Outside(context, given, ambientPressure);
         if (context.Row.Dimension == Dimension.Count && given.Si != Math.Floor(given.Si))
-            throw context.Refuse($"{context.Named(given.Text)} is not a whole number", string.Empty);
+            throw context.Refuse($"{context.Named(given.Text)} is not a whole number");
     }
 
     private static FlowDuctException Outside(in ValueContext context, in GivenValue given, double ambientPressure)
@@ -27,7 +27,7 @@ internal static class RangeCheck
         QuantityLimits limits = context.Row.Limits;
         string named = context.Named(given.Text);
         if (context.Row.Dimension == Dimension.Pressure)
-            return context.Refuse(VacuumReason(named, given, ambientPressure), string.Empty);
+            return context.Refuse(VacuumReason(named, given, ambientPressure));
         string least = double.IsFinite(limits.Least) ? Limit(limits.Least, given, ambientPressure) : string.Empty;
         string reason = (context.Row.Dimension, double.IsFinite(limits.Least), double.IsFinite(limits.Greatest)) switch
         {
@@ -36,7 +36,7 @@ internal static class RangeCheck
             (_, true, false) => limits.IncludesLeast ? $"{named} is below {least}" : $"{named} is not above {least}",
             _ => $"{named} is above {Limit(limits.Greatest, given, ambientPressure)}",
         };
-        return context.Refuse(reason, string.Empty);
+        return context.Refuse(reason);
     }
 
     private static string VacuumReason(string named, in GivenValue given, double ambientPressure)

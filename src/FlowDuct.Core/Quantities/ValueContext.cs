@@ -22,6 +22,9 @@ internal readonly record struct ValueContext(string Place, QuantityRow Row, stri
         return Prefix + value;
     }
 
+    /// <summary>A refusal at this place whose way out is the example of the quantity.</summary>
+    public FlowDuctException Refuse(string reason) => Refuse(reason, $"write for example {Example()}");
+
     /// <summary>A refusal at this place.</summary>
     public FlowDuctException Refuse(string reason, string nextStep) => new(new Refusal(RefusalKind.NotUnderstood, Place, reason, nextStep));
 
@@ -33,7 +36,8 @@ internal readonly record struct ValueContext(string Place, QuantityRow Row, stri
         ReadOnlySpan<char> chunk = NumberChunk(text);
         if (Row.Dimension == Dimension.Ratio && chunk.Contains(':'))
             return Refuse($"{Shown(text)} is a ratio of two numbers", ColonHint(chunk));
-        return Refuse(Prefix + NumberProblem.Describe(chunk), string.Empty);
+        string problem = NumberProblem.Describe(chunk);
+        return problem.Contains("write", StringComparison.Ordinal) ? Refuse(Prefix + problem, string.Empty) : Refuse(Prefix + problem);
     }
 
     /// <summary>Refuses a number without the unit it needs.</summary>

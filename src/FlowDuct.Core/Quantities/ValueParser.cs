@@ -49,7 +49,7 @@ internal static class ValueParser
         if (length == 0 || restIsNumber || IsHexadecimal(text, length))
             throw context.NotANumber(text);
         if (!NumberParser.TryParse(text.AsSpan(0, length), out PrintedNumber number, out string problem))
-            throw context.Refuse(problem, string.Empty);
+            throw context.Refuse(problem);
         return number;
     }
 

@@ -1,0 +1,66 @@
+using Xunit;
+
+namespace FlowDuct.Cli.Tests;
+
+/// <summary>Wrong inputs: exit status, nothing on stdout, and the approved message, which names the place and the way out.</summary>
+public class RefusalTests
+{
+    private const string Steam = "flowduct nozzle --fluid steam --inlet ";
+
+    [Theory]
+    [InlineData(2, Steam + "\"p=9 bar, T=200\" --exit \"p=3 bar\"", "--inlet: T=200 has no unit; write for example T=200 degC")]
+    [InlineData(2, Steam + "\"p=9 bar, T=230,5 degC\" --exit \"p=3 bar\"", "--inlet: T=230,5 degC has a decimal comma\n  write T=230.5 degC")]
+    [InlineData(2, Steam + "\"p=NaN bar, T=230 degC\" --exit \"p=3 bar\"", "--inlet: p=NaN is not a finite number\n  write for example p=9 bar")]
+    [InlineData(2, Steam + "\"p=1e400 bar, T=230 degC\" --exit \"p=3 bar\"", "--inlet: 1e400 is too large; the greatest number is 1.79e308\n  write for example p=9 bar")]
+    [InlineData(2, Steam + "\"p=9 barr, T=230 degC\" --exit \"p=3 bar\"", "--inlet: p=9 barr: barr is not a unit here; did you mean bar or bara or barg?")]
+    [InlineData(2, Steam + "\"p=9 mpa, T=230 degC\" --exit \"p=3 bar\"", "--inlet: p=9 mpa: mpa is not a unit here; did you mean MPa?")]
+    [InlineData(2, Steam + "\"p=9 bar, T=230 degC\" --exti \"p=3 bar\"", "--exti is not an option\n  did you mean --exit?")]
+    [InlineData(2, Steam + "\"p=9 bar, T=230 degC, h=2900 kJ/kg\" --exit \"p=3 bar\"", "--inlet: p, T, h are more than fixes the state\n  leave out h: p, T is enough")]
+    [InlineData(2, Steam + "\"p=9 bar, x=0.9, moisture=2%\" --exit \"p=3 bar\"", "--inlet: x is given more than once, under two names\n  keep one of them")]
+    [InlineData(2, Steam + "\"p=9 bar\" --exit \"p=3 bar\"", "--inlet: p alone does not fix the state\n  add one of T, h, s, u, rho, x, superheat, p0, T0, h0")]
+    [InlineData(3, Steam + "\"p=9 bar, T=2400 degC\" --exit \"p=3 bar\"", "--inlet: T=2400 degC is above the limit 2000 degC of IAPWS R7-97(2012)\n  valid range: 0 to 800 degC up to 1000 bar; 800 to 2000 degC up to 500 bar")]
+    [InlineData(3, "flowduct state --fluid water --at \"p=620 bar, T=900 degC\"", "--at: p=620 bar is above the limit 500 bar of IAPWS R7-97(2012) above 1073.15 K (region 5)\n  valid range: 0 to 800 degC up to 1000 bar; 800 to 2000 degC up to 500 bar")]
+    [InlineData(2, Steam + "\"p=-2 bar, T=230 degC\" --exit \"p=3 bar\"", "--inlet: p=-2 bar is not above 0: a bare unit is absolute; for gauge write bar(g)\n  write for example p=9 bar")]
+    [InlineData(2, Steam + "\"p=9 bar, T=230 degC\"", "--exit: nothing says where the flow leaves\n  give one of p, dp, p/p0, V, T, h, x; for example --exit \"p=3.2 bar\"")]
+    [InlineData(2, Steam + "\"p=9 bar, T=230 degC\" --exit \"p=3 bar\" --heat --efficiency 0.9", "--heat: has no value\n  write for example --heat \"12 kJ/kg\"")]
+    [InlineData(2, Steam + "\"p=9 bar, T=230 degC\" --exit", "--exit: has no value\n  write for example --exit \"p=3.2 bar\"")]
+    [InlineData(2, Steam + "\"p=9 bar, T=230 degC\" --exit \"p=3 bar\" --exit \"p=2 bar\"", "--exit: is given twice\n  keep one of them")]
+    [InlineData(2, Steam + "\"p=9 bar, T=230 degC\" --exit \"p=3 bar\" --recovery 0.5", "--recovery is not an option of nozzle\n  flowduct nozzle --help lists the options")]
+    [InlineData(2, Steam + "@plant --exit \"p=3 bar\"", "--inlet: @plant has no equals sign\n  write symbol=value, for example p=9 bar")]
+    [InlineData(2, "flowduct [diagram] nozzle", "[diagram] is not a command\n  write one of state, nozzle, diffuser, fluids, units")]
+    [InlineData(2, Steam + "p=9 bar --exit \"p=3 bar\"", "bar belongs to no option\n  quote lists that hold spaces: --inlet \"p=9 bar, T=230 degC\"")]
+    [InlineData(2, "flowduct nozzel --fluid steam", "nozzel is not a command\n  did you mean nozzle?")]
+    [InlineData(2, "flowduct nozzle --inlet \"p=9 bar, T=230 degC\"", "--fluid: is missing\n  write for example --fluid steam")]
+    [InlineData(2, "flowduct nozzle --fluid steem --inlet \"p=9 bar, T=230 degC\" --exit \"p=3 bar\"", "--fluid: steem is not a fluid of this version\n  did you mean steam?")]
+    [InlineData(2, Steam + "\"p=9 bar, T=230 degC\" --exit \"p=3 bar\" --efficiency 130%", "--efficiency: efficiency 130% is outside 0 to 100 %\n  write for example 96%")]
+    [InlineData(2, Steam + "\"p=9 bar, T=230 degC\" --exit \"p=3 bar, T=150 degC, x=0.9\"", "--exit: p, T, x are more than fixes the exit\n  an exit takes one figure with one of efficiency, velocity coefficient, recovery or loss coefficient, or two measured figures")]
+    [InlineData(3, Steam + "\"p=9 bar, T=230 degC\" --exit \"p=12 bar\"", "--exit: p=12 bar is not below the stagnation pressure at the inlet, 9 bar: nothing drives the flow\n  give an exit pressure below it")]
+    [InlineData(3, Steam + "\"p=9 bar, T=175.3 degC\" --exit \"p=3 bar\"", "--inlet: p=9 bar and T=175.3 degC lie on the saturation line (175.358 degC): one figure, not two\n  give x, h or superheat instead of T")]
+    [InlineData(3, Steam + "\"p=9 bar, T=230 degC\" --exit \"p=3 bar\" --shape convergent", "--exit: p=3 bar is below the critical pressure 4.9028 bar: a convergent nozzle cannot reach it in its exit plane\n  if the nozzle has a throat before its exit, write --shape convergent-divergent; a space beyond the exit is not asked for yet")]
+    [InlineData(2, Steam + "\"p=9 bar, v=30 m/s\" --exit \"p=3 bar\"", "--inlet: v is specific volume, m3/kg; for velocity write V=30 m/s")]
+    [InlineData(2, "flowduct nozzle --fluid steam --inlet \"p=9 bar, T=230 degC\" --exit \"p=3 bar\" --flow \"300 Nm3/h\"", "--flow: normal and standard volumes are amounts of ideal gas, and water is none\n  give a mass flow, or an actual volume flow in m3/h")]
+    [InlineData(2, "flowduct units colour", "units: colour is no kind of quantity\n  write one of a ratio, a count, pressure, temperature, energy per mass, entropy or heat capacity per mass, specific volume, density, velocity, length, area, mass flow, volume flow, normal volume flow, standard volume flow, heat rate, acceleration, force, angle, mass flux")]
+    [InlineData(3, "flowduct state --fluid air --at \"p=1 bar, x=0.5\"", "--at: air is an ideal gas here and has no saturation line\n  give p with T, h, s or rho")]
+    [InlineData(3, "flowduct state --fluid air --at \"p=1 bar, T=6800 degC\"", "--at: T=6800 degC is above the limit 5726.85 degC of NASA/TP-2002-211556 (2002), record Air\n  valid range: 50 K to 6000 K, 1 Pa to 1 GPa; below 200 K with the heat capacity held")]
+    [InlineData(2, "flowduct state --fluid water --at \"p=1 bar, T=300 K\" --digits 40", "--digits: 40 is not a whole number from 1 to 15\n  write for example --digits 7")]
+    [InlineData(2, "flowduct state --fluid water --at \"p=1 bar, T=300 K\" --format xml", "--format: xml is not one of text, json")]
+    public void A_wrong_input_is_met_by_its_message(int status, string line, string message)
+    {
+        CommandRun run = CommandRun.RunLine(line);
+        Assert.Equal("flowduct: " + message + "\n", run.Error);
+        Assert.Equal(status, run.Status);
+        Assert.Equal(string.Empty, run.Output);
+        Assert.InRange(run.Error.Split('\n').Length - 1, 1, 4);
+    }
+
+    [Fact]
+    public void An_output_that_cannot_be_written_is_status_4()
+    {
+        CommandRun run = CommandRun.RunLine("flowduct fluids-nowhere");
+        Assert.Equal(2, run.Status);
+        run = CommandRun.Run("state", "--fluid", "air", "--at", "p=1 bar, T=300 K", "--output", Path.Combine(Path.GetTempPath(), "no-such-folder-here", "x.txt"));
+        Assert.Equal(4, run.Status);
+        Assert.Equal(string.Empty, run.Output);
+        Assert.Contains("could not be written", run.Error, StringComparison.Ordinal);
+    }
+}
