@@ -24,7 +24,7 @@ internal static class DiffuserPerformance
         bool known = a.Fluid.FromPS(last.p, first.s, default, out FluidState compressed) == Outcome.Ok;
         return performance with
         {
-            LossCoefficient = (rest.p - last.p) / head,
+            LossCoefficient = performance.EntropyRise == 0 && a.Case.Heat == 0 ? 0 : (rest.p - last.p) / head,
             IsentropicEfficiency = known ? (compressed.h - first.h) / (rest.h - first.h) : null,
         };
     }

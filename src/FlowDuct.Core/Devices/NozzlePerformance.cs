@@ -12,12 +12,13 @@ internal static class NozzlePerformance
         double drop = total - ideal.h;
         double Vs = Flow.Energy.Velocity(total, ideal.h);
         double? efficiency = drop > DeviceSolver.EnergyFloor(total) && a.Exit.Velocity is double V ? V * V / 2 / drop : null;
+        bool isLossless = performance.EntropyRise == 0 && a.Case.Heat == 0;
         performance = performance with
         {
             ExitVelocityIdeal = Vs,
             IsentropicEfficiency = efficiency,
             VelocityCoefficient = efficiency is double eta ? Math.Sqrt(eta) : null,
-            LossCoefficient = a.Exit.Stagnation is FluidState rest && rest.p > p2 ? (p01 - rest.p) / (rest.p - p2) : null,
+            LossCoefficient = a.Exit.Stagnation is FluidState rest && rest.p > p2 ? (isLossless ? 0 : (p01 - rest.p) / (rest.p - p2)) : null,
         };
         return a.SaturatedReading ? WithRanges(a, performance, total, drop) : performance;
     }

@@ -15,7 +15,7 @@ internal static class Performances
         Performance performance = a.Performance with
         {
             VolumeFlow = flow * first.v,
-            EntropyRise = exit.HasState ? exit.State.s - first.s : null,
+            EntropyRise = EntropyRise(a),
             LostWork = a.Audit.Entropy == Verdict.Broken ? null : LostWork(a),
             HeatRate = a.Case.Heat != 0 ? flow * a.Case.Heat : null,
             PressureChange = exit.State.p - first.p,
@@ -30,11 +30,18 @@ internal static class Performances
 
     internal static double? Quotient(double? numerator, double? denominator) => denominator is double d && d > 0 && numerator > 0 ? numerator / d : null;
 
+    // Below the closure of the property inverses a rise is rounding: zero.
+    private static double? EntropyRise(DeviceAnswer a)
+    {
+        if (!a.Exit.HasState) return null;
+        double rise = a.Exit.State.s - a.Inlet.State.s;
+        return Math.Abs(rise) < Auditor.EntropyFloor ? 0 : rise;
+    }
+
     // Entropy made inside the device, at the temperature of the surroundings.
     private static double? LostWork(DeviceAnswer a)
     {
-        if (!a.Exit.HasState) return null;
-        double made = a.Exit.State.s - a.Inlet.State.s;
+        if (EntropyRise(a) is not double made) return null;
         if (a.Case.Heat != 0) made -= a.Case.Heat / a.Case.ValueOr(CaseOption.BoundaryTemperature, a.Case.AmbientTemperature);
         return made * a.Case.AmbientTemperature;
     }

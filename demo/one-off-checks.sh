@@ -1,0 +1,43 @@
+#!/bin/bash
+# One-off checks at Tarnholt works (an invented plant; see demo/README.md). Each must end with the status named before it.
+set -u
+flowduct=${FLOWDUCT:-flowduct}
+wrong=0
+
+# ask STATUS SENTENCE ARGUMENT...
+ask() {
+    local expected=$1 sentence=$2 status
+    shift 2
+    printf '\n### %s\n' "$sentence"
+    "$flowduct" "$@"
+    status=$?
+    if [ "$status" -ne "$expected" ]; then
+        wrong=$((wrong + 1))
+        echo "### status $status, expected $expected"
+    fi
+}
+
+ask 0 'NZ-1014: what leaves the motive nozzle, and what throat and exit does 310 kg/h need?' \
+    nozzle --fluid steam --inlet 'p=11.2 barg, T=212 degC, V=18 m/s' --exit 'p=0.14 bar' \
+    --efficiency 92% --flow '310 kg/h' --ambient 'p=0.973 bar, T=24 degC'
+
+ask 0 'NZ-2107: the exit thermometer reads saturation, so how fast is the jet at least and at most?' \
+    nozzle --fluid steam --inlet 'p=6.4 bar, T=187 degC' --exit 'p=2.1 bar, T=121.8 degC'
+
+ask 0 'NZ-2203: water at 138 degC into an open bath: it flashes' \
+    nozzle --fluid water --inlet 'p=8.5 bar, T=138 degC, V=2.4 m/s' --exit 'p=1.02 bar'
+
+ask 0 'NZ-3302: what bore passes 0.52 kg/s at full receiver pressure, against a silencer at 0.6 of it?' \
+    nozzle --fluid air --inlet 'p0=7.8 barg, T0=41 degC' --exit 'p/p0=0.6' --flow '0.52 kg/s'
+
+ask 0 'DF-4110: recovery, efficiency and loss from a measured rise and velocity' \
+    diffuser --fluid air --inlet 'p=1013 mbar, T=64 degC, V=47 m/s' --exit 'rise=6.9 mbar, V=19 m/s'
+
+ask 1 'DF-4120: the vendor quotes more recovery than the second law allows' \
+    diffuser --fluid air --inlet 'p=1013 mbar, T=64 degC, V=47 m/s' --exit 'V=24 m/s' --recovery 0.86
+
+ask 3 'NZ-2107 again: pressure and temperature on the saturation line do not name an inlet' \
+    nozzle --fluid steam --inlet 'p=6.4 bar, T=161.4 degC' --exit 'p=2.1 bar'
+
+printf '\n%s\n' "checks that ended otherwise than expected: $wrong"
+[ "$wrong" -eq 0 ]
