@@ -14,7 +14,7 @@ answer() {
 }
 for format in text json; do
     LC_ALL=C answer --format "$format" >"$work/c"
-    LOCPATH=$work LC_ALL=de_DE.UTF-8 LANG=de_DE.UTF-8 TZ=Asia/Tokyo answer --format "$format" >"$work/de"
+    (export LOCPATH=$work LANG=de_DE.UTF-8 TZ=Asia/Tokyo; export LC_ALL=de_DE.UTF-8; answer --format "$format") >"$work/de"
     if [ -s "$work/c" ] && cmp "$work/c" "$work/de"; then
         echo "ok: $format is the same bytes under a German locale"
     else

@@ -81,14 +81,14 @@ internal static partial class QuantityCatalogue
 
     private static QuantityRow Result(
         string key, string symbol, string name, Dimension dimension, string help, bool isText = false) => new()
-    {
-        Key = key,
-        Symbol = symbol.Length == 0 ? key : symbol,
-        Name = name,
-        Dimension = dimension,
-        Kind = QuantityKind.Performance,
-        JsonKey = key,
-        IsText = isText,
-        Help = help,
-    };
+        {
+            Key = key,
+            Symbol = symbol.Length == 0 ? key : symbol,
+            Name = name,
+            Dimension = dimension,
+            Kind = QuantityKind.Performance,
+            JsonKey = key,
+            IsText = isText,
+            Help = help,
+        };
 }
