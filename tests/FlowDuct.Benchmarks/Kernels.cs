@@ -1,6 +1,7 @@
 using System.Diagnostics;
 using FlowDuct.Fluids;
 using FlowDuct.Fluids.Gases;
+using FlowDuct.Fluids.Water;
 
 namespace FlowDuct.Benchmarks;
 
@@ -25,7 +26,11 @@ internal static class Kernels
     internal static int Run(string[] args)
     {
         Arguments arguments = Arguments.Parse(args, defaultRuns: 41);
-        (Fluid Fluid, FluidState[] States)[] fluids = [(GasCatalogue.Air, Grid(GasCatalogue.Air, 150, 1500))];
+        (Fluid Fluid, FluidState[] States)[] fluids =
+        [
+            (GasCatalogue.Air, Grid(GasCatalogue.Air, 150, 1500)),
+            (WaterFluid.Instance, Grid(WaterFluid.Instance, 300, 1000)),
+        ];
         Dictionary<(string, string), List<double>> times = [];
         double sink = 0;
         for (int round = -5; round < arguments.Runs; round++) // the negative rounds let the compiler settle
