@@ -6,11 +6,14 @@ namespace FlowDuct.Cli.Tests;
 /// <summary>One run of the program in this process.</summary>
 internal sealed record CommandRun(int Status, string Output, string Error)
 {
-    internal static CommandRun Run(params string[] args)
+    internal static CommandRun Run(params string[] args) => Run(terminal: false, args);
+
+    /// <summary>Runs as if the answer were shown on a terminal, or not.</summary>
+    internal static CommandRun Run(bool terminal, string[] args)
     {
         using var output = new MemoryStream();
         using var error = new MemoryStream();
-        int status = Application.Run(args, output, error, terminal: false);
+        int status = Application.Run(args, output, error, terminal);
         return new CommandRun(status, Encoding.UTF8.GetString(output.ToArray()), Encoding.UTF8.GetString(error.ToArray()));
     }
 

@@ -1,9 +1,10 @@
 #!/bin/bash
 # needs: locales
 # Same bytes whatever the locale and time zone; no ICU library behind the binary.
+# usage: tests/outside/locale.sh [NATIVE BINARY]
 set -u
-cd "$(dirname "$0")/../.."
-flowduct=artifacts/native/flowduct
+flowduct=$(realpath "${1:-$(dirname "$0")/../../artifacts/native/flowduct}")
+[ -x "$flowduct" ] || { echo "no binary at $flowduct"; exit 1; }
 work=$(mktemp -d)
 trap 'rm -rf "$work"' EXIT
 wrong=0

@@ -1,8 +1,9 @@
 #!/bin/bash
 # Wrong inputs on the native binary: status 2 or 3, nothing on stdout, a message of one to four lines that names the place.
+# usage: tests/outside/wrong-inputs.sh [NATIVE BINARY]
 set -u
-cd "$(dirname "$0")/../.."
-flowduct=artifacts/native/flowduct
+flowduct=$(realpath "${1:-$(dirname "$0")/../../artifacts/native/flowduct}")
+[ -x "$flowduct" ] || { echo "no binary at $flowduct"; exit 1; }
 work=$(mktemp -d)
 trap 'rm -rf "$work"' EXIT
 wrong=0

@@ -87,12 +87,12 @@ internal static class Application
         try
         {
             if (file is null) Output.WriteAll(stdout, bytes);
-            else Output.WriteFile(file, bytes);
+            else OutputFile.Write(file, bytes);
         }
         catch (Exception failure) when (failure is IOException or UnauthorizedAccessException or NotSupportedException or ArgumentException)
         {
             string place = file is null ? "standard output" : "--output " + file;
-            throw new FlowDuctException(new Refusal(RefusalKind.NotWritten, place, $"could not be written: {failure.Message}", "free some space or name another file"));
+            throw new FlowDuctException(new Refusal(RefusalKind.NotWritten, place, $"could not be written: {OutputFile.Reason(failure)}", "free some space or name another file"));
         }
     }
 

@@ -27,7 +27,7 @@ internal sealed class Arguments
         if (args.Length == 0 || args is ["--help"] or ["-h"]) return new Arguments { WantsHelp = true };
         if (args is ["--version"]) return new Arguments { WantsVersion = true };
         CommandRow command = Array.Find(CommandTable.All, row => row.Word == args[0]) ?? throw (args[0].StartsWith('-')
-            ? Usage.Refuse(string.Empty, $"{Quantities.Echo.Ascii(args[0])} comes before a command", "begin with one of state, nozzle, diffuser, fluids, units")
+            ? Usage.BeforeCommand(args[0])
             : Usage.UnknownCommand(args[0]));
         return ReadCommand(command, args);
     }
@@ -39,33 +39,42 @@ internal sealed class Arguments
         List<(OptionRow Row, Option Option)> options = [];
         foreach (OptionRow option in OptionTable.Of(row.Name))
         {
-            Option parsed = option.IsSwitch ? new Option<bool>(option.Name) : new Option<string>(option.Name) { Arity = ArgumentArity.ZeroOrOne };
+            // A switch of type bool would take "--quiet false" for a value and count as given.
+            var parsed = new Option<string>(option.Name) { Arity = option.IsSwitch ? ArgumentArity.Zero : ArgumentArity.ZeroOrOne };
             if (option.Name == "--help") parsed.Aliases.Add("-h");
             command.Options.Add(parsed);
             options.Add((option, parsed));
         }
 
         var configuration = new ParserConfiguration { EnablePosixBundling = false, ResponseFileTokenReplacer = null };
-        ParseResult result = CommandLineParser.Parse(command, args[1..], configuration);
+        // The parser drops a leading [word] as a directive and a leading repetition of the command: such words are taken before.
+        int leading = Array.FindIndex(args, 1, word => word.StartsWith('-')) is int first and > 0 ? first : args.Length;
+        ParseResult result = CommandLineParser.Parse(command, args[leading..], configuration);
         var arguments = new Arguments
         {
             Command = row.Name,
-            WantsHelp = result.GetResult("--help") is OptionResult { Implicit: false },
-            Words = [.. result.UnmatchedTokens],
+            WantsHelp = IsGiven(result, "--help"),
+            WantsVersion = IsGiven(result, "--version"),
+            Words = [.. args[1..leading], .. result.UnmatchedTokens],
         };
-        if (!arguments.WantsHelp) arguments.Collect(result, options);
+        if (!arguments.WantsHelp && !arguments.WantsVersion) arguments.Collect(result, options);
         return arguments;
     }
 
+    private static bool IsGiven(ParseResult result, string option) => result.GetResult(option) is OptionResult { Implicit: false };
+
     private void Collect(ParseResult result, List<(OptionRow Row, Option Option)> options)
     {
+        // Values first: in "--fluid air --heat --fluid" the slip is the value that --heat lacks, not a second --fluid.
+        OptionRow? twice = null;
         foreach ((OptionRow row, Option option) in options)
         {
             if (result.GetResult(option) is not OptionResult given || given.Implicit) continue;
-            if (given.IdentifierTokenCount > 1) throw Usage.Twice(row);
-            if (row.IsSwitch) _values[row.Name] = string.Empty;
-            else _values[row.Name] = ValueOf(row, given);
+            if (given.IdentifierTokenCount > 1) twice ??= row;
+            _values[row.Name] = row.IsSwitch ? string.Empty : ValueOf(row, given);
         }
+
+        if (twice is not null) throw Usage.Twice(twice);
 
         if (Command != CommandName.Units && Words.Count > 0) throw Usage.UnknownOption(Words[0], Command);
         if (Words.FirstOrDefault(word => word.StartsWith('-')) is string stray) throw Usage.UnknownOption(stray, Command);

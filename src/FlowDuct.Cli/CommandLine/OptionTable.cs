@@ -33,6 +33,7 @@ internal static class OptionTable
         new("--strict", "", "A caution fails the answer: exit status 1.", "", CommandName.Devices, OfTheCase: false),
         new("--color", "WHEN", "auto (the default), always or never; NO_COLOR is honoured.", "never", CommandName.Answering, OfTheCase: false),
         new("--help", "", "This help; also -h.", "", CommandName.All, OfTheCase: false),
+        new("--version", "", "Version and commit of flowduct.", "", CommandName.All, OfTheCase: false),
     ];
 
     /// <summary>The options of a command, in the order of help.</summary>

@@ -2,7 +2,7 @@ using System.Text;
 
 namespace FlowDuct.Cli.CommandLine;
 
-/// <summary>Writes finished bytes: to a stream at once, or to a file whole or not at all.</summary>
+/// <summary>Writes finished bytes to a stream at once.</summary>
 internal static class Output
 {
     // EPIPE; Windows says ERROR_NO_DATA or ERROR_BROKEN_PIPE.
@@ -35,22 +35,6 @@ internal static class Output
         catch (IOException failure) when (failure.HResult is BrokenPipe or WindowsNoData or WindowsBrokenPipe)
         {
             return false;
-        }
-    }
-
-    /// <summary>Writes beside the file and renames: a reader never sees half of it.</summary>
-    internal static void WriteFile(string path, ReadOnlySpan<byte> bytes)
-    {
-        string part = path + ".part";
-        try
-        {
-            File.WriteAllBytes(part, bytes);
-            File.Move(part, path, overwrite: true);
-        }
-        catch
-        {
-            File.Delete(part);
-            throw;
         }
     }
 }

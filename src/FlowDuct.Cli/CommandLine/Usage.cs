@@ -14,6 +14,10 @@ internal static class Usage
         $"{Echo.Ascii(word)} is not a command",
         Nearest(word, CommandTable.All.Select(row => row.Word)) is string near ? $"did you mean {near}?" : "write one of state, nozzle, diffuser, fluids, units");
 
+    internal static FlowDuctException BeforeCommand(string word) => Nearest(word, ["--help", "--version"]) is string near && near != word
+        ? Refuse(string.Empty, $"{Echo.Ascii(word)} is not an option", $"did you mean {near}?")
+        : Refuse(string.Empty, $"{Echo.Ascii(word)} comes before a command", "begin with one of state, nozzle, diffuser, fluids, units");
+
     internal static FlowDuctException UnknownOption(string word, CommandName command)
     {
         string name = word.Split('=')[0];
