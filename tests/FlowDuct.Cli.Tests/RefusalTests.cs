@@ -6,6 +6,7 @@ namespace FlowDuct.Cli.Tests;
 public class RefusalTests
 {
     private const string Steam = "flowduct nozzle --fluid steam --inlet ";
+    private const string Air = "flowduct nozzle --fluid air --inlet ";
 
     [Theory]
     [InlineData(2, Steam + "\"p=9 bar, T=200\" --exit \"p=3 bar\"", "--inlet: T=200 has no unit; write for example T=200 degC")]
@@ -46,6 +47,16 @@ public class RefusalTests
     [InlineData(2, "flowduct nozzle --fluid air --inlet \"p=5 bar, T=300 K\" --exit \"p=4 bar, T=290 K\" --heat \"5 kW\"", "--heat: a heat rate needs the mass flow that takes it\n  add --flow in kg/s, or give the heat in kJ/kg")]
     [InlineData(2, "flowduct state --fluid water --at \"p=1 bar, T=300 K\" --digits 40", "--digits: 40 is not a whole number from 1 to 15\n  write for example --digits 7")]
     [InlineData(2, "flowduct state --fluid water --at \"p=1 bar, T=300 K\" --format xml", "--format: xml is not one of text, json")]
+    [InlineData(2, Air + "\"p=9 bar, T=200\" --exit \"p=8 bar\"", "--inlet: T=200 has no unit; write for example T=200 degC")]
+    [InlineData(2, Air + "\"p=9 bar, T=230,5 degC\" --exit \"p=8 bar\"", "--inlet: T=230,5 degC has a decimal comma\n  write T=230.5 degC")]
+    [InlineData(2, Air + "\"p=NaN bar, T=230 degC\" --exit \"p=8 bar\"", "--inlet: p=NaN is not a finite number\n  write for example p=9 bar")]
+    [InlineData(2, Air + "\"p=1e400 bar, T=230 degC\" --exit \"p=8 bar\"", "--inlet: 1e400 is too large; the greatest number is 1.79e308\n  write for example p=9 bar")]
+    [InlineData(2, Air + "\"p=9 barr, T=230 degC\" --exit \"p=8 bar\"", "--inlet: p=9 barr: barr is not a unit here; did you mean bar or bara or barg?")]
+    [InlineData(2, Air + "\"p=9 bar, T=230 degC\" --exti \"p=8 bar\"", "--exti is not an option\n  did you mean --exit?")]
+    [InlineData(2, Air + "\"p=9 bar, T=230 degC, rho=6 kg/m3\" --exit \"p=8 bar\"", "--inlet: p, T, rho are more than fixes the state\n  leave out rho: p, T is enough")]
+    [InlineData(2, Air + "\"p=9 bar\" --exit \"p=8 bar\"", "--inlet: p alone does not fix the state\n  add one of T, h, s, u, rho, x, superheat, p0, T0, h0")]
+    [InlineData(3, Air + "\"p=9 bar, T=7000 K\" --exit \"p=8 bar\"", "--inlet: T=6726.85 degC is above the limit 5726.85 degC of NASA/TP-2002-211556 (2002), record Air\n  valid range: 50 K to 6000 K, 1 Pa to 1 GPa; below 200 K the heat capacity keeps its 200 K value")]
+    [InlineData(2, Air + "\"p=-2 bar, T=230 degC\" --exit \"p=8 bar\"", "--inlet: p=-2 bar is not above 0: a bare unit is absolute; for gauge write bar(g)\n  write for example p=9 bar")]
     public void A_wrong_input_is_met_by_its_message(int status, string line, string message)
     {
         CommandRun run = CommandRun.RunLine(line);
