@@ -1,7 +1,6 @@
 using FlowDuct.Cli.Rendering;
 using FlowDuct.Devices;
 using FlowDuct.Errors;
-using FlowDuct.Findings;
 
 namespace FlowDuct.Cli.CommandLine;
 
@@ -69,8 +68,7 @@ internal static class Application
         DeviceAnswer answer = DeviceSolver.Solve(binder.Device(arguments.Command == CommandName.Nozzle ? DeviceKind.Nozzle : DeviceKind.Diffuser));
         if (json) JsonAnswer.Write(memory, answer, options);
         else Text(memory, to => TextAnswer.Write(to, answer, options));
-        bool cautioned = options.Strict && answer.Findings.Any(finding => finding.Severity == Severity.Caution);
-        return answer.Passed && !cautioned ? ExitStatus.Passed : ExitStatus.Failed;
+        return answer.Passes(options.Strict) ? ExitStatus.Passed : ExitStatus.Failed;
     }
 
     private static int Text(MemoryStream memory, Action<TextWriter> write)

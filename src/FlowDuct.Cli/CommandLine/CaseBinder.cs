@@ -126,13 +126,11 @@ internal sealed class CaseBinder
             throw Usage.Refuse("--recovery", $"{_arguments.Value("--recovery")} is above 1, the recovery of a flow brought to rest without loss", "give a ratio up to 1, or --recovery-basis dynamic");
     }
 
-    // Normal and standard volumes are amounts of ideal gas: density at 0 degC (DIN 1343) or 15 degC (ISO 13443), 101.325 kPa.
     private static double AmountToMass(Fluid fluid, Dimension dimension)
     {
         if (dimension is not (Dimension.NormalVolumeFlow or Dimension.StandardVolumeFlow)) return 1;
-        if (fluid.HasSaturation) throw Usage.Refuse("--flow", $"normal and standard volumes are amounts of ideal gas, and {fluid.Name} is none", "give a mass flow, or an actual volume flow in m3/h");
-        fluid.FromPT(101325, dimension == Dimension.NormalVolumeFlow ? 273.15 : 288.15, out FluidState reference);
-        return reference.rho;
+        return ReferenceVolume.Density(fluid, dimension) ?? throw Usage.Refuse(
+            "--flow", $"normal and standard volumes are amounts of ideal gas, and {fluid.Name} is none", "give a mass flow, or an actual volume flow in m3/h");
     }
 
     // Options come in the order of the catalogue, in which the flow stands before the heat.

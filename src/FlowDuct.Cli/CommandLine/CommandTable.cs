@@ -20,5 +20,8 @@ internal static class CommandTable
 
     internal static CommandRow Of(CommandName name) => Array.Find(All, row => row.Name == name)!;
 
+    /// <summary>The words of several commands.</summary>
+    internal static string WordsOf(CommandName names) => string.Join(", ", All.Where(row => (row.Name & names) != 0).Select(row => row.Word));
+
     internal static string WordOf(CommandName name) => name == CommandName.None ? string.Empty : Of(name).Word;
 }

@@ -1,4 +1,3 @@
-using System.Globalization;
 using FlowDuct.Cli.Rendering;
 using FlowDuct.Fluids;
 using FlowDuct.Quantities;
@@ -8,6 +7,9 @@ namespace FlowDuct.Cli.CommandLine;
 /// <summary>The lists of fluids and units.</summary>
 internal static class Listings
 {
+    // As many as every double keeps.
+    private const int Digits = 15;
+
     internal static void Fluids(TextWriter to)
     {
         foreach (FluidName row in FluidCatalogue.Names)
@@ -38,8 +40,8 @@ internal static class Listings
         foreach (Unit unit in UnitTable.All)
         {
             if (unit.Dimension != dimension) continue;
-            string factor = unit.Factor.ToString("R", CultureInfo.InvariantCulture);
-            string offset = unit.Offset == 0 ? string.Empty : $" after adding {unit.Offset.ToString("R", CultureInfo.InvariantCulture)}";
+            string factor = NumberFormatter.Shortest(unit.Factor, Digits);
+            string offset = unit.Offset == 0 ? string.Empty : $" after adding {NumberFormatter.Shortest(unit.Offset, Digits)}";
             TextWrap.Write(to, $"  {unit.Spelling,-14}", $" {factor}{offset} ({unit.Source})", 17);
         }
     }

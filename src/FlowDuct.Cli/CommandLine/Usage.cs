@@ -25,9 +25,13 @@ internal static class Usage
         if (!word.StartsWith('-')) return Refuse(string.Empty, $"{Echo.Ascii(word)} belongs to no option", "quote lists that hold spaces: --inlet \"p=9 bar, T=230 degC\"");
         OptionRow? elsewhere = Array.Find(OptionTable.All, row => row.Name == name);
         string reason = elsewhere is null ? $"{shown} is not an option" : $"{shown} is not an option of {CommandTable.WordOf(command)}";
-        string next = elsewhere is null && Nearest(name, OptionTable.Of(command).Select(row => row.Name)) is string near
-            ? $"did you mean {near}?"
-            : $"flowduct {CommandTable.WordOf(command)} --help lists the options";
+        string? near = elsewhere is null ? Nearest(name, OptionTable.Of(command).Select(row => row.Name)) : null;
+        string next = (elsewhere, near) switch
+        {
+            (not null, _) => $"it belongs to {CommandTable.WordsOf(elsewhere.Commands)}",
+            (_, not null) => $"did you mean {near}?",
+            _ => $"flowduct {CommandTable.WordOf(command)} --help lists the options",
+        };
         return Refuse(string.Empty, reason, next);
     }
 

@@ -12,8 +12,7 @@ internal static class JsonAnswer
     {
         using var json = new Utf8JsonWriter(to, JsonNumbers.Options);
         json.WriteStartObject();
-        bool strictlyFailed = options.Strict && answer.Findings.Any(f => f.Severity == Severity.Caution);
-        JsonHead.Write(json, answer.Passed && !strictlyFailed ? "pass" : "fail", answer.Fluid);
+        JsonHead.Write(json, answer.Passes(options.Strict) ? "pass" : "fail", answer.Fluid);
         Case(json, answer);
         Units(json);
         json.WriteStartObject("stations");

@@ -41,5 +41,13 @@ internal sealed record DeviceAnswer
 
     internal Fluid Fluid => Case.Fluid;
 
-    internal bool Passed => !Findings.Any(f => f.Severity == Severity.Error);
+    /// <summary>True where no finding is an error and, if strict, none is a caution either.</summary>
+    internal bool Passes(bool strict) => Findings.All(f => f.Severity < (strict ? Severity.Caution : Severity.Error));
+
+    /// <summary>The first station, along the flow, whose state carries a notice; null where none does.</summary>
+    internal StationAnswer? StationWith(Notices notice)
+    {
+        StationAnswer?[] stations = [Inlet, Throat, Exit];
+        return Array.Find(stations, at => at is not null && (at.State.Notices & notice) != 0);
+    }
 }

@@ -24,6 +24,7 @@ internal static class DeviceSolver
     /// <summary>The stations alone; the audit moves the figures by their rounding and asks again.</summary>
     internal static DeviceAnswer Stations(DeviceCase c)
     {
+        if (c.Has(CaseOption.Heat) && c.Has(CaseOption.HeatLoss)) throw Refusals.HeatTwice();
         Inlet inlet = Inlet.Solve(c);
         if (c.Device == DeviceKind.Diffuser && inlet.V == 0) throw Refusals.DiffuserAtRest();
         if (inlet.Station.Stagnation is null) throw Refusals.NoSuchInlet(inlet.Given.Given);

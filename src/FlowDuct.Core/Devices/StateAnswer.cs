@@ -7,9 +7,6 @@ namespace FlowDuct.Devices;
 /// <summary>The answer to a property question: one station.</summary>
 internal sealed record StateAnswer(Fluid Fluid, GivenSlots Given, StationAnswer At)
 {
-    /// <summary>Temperature above saturation at this pressure, K; negative when subcooled, null where there is no saturation.</summary>
-    internal double? Superheat => Fluid.TrySaturationTemperature(At.State.p, out double T) && !At.State.HasQuality ? At.State.T - T : null;
-
     /// <summary>Saturation temperature at this pressure, K; null where there is none.</summary>
     internal double? SaturationTemperature => Fluid.TrySaturationTemperature(At.State.p, out double T) ? T : null;
 

@@ -125,10 +125,8 @@ internal static class Refusals
     internal static FlowDuctException EfficiencyWithHeat() => NotUnderstood(
         "--efficiency", "with heat an efficiency can be implied by measured figures, not given", "give two exit figures instead");
 
-    internal static FlowDuctException FlowTooGreat(double flow, double most) => NoAnswer(
-        "--flow",
-        $"{Units.Text(flow, Dimension.MassFlow)} does not pass the inlet section (at most {Units.Text(most, Dimension.MassFlow)})",
-        "give a larger section or a smaller flow");
+    internal static FlowDuctException HeatTwice() => NotUnderstood(
+        "--heat-loss", "the heat is given too, as --heat", "keep one of them; --heat takes a minus sign for a loss");
 
     internal static string PlaceOf(Station station) => station switch
     {

@@ -9,8 +9,7 @@ internal static class Extrapolated
 {
     internal static Finding? Check(DeviceAnswer a)
     {
-        StationAnswer?[] stations = [a.Inlet, a.Throat, a.Exit];
-        StationAnswer? cold = Array.Find(stations, at => at is not null && (at.State.Notices & Notices.Extrapolated) != 0);
+        StationAnswer? cold = a.StationWith(Notices.Extrapolated);
         return cold is null ? null : new Finding("extrapolated", Severity.Note, cold.State.T, 200, a.Fluid.Formulation, text =>
             $"{text.Text(cold.State.T, Dimension.Temperature, 4)} lies below the fit, which begins at {text.Text(200, Dimension.Temperature, 4)}: the heat capacity is held at its value there");
     }

@@ -12,8 +12,7 @@ internal static class Icing
 
     internal static Finding? Check(DeviceAnswer a)
     {
-        StationAnswer?[] stations = [a.Inlet, a.Throat, a.Exit];
-        StationAnswer? cold = Array.Find(stations, at => at is not null && (at.State.Notices & Notices.BelowTriplePoint) != 0);
+        StationAnswer? cold = a.StationWith(Notices.BelowTriplePoint);
         return cold is null ? null : new Finding("icing", Severity.Caution, cold.State.p, TriplePressure, "IAPWS R7-97(2012)", text =>
             $"below the triple point ({text.Text(TriplePressure, Dimension.Pressure)}, {text.Text(273.16, Dimension.Temperature)}) ice forms at equilibrium; the answer is vapour that does not freeze");
     }

@@ -9,8 +9,7 @@ internal static class NearCritical
 {
     internal static Finding? Check(DeviceAnswer a)
     {
-        StationAnswer?[] stations = [a.Inlet, a.Throat, a.Exit];
-        StationAnswer? near = Array.Find(stations, at => at is not null && (at.State.Notices & Notices.NearCritical) != 0);
+        StationAnswer? near = a.StationWith(Notices.NearCritical);
         return near is null ? null : new Finding("near-critical", Severity.Caution, near.State.T, 647.096, "IAPWS R7-97(2012)", text =>
             $"a station lies near the critical point ({text.Text(22.064e6, Dimension.Pressure)}, {text.Text(647.096, Dimension.Temperature)}): heat capacities and speeds of sound change steeply there");
     }

@@ -63,7 +63,4 @@ internal sealed class QuantityRow
         string own = system == UnitSystem.Us ? OwnUsUnit : OwnMetricUnit;
         return own.Length == 0 ? DisplayUnits.Of(Dimension, system) : own;
     }
-
-    /// <summary>True where it may be given in a unit of that dimension.</summary>
-    public bool IsGivenAs(Dimension dimension) => dimension == Dimension || Array.IndexOf(AlsoGivenAs, dimension) >= 0;
 }

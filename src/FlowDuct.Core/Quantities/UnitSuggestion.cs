@@ -56,8 +56,8 @@ internal static class UnitSuggestion
         bool isFlow = dimension is Dimension.MassFlow or Dimension.VolumeFlow
             or Dimension.NormalVolumeFlow or Dimension.StandardVolumeFlow;
         return isFlow && IsAmbiguous(spelling)
-            ? $"{spelling} names no reference state (conventions differ by up to 8.7 %); add --reference-state "
-                + "\"T=60 degF, p=14.696 psi\", or write Nm3/h (0 degC) or Sm3/h (15 degC)"
+            ? $"{spelling} names no reference state (conventions differ by up to 8.7 %); "
+                + "write Nm3/h (0 degC) or Sm3/h (15 degC)"
             : null;
     }
 

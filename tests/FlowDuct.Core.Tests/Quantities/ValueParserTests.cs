@@ -97,7 +97,7 @@ public sealed class ValueParserTests
     [InlineData("efficiency", "130 %", "efficiency 130 % is outside 0 to 100 %")]
     [InlineData("efficiency", "1.3", "efficiency 1.3 is outside 0 to 1")]
     [InlineData("efficiency", "0", "efficiency 0 is outside 0 (excluded) to 1")]
-    [InlineData("flow", "500 scfm", "500 scfm: scfm names no reference state (conventions differ by up to 8.7 %); add --reference-state \"T=60 degF, p=14.696 psi\", or write Nm3/h (0 degC) or Sm3/h (15 degC)")]
+    [InlineData("flow", "500 scfm", "500 scfm: scfm names no reference state (conventions differ by up to 8.7 %); write Nm3/h (0 degC) or Sm3/h (15 degC)")]
     [InlineData("flow", "500 cfm", "500 cfm: cfm is not a unit here; did you mean acfm?")]
     [InlineData("heat-loss", "30", "30 has no unit; write for example 30 kJ/kg")]
     [InlineData("heat", "--fluid", "--fluid is not a number; write for example 1.5 or 2e5")]

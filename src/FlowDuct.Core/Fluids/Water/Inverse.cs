@@ -20,13 +20,6 @@ internal static class Inverse<TKind>
     // Eq. (17) has no value at 1080 K, where tau = 0.5.
     private const double MostT2 = 1079;
 
-    private enum Fit
-    {
-        Inside,
-        Below,
-        Above,
-    }
-
     internal static Outcome Solve(double p, double y, out FluidState state)
     {
         state = default;
@@ -184,7 +177,7 @@ internal static class Inverse<TKind>
     private static Outcome InRegion3(double p, double y, double TLow, double THigh, Phase phase, out FluidState state)
     {
         (double rho, double T) = TKind.GuessRegion3(p, y);
-        if (!Newton3(p, y, ref rho, ref T, out RegionState at) || Fits(phase, at) != Fit.Inside)
+        if (!Newton3(p, y, ref rho, ref T, out RegionState at) || !IsOnItsSide(phase, at))
             at = Nested3(p, y, TLow - Room, THigh + Room, phase);
         Phase known = phase == Phase.None ? (at.T > WaterConstants.Tc ? Phase.Supercritical : Phase.Liquid) : phase;
         state = new FluidState(p, at.T, at.v, at.h, at.s, at.cp, at.cv, at.w, 0, known, NoticesOf.State(p, at.T));
@@ -192,13 +185,12 @@ internal static class Inverse<TKind>
     }
 
     // A liquid lies on the dense side of the critical density, a vapour below the critical temperature on the thin side.
-    private static Fit Fits(Phase phase, in RegionState at)
+    private static bool IsOnItsSide(Phase phase, in RegionState at) => at.T >= WaterConstants.Tc || phase switch
     {
-        if (at.T >= WaterConstants.Tc) return Fit.Inside;
-        double rho = 1 / at.v;
-        if (phase == Phase.Liquid && rho < WaterConstants.rhoc) return Fit.Below;
-        return phase == Phase.SuperheatedVapour && rho > WaterConstants.rhoc ? Fit.Above : Fit.Inside;
-    }
+        Phase.Liquid => 1 / at.v >= WaterConstants.rhoc,
+        Phase.SuperheatedVapour => 1 / at.v <= WaterConstants.rhoc,
+        _ => true,
+    };
 
     private static bool Newton3(double p, double y, ref double rho, ref double T, out RegionState at)
     {
