@@ -72,7 +72,7 @@ internal sealed class CaseBinder
             if (word == typed) return value;
         }
 
-        throw Usage.NotOneOf(option, typed, string.Join(", ", choices.Select(choice => choice.Word)));
+        throw Usage.NotOneOf(option, typed, [.. choices.Select(choice => choice.Word)]);
     }
 
     private void ReadAmbient()

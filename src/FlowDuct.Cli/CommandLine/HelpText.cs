@@ -47,8 +47,24 @@ internal static class HelpText
     private static void Example(TextWriter to, string example)
     {
         to.WriteLine("example");
-        TextWrap.Write(to, "  ", example, 4, " \\");
+        TextWrap.Write(to, "  ", Tied(example), 4, " \\");
         to.WriteLine();
+    }
+
+    // A break inside quotes would change the command, one between an option and its value would hide what belongs together.
+    private static string Tied(string example)
+    {
+        string[] pieces = example.Split('"');
+        for (int i = 1; i < pieces.Length; i += 2) pieces[i] = pieces[i].Replace(' ', TextWrap.Tie);
+        string[] words = string.Join('"', pieces).Split(' ');
+        string text = words[0];
+        for (int i = 1; i < words.Length; i++)
+        {
+            bool value = words[i - 1].StartsWith("--", StringComparison.Ordinal) && !words[i].StartsWith("--", StringComparison.Ordinal);
+            text += (value ? TextWrap.Tie : ' ') + words[i];
+        }
+
+        return text;
     }
 
     private static void Options(TextWriter to, CommandName command, string title, bool ofTheCase)
@@ -59,7 +75,7 @@ internal static class HelpText
         to.WriteLine(title);
         foreach (OptionRow row in rows)
         {
-            string example = row.Example.Length > 0 && row.OfTheCase ? $" Example: {row.Example}" : string.Empty;
+            string example = row.Example.Length > 0 && row.OfTheCase ? " Example: " + Tied(row.Example) : string.Empty;
             Entry(to, row.IsSwitch ? row.Name : $"{row.Name} {row.Value}", row.Help + example);
         }
     }

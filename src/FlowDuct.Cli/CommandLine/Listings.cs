@@ -25,18 +25,21 @@ internal static class Listings
     internal static void Units(TextWriter to, IReadOnlyList<string> words)
     {
         Dimension[] all = [.. Enum.GetValues<Dimension>().Where(dimension => UnitTable.RowsOf(dimension) == dimension)];
-        Dimension[] chosen = words.Count == 0 ? all : [.. all.Where(dimension => DimensionWords.Of(dimension).Contains(string.Join(' ', words), StringComparison.Ordinal))];
+        Dimension[] chosen = words.Count == 0 ? all : [.. all.Where(dimension => Heading(dimension).Contains(string.Join(' ', words), StringComparison.Ordinal))];
         if (chosen.Length == 0)
         {
-            throw Usage.Refuse("units", $"{Echo.Ascii(string.Join(' ', words))} is no kind of quantity", $"write one of {string.Join(", ", all.Select(DimensionWords.Of))}");
+            throw Usage.Refuse("units", $"{Echo.Ascii(string.Join(' ', words))} is no kind of quantity", $"write one of {string.Join(", ", all.Select(Heading))}");
         }
 
         foreach (Dimension dimension in chosen) Kind(to, dimension);
     }
 
+    // In a sentence it is "a ratio"; a heading goes without the article.
+    private static string Heading(Dimension dimension) => DimensionWords.Of(dimension) is var words && words.StartsWith("a ", StringComparison.Ordinal) ? words[2..] : words;
+
     private static void Kind(TextWriter to, Dimension dimension)
     {
-        to.WriteLine($"{DimensionWords.Of(dimension)}, SI {DimensionWords.SiUnit(dimension)}");
+        to.WriteLine($"{Heading(dimension)}, SI {DimensionWords.SiUnit(dimension)}");
         foreach (Unit unit in UnitTable.All)
         {
             if (unit.Dimension != dimension) continue;

@@ -41,8 +41,10 @@ internal static class Usage
 
     internal static FlowDuctException Missing(OptionRow row) => Refuse(row.Name, "is missing", $"write for example {row.Name} {row.Example}");
 
-    internal static FlowDuctException NotOneOf(string name, string value, string choices) =>
-        Refuse(name, $"{Echo.Ascii(value)} is not one of {choices}", string.Empty);
+    internal static FlowDuctException NotOneOf(string name, string value, IReadOnlyList<string> choices) => Refuse(
+        name,
+        $"{Echo.Ascii(value)} is not one of {string.Join(", ", choices)}",
+        Nearest(value, choices) is string near ? $"did you mean {near}?" : string.Empty);
 
     /// <summary>The word at the least distance, if it is near enough to be a slip.</summary>
     internal static string? Nearest(string word, IEnumerable<string> words)

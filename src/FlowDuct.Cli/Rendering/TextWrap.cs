@@ -5,6 +5,9 @@ internal static class TextWrap
 {
     internal const int Width = 80;
 
+    /// <summary>A space at which no line breaks; it is written as a space.</summary>
+    internal const char Tie = '\u00a0';
+
     /// <summary>Writes a first prefix and prose, continued under the prose; a broken line may end with a mark.</summary>
     internal static void Write(TextWriter to, string prefix, string prose, int indent, string mark = "")
     {
@@ -19,7 +22,7 @@ internal static class TextWrap
                 empty = true;
             }
 
-            line += empty ? word : " " + word;
+            line += (empty ? word : " " + word).Replace(Tie, ' ');
             empty = false;
         }
 

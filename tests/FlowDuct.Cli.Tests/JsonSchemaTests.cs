@@ -1,0 +1,47 @@
+using System.Text.Json;
+using Json.Schema;
+using Xunit;
+
+namespace FlowDuct.Cli.Tests;
+
+/// <summary>The JSON answers keep the published schema, docs/schema/answer-1.json.</summary>
+public class JsonSchemaTests
+{
+    private const string Steam = "flowduct nozzle --fluid steam --inlet \"p=9 bar, T=230 degC, V=25 m/s\" --exit \"p=3.2 bar\" --flow \"1.4 kg/s\"";
+
+    private static readonly JsonSchema s_schema = JsonSchema.FromFile(Path.Combine(AppContext.BaseDirectory, "schema", "answer-1.json"));
+
+    [Theory]
+    [InlineData(Steam)]
+    [InlineData("flowduct state --fluid water --at \"p=7 bar, superheat=20 K\"")]
+    [InlineData("flowduct state --fluid air --at \"p=2 bar, T=300 K\"")]
+    [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --exit \"p=3 bar\"")]
+    [InlineData("flowduct nozzle --fluid steam --inlet \"p=9 bar, T=230 degC\" --exit \"p=3.2 bar, T=135.7 degC\"")]
+    [InlineData("flowduct nozzle --fluid steam --inlet \"p=9 bar, T=230 degC, V=25 m/s\" --exit \"p=3.2 bar, V=900 m/s\"")]
+    [InlineData("flowduct diffuser --fluid air --inlet \"p=14.2 psi, T=70 degF, V=540 ft/s\" --exit \"V=120 ft/s\" --recovery 0.72")]
+    public void An_answer_keeps_the_schema(string line)
+    {
+        using JsonDocument answer = Answer(line);
+        Assert.True(s_schema.Evaluate(answer.RootElement).IsValid, answer.RootElement.ToString());
+    }
+
+    [Theory]
+    [InlineData("\"schema\": 1", "\"schema\": 2")]
+    [InlineData("\"phase\"", "\"phases\"")]
+    [InlineData("\"mass_flow\": 1.4,\n    \"volume", "\"volume")]
+    [InlineData("\"severity\": \"note\"", "\"severity\": \"grave\"")]
+    public void A_changed_answer_does_not(string of, string to)
+    {
+        string text = CommandRun.RunLine(Steam + " --format json").Output;
+        Assert.Contains(of, text, StringComparison.Ordinal);
+        using JsonDocument answer = JsonDocument.Parse(text.Replace(of, to, StringComparison.Ordinal));
+        Assert.False(s_schema.Evaluate(answer.RootElement).IsValid);
+    }
+
+    private static JsonDocument Answer(string line)
+    {
+        CommandRun run = CommandRun.RunLine(line + " --format json");
+        Assert.Empty(run.Error);
+        return JsonDocument.Parse(run.Output);
+    }
+}
