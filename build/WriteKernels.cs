@@ -11,8 +11,12 @@ string water = Path.Combine(root, "src", "FlowDuct.Core", "Fluids", "Water");
 bool check = args.Contains("--check");
 bool same = true;
 
-Write("Region1Kernel.g.cs", Gibbs("Region1Kernel", "region1", "IAPWS R7-97(2012), Eq. (7); x = 7.1 - pi, y = tau - 1.222"));
-Write("Region2Kernel.g.cs", Gibbs("Region2Kernel", "region2_residual", "IAPWS R7-97(2012), Eq. (17); x = pi, y = tau - 0.5"));
+Write("Region1Kernel.g.cs", Kernel("Region1Kernel", "region1", null, Sums.All, Sums.ByY, "IAPWS R7-97(2012), Eq. (7); x = 7.1 - pi, y = tau - 1.222"));
+Write("Region2Kernel.g.cs", Kernel("Region2Kernel", "region2_residual", "region2_ideal", Sums.All, Sums.ByY, "IAPWS R7-97(2012), Eqs. (16), (17); x = pi, y = tau - 0.5"));
+Write("Region3Kernel.g.cs", Kernel("Region3Kernel", "region3", null, Sums.All, Sums.ByX, "IAPWS R7-97(2012), Eq. (28) without its logarithm; x = delta, y = tau"));
+Write("Region5Kernel.g.cs", Kernel("Region5Kernel", "region5_residual", "region5_ideal", Sums.All, Sums.None, "IAPWS R7-97(2012), Eqs. (33), (34); x = pi, y = tau"));
+Write("MetastableKernel.g.cs", Kernel(
+    "MetastableKernel", "region2_metastable_residual", "region2_metastable_ideal", Sums.All, Sums.None, "IAPWS R7-97(2012), Eqs. (16), (19); x = pi, y = tau - 0.5"));
 Write("BackwardKernels.g.cs", Backward());
 Write("WaterTables.g.cs", Tables());
 return same ? 0 : 1;
@@ -58,36 +62,100 @@ StringBuilder Head(string summary) => new StringBuilder()
     .Append("namespace FlowDuct.Fluids.Water;\n\n")
     .Append($"/// <summary>{summary}.</summary>\n");
 
-string Gibbs(string name, string table, string source)
+// One equation: its sums, the part of them that a search needs, and its ideal part.
+string Kernel(string name, string residual, string? ideal, Sums sums, Sums search, string source)
 {
-    List<Term> terms = Read(table);
+    // The first row of Eq. (28) multiplies a logarithm, which the caller adds.
+    List<Term> terms = residual == "region3" ? [.. Read(residual).Skip(1)] : Read(residual);
     StringBuilder code = Head(source).Append($"internal static class {name}\n{{\n");
+    if (residual == "region3") code.Append($"    /// <summary>Coefficient of ln(delta).</summary>\n    internal const double Log = {Literal(Read(residual)[0].N)};\n\n");
+    string body = Body(terms, sums);
+    code.Append("    /// <summary>Arithmetic operations of one call of Sums and, where there is one, Ideal.</summary>\n");
+    string idealBody = ideal is null ? string.Empty : IdealBody(Read(ideal));
+    code.Append($"    internal const int Operations = {Count(body) + Count(idealBody)};\n\n");
     code.Append("    /// <summary>The sum and its scaled derivatives: g, x g_x, x^2 g_xx, y g_y, y^2 g_yy, x y g_xy.</summary>\n");
-    code.Append("    internal static void Sums(double x, double y, out double g, out double gx, out double gxx, out double gy, out double gyy, out double gxy)\n    {\n");
+    code.Append($"    internal static void Sums({Outs(sums)})\n    {{\n{body}    }}\n");
+    if (search != Sums.None)
+    {
+        code.Append($"\n    /// <summary>What a search asks for: {(search == Sums.ByY ? "g, y g_y, y^2 g_yy" : "x g_x, x^2 g_xx")}.</summary>\n");
+        code.Append($"    internal static void Search({Outs(search)})\n    {{\n{Body(terms, search)}    }}\n");
+    }
+
+    if (ideal is null) return code.Append("}\n").ToString();
+    code.Append("\n    /// <summary>The ideal-gas part without its ln(pi), by y = tau: g, y g_y, y^2 g_yy.</summary>\n");
+    return code.Append($"    internal static void Ideal(double y, out double g, out double gy, out double gyy)\n    {{\n{idealBody}    }}\n}}\n").ToString();
+}
+
+string[] Names(Sums sums) => sums switch
+{
+    Sums.All => ["g", "gx", "gxx", "gy", "gyy", "gxy"],
+    Sums.ByY => ["g", "gy", "gyy"],
+    _ => ["gx", "gxx"],
+};
+
+string Outs(Sums sums) => "double x, double y, " + string.Join(", ", Names(sums).Select(n => "out double " + n));
+
+int Count(string body) => body.Split('\n').Sum(line => line.Split(' ').Count(word => word is "*" or "+" or "+=" or "-" or "/"));
+
+// Terms of one power of x share it: a, b, c are their sum and its scaled derivatives by y.
+string Body(List<Term> terms, Sums sums)
+{
+    bool byY = sums != Sums.ByX, byX = sums != Sums.ByY;
+    StringBuilder code = new();
     Powers(code, "x", terms.Select(t => (int)t.I));
     Powers(code, "y", terms.Select(t => (int)t.J));
-    code.Append("        double a, b, c, t;\n        g = gx = gxx = gy = gyy = gxy = 0;\n");
+    code.Append(byY ? "        double a, b, c, t;\n" : "        double a;\n");
+    HashSet<string> begun = [];
     foreach (IGrouping<double, Term> group in terms.GroupBy(t => t.I))
     {
         int power = (int)group.Key;
-        bool first = true;
-        foreach (Term term in group)
-        {
-            int j = (int)term.J;
-            string op = first ? "=" : "+=";
-            code.Append($"        t = {Literal(term.N)}{Times("y", j)};\n        a {op} t;\n");
-            code.Append($"        b {op} {Scaled(j, "t")};\n        c {op} {Scaled(j * (j - 1), "t")};\n");
-            first = false;
-        }
-
+        if (power == 0 && !byY) continue;
+        Inner(code, [.. group], byY);
         string x = power == 0 ? string.Empty : Times("x", power);
-        if (x.Length > 0) code.Append($"        a = a{x};\n        b = b{x};\n        c = c{x};\n");
-        code.Append("        g += a;\n        gy += b;\n        gyy += c;\n");
-        if (power != 0) code.Append($"        gx += {Scaled(power, "a")};\n        gxy += {Scaled(power, "b")};\n");
-        if (power * (power - 1) != 0) code.Append($"        gxx += {Scaled(power * (power - 1), "a")};\n");
+        if (x.Length > 0) code.Append(byY ? $"        a = a{x};\n        b = b{x};\n        c = c{x};\n" : $"        a = a{x};\n");
+        if (byY) Add("g", "a");
+        if (byY) Add("gy", "b");
+        if (byY) Add("gyy", "c");
+        if (!byX || power == 0) continue;
+        Add("gx", Scaled(power, "a"));
+        if (byY) Add("gxy", Scaled(power, "b"));
+        if (power != 1) Add("gxx", Scaled(power * (power - 1), "a"));
     }
 
-    return code.Append("    }\n}\n").ToString();
+    return code.ToString();
+
+    void Add(string sum, string what) => code.Append($"        {sum} {(begun.Add(sum) ? "=" : "+=")} {what};\n");
+}
+
+void Inner(StringBuilder code, List<Term> group, bool byY)
+{
+    if (!byY)
+    {
+        code.Append($"        a = {string.Join(" + ", group.Select(t => $"({Literal(t.N)}{Times("y", (int)t.J)})"))};\n");
+        return;
+    }
+
+    bool b = false, c = false;
+    for (int i = 0; i < group.Count; i++)
+    {
+        int j = (int)group[i].J;
+        code.Append($"        t = {Literal(group[i].N)}{Times("y", j)};\n        a {(i == 0 ? "=" : "+=")} t;\n");
+        if (j != 0) code.Append($"        b {(b ? "+=" : "=")} {Scaled(j, "t")};\n");
+        if (j * (j - 1) != 0) code.Append($"        c {(c ? "+=" : "=")} {Scaled(j * (j - 1), "t")};\n");
+        (b, c) = (b || j != 0, c || j * (j - 1) != 0);
+    }
+
+    if (!b) code.Append("        b = 0;\n");
+    if (!c) code.Append("        c = 0;\n");
+}
+
+string IdealBody(List<Term> terms)
+{
+    StringBuilder code = new();
+    Powers(code, "y", terms.Select(t => (int)t.J));
+    Inner(code, terms, true);
+    string text = code.ToString().Replace("a +", "g +").Replace("a =", "g =").Replace("b +", "gy +").Replace("b =", "gy =").Replace("c +", "gyy +").Replace("c =", "gyy =");
+    return "        double t;\n" + text;
 }
 
 string Scaled(int factor, string name) => factor switch { 0 => "0", 1 => name, -1 => "-" + name, _ => $"{factor}.0 * {name}" };
@@ -140,8 +208,16 @@ string Backward()
         ("Region2aTps", "region2a_T_ps", "Eq. (25); x = fourth root of p/MPa, y = s/(2 kJ/(kg.K)) - 2", 4),
         ("Region2bTps", "region2b_T_ps", "Eq. (26); x = p/MPa, y = 10 - s/(0.7853 kJ/(kg.K))", 1),
         ("Region2cTps", "region2c_T_ps", "Eq. (27); x = p/MPa, y = 2 - s/(2.9251 kJ/(kg.K))", 1),
+        ("Region3aTph", "region3a_T_ph", "SR3-03, Eq. (2); x = p/(100 MPa) + 0.240, y = h/(2300 kJ/kg) - 0.615; times 760 K", 1),
+        ("Region3bTph", "region3b_T_ph", "SR3-03, Eq. (3); x = p/(100 MPa) + 0.298, y = h/(2800 kJ/kg) - 0.720; times 860 K", 1),
+        ("Region3aVph", "region3a_v_ph", "SR3-03, Eq. (4); x = p/(100 MPa) + 0.128, y = h/(2100 kJ/kg) - 0.727; times 0.0028 m3/kg", 1),
+        ("Region3bVph", "region3b_v_ph", "SR3-03, Eq. (5); x = p/(100 MPa) + 0.0661, y = h/(2800 kJ/kg) - 0.720; times 0.0088 m3/kg", 1),
+        ("Region3aTps", "region3a_T_ps", "SR3-03, Eq. (6); x = p/(100 MPa) + 0.240, y = s/(4.4 kJ/(kg.K)) - 0.703; times 760 K", 1),
+        ("Region3bTps", "region3b_T_ps", "SR3-03, Eq. (7); x = p/(100 MPa) + 0.760, y = s/(5.3 kJ/(kg.K)) - 0.818; times 860 K", 1),
+        ("Region3aVps", "region3a_v_ps", "SR3-03, Eq. (8); x = p/(100 MPa) + 0.187, y = s/(4.4 kJ/(kg.K)) - 0.755; times 0.0028 m3/kg", 1),
+        ("Region3bVps", "region3b_v_ps", "SR3-03, Eq. (9); x = p/(100 MPa) + 0.298, y = s/(5.3 kJ/(kg.K)) - 0.816; times 0.0088 m3/kg", 1),
     ];
-    StringBuilder code = Head("Backward equations of regions 1 and 2, IAPWS R7-97(2012): first guesses of temperature, K").Append("internal static class BackwardKernels\n{\n");
+    StringBuilder code = Head("Backward equations, first guesses: R7-97(2012) of temperature, K; SR3-03(2014) of temperature and volume, reduced").Append("internal static class BackwardKernels\n{\n");
     foreach ((string name, string table, string source, int scale) in kernels)
     {
         List<Term> terms = [.. Read(table).Select(t => t with { I = t.I * scale })];
@@ -166,9 +242,7 @@ string Tables()
 {
     string[] names =
     [
-        "region2_ideal", "region2_metastable_ideal", "region2_metastable_residual", "region3", "region4", "region5_ideal", "region5_residual",
-        "b23", "b2bc", "h3ab", "region3a_T_ph", "region3b_T_ph", "region3a_v_ph", "region3b_v_ph", "region3a_T_ps", "region3b_T_ps",
-        "region3a_v_ps", "region3b_v_ps",
+        "region4", "b23", "b2bc", "h3ab",
     ];
     StringBuilder code = Head("The coefficient tables that loops walk, in printed order").Append("internal static class WaterTables\n{\n");
     foreach (string name in names)
@@ -188,3 +262,11 @@ void Span(StringBuilder code, string type, string name, IEnumerable<string> valu
     code.Append($"    internal static ReadOnlySpan<{type}> {name} => [{string.Join(", ", values)}];\n\n");
 
 internal sealed record Term(double I, double J, string N);
+
+internal enum Sums
+{
+    None,
+    All,
+    ByX,
+    ByY,
+}

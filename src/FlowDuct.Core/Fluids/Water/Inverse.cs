@@ -25,6 +25,7 @@ internal static class Inverse<TKind>
         state = default;
         if (!(p >= WaterConstants.pLeast)) return Outcome.PressureTooLow;
         if (!(p <= WaterConstants.pMost)) return Outcome.PressureTooHigh;
+        if (QuickInverse<TKind>.TrySolve(p, y, out state)) return Outcome.Ok;
         if (!double.IsFinite(y)) return y > 0 ? Outcome.PairTooHigh : Outcome.PairTooLow;
         if (p < SaturationLine.pAtLeastT) return Vapour(p, y, WaterConstants.TLeast, out state);
         return p < WaterConstants.pc ? Subcritical(p, y, out state) : Supercritical(p, y, out state);

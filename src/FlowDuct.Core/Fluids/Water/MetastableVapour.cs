@@ -4,7 +4,12 @@ namespace FlowDuct.Fluids.Water;
 internal static class MetastableVapour
 {
     /// <summary>State from p, Pa, and T, K. R7-97(2012), Eqs. (18), (19); check: Table 18.</summary>
-    internal static RegionState State(double p, double T) => GibbsLoop.State(
-        p, T, 540 / T, 0.5, WaterTables.Region2MetastableIdealJ, WaterTables.Region2MetastableIdealN,
-        WaterTables.Region2MetastableResidualI, WaterTables.Region2MetastableResidualJ, WaterTables.Region2MetastableResidualN);
+    internal static RegionState State(double p, double T)
+    {
+        double pi = p * 1e-6, tau = 540 / T, y = tau - 0.5;
+        MetastableKernel.Sums(pi, y, out double g, out double gx, out double gxx, out double gy, out double gyy, out double gxy);
+        MetastableKernel.Ideal(tau, out double i, out double it, out double itt);
+        double ty = tau / y;
+        return RegionState.FromGibbs(p, T, Math.Log(pi) + i + g, 1 + gx, gxx - 1, it + (ty * gy), itt + (ty * ty * gyy), ty * gxy);
+    }
 }

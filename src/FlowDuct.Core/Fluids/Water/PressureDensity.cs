@@ -64,7 +64,7 @@ internal static class PressureDensity
         return WaterFluid.Instance.FromPT(p, RootFinder.Find(T => Volume(p, T) - v, low, inside, atLow, atHigh), out state);
     }
 
-    private static double Volume(double p, double T) => WaterFluid.RegionAt(p, T).v;
+    private static double Volume(double p, double T) => WaterFluid.RegionAt(p, T, out _).v;
 
     // Golden section to the temperature of the density maximum, or to the cold edge where there is none.
     private static double Densest(double p, double v, double b)

@@ -4,7 +4,11 @@ namespace FlowDuct.Fluids.Water;
 internal static class Region5
 {
     /// <summary>State from p, Pa, and T, K. R7-97(2012), Eqs. (32)-(34); check: Table 42.</summary>
-    internal static RegionState State(double p, double T) => GibbsLoop.State(
-        p, T, 1000 / T, 0, WaterTables.Region5IdealJ, WaterTables.Region5IdealN,
-        WaterTables.Region5ResidualI, WaterTables.Region5ResidualJ, WaterTables.Region5ResidualN);
+    internal static RegionState State(double p, double T)
+    {
+        double pi = p * 1e-6, tau = 1000 / T;
+        Region5Kernel.Sums(pi, tau, out double g, out double gx, out double gxx, out double gy, out double gyy, out double gxy);
+        Region5Kernel.Ideal(tau, out double i, out double it, out double itt);
+        return RegionState.FromGibbs(p, T, Math.Log(pi) + i + g, 1 + gx, gxx - 1, it + gy, itt + gyy, gxy);
+    }
 }

@@ -37,9 +37,8 @@ public sealed class WaterFluid : Fluid
         state = default;
         Outcome outcome = CheckPT(p, T);
         if (outcome != Outcome.Ok) return outcome;
-        Notices notices = NoticesOf.State(p, T);
-        Phase phase = PhaseAt(p, T);
-        state = RegionAt(p, T).ToState(phase, notices);
+        RegionState at = RegionAt(p, T, out Phase phase);
+        state = at.ToState(phase, NoticesOf.State(p, T));
         return Outcome.Ok;
     }
 
@@ -99,12 +98,17 @@ public sealed class WaterFluid : Fluid
     internal override RangeViolation Explain(Outcome outcome, StatePair pair, double first, double second) =>
         WaterRange.Explain(outcome, pair, first, second);
 
-    /// <summary>The basic equation that holds at p, Pa, and T, K, both inside the range.</summary>
-    internal static RegionState RegionAt(double p, double T)
+    /// <summary>The basic equation that holds at p, Pa, and T, K, both inside the range, and the phase there.</summary>
+    internal static RegionState RegionAt(double p, double T, out Phase phase)
     {
+        phase = p > WaterConstants.pc && T > WaterConstants.Tc ? Phase.Supercritical : Phase.SuperheatedVapour;
         if (T > WaterConstants.T25) return Region5.State(p, T);
-        if (T <= WaterConstants.T13) return p > SaturationLine.Pressure(T) ? Region1.State(p, T) : Region2.State(p, T);
-        return T <= WaterConstants.TB23Most && p > Boundaries.pB23(T) ? Region3At(p, T) : Region2.State(p, T);
+        bool dense = T > WaterConstants.T13 && T <= WaterConstants.TB23Most && p > Boundaries.pB23(T);
+        if (T > WaterConstants.T13 && !dense) return Region2.State(p, T);
+        bool liquid = T <= WaterConstants.Tc && p > SaturationLine.Pressure(T);
+        if (liquid) phase = Phase.Liquid;
+        if (dense) return Region3At(p, T);
+        return liquid ? Region1.State(p, T) : Region2.State(p, T);
     }
 
     private static RegionState Region3At(double p, double T)
@@ -119,12 +123,6 @@ public sealed class WaterFluid : Fluid
         if (!(T >= WaterConstants.TLeast)) return Outcome.TemperatureTooLow;
         if (!(T <= WaterConstants.TMost)) return Outcome.TemperatureTooHigh;
         return p <= (T > WaterConstants.T25 ? WaterConstants.pMost5 : WaterConstants.pMost) ? Outcome.Ok : Outcome.PressureTooHigh;
-    }
-
-    private static Phase PhaseAt(double p, double T)
-    {
-        if (T > WaterConstants.Tc) return p > WaterConstants.pc ? Phase.Supercritical : Phase.SuperheatedVapour;
-        return p > SaturationLine.Pressure(T) ? Phase.Liquid : Phase.SuperheatedVapour;
     }
 
     private static Outcome FromSaturation(double p, double T, double x, out FluidState state)
