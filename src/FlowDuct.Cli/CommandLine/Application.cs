@@ -1,6 +1,7 @@
 using FlowDuct.Cli.Rendering;
 using FlowDuct.Devices;
 using FlowDuct.Errors;
+using FlowDuct.Findings;
 
 namespace FlowDuct.Cli.CommandLine;
 
@@ -57,7 +58,7 @@ internal static class Application
         StateAnswer answer = StateAnswer.Solve(binder.Fluid(), binder.At());
         if (RenderBinder.WantsJson(binder)) StateJson.Write(memory, answer, options);
         else Text(memory, to => StateText.Write(to, answer, options));
-        return ExitStatus.Passed;
+        return FindingRules.Pass(answer.Findings, options.Strict) ? ExitStatus.Passed : ExitStatus.Failed;
     }
 
     private static int Device(Arguments arguments, MemoryStream memory, bool terminal)

@@ -30,7 +30,7 @@ internal static class OptionTable
         new("--show-in", "LIST", "Units of your own for some quantities.", "\"T=degF, p=inH2O(g)\"", CommandName.Answering, OfTheCase: false),
         new("--digits", "N", "Significant digits, 1 to 15.", "7", CommandName.Answering, OfTheCase: false),
         new("--quiet", "", "Leave notes and assumptions out.", "", CommandName.Answering, OfTheCase: false),
-        new("--strict", "", "A caution fails the answer: exit status 1.", "", CommandName.Devices, OfTheCase: false),
+        new("--strict", "", "A caution fails the answer: exit status 1.", "", CommandName.Answering, OfTheCase: false),
         new("--color", "WHEN", "auto (the default), always or never; NO_COLOR is honoured.", "never", CommandName.Answering, OfTheCase: false),
         new("--help", "", "This help; also -h.", "", CommandName.All, OfTheCase: false),
         new("--version", "", "Version and commit of flowduct.", "", CommandName.All, OfTheCase: false),

@@ -23,7 +23,7 @@ internal static class JsonAnswer
         JsonPerformance.Write(json, answer.Performance);
         Ledger(json, answer.Ledger);
         Laws(json, answer.Audit);
-        Findings(json, answer, options);
+        Findings(json, answer.Findings, options);
         json.WriteEndObject();
         json.Flush();
         to.WriteByte((byte)'\n');
@@ -121,10 +121,10 @@ internal static class JsonAnswer
         _ => "not-judged",
     };
 
-    private static void Findings(Utf8JsonWriter json, DeviceAnswer answer, RenderOptions options)
+    internal static void Findings(Utf8JsonWriter json, IReadOnlyList<Finding> findings, RenderOptions options)
     {
         json.WriteStartArray("findings");
-        foreach (Finding finding in answer.Findings)
+        foreach (Finding finding in findings)
         {
             json.WriteStartObject();
             json.WriteString("code", finding.Code);

@@ -1,5 +1,6 @@
 using System.Text.Json;
 using FlowDuct.Devices;
+using FlowDuct.Findings;
 
 namespace FlowDuct.Cli.Rendering;
 
@@ -10,7 +11,7 @@ internal static class StateJson
     {
         using var json = new Utf8JsonWriter(to, JsonNumbers.Options);
         json.WriteStartObject();
-        JsonHead.Write(json, "pass", answer.Fluid);
+        JsonHead.Write(json, FindingRules.Pass(answer.Findings, options.Strict) ? "pass" : "fail", answer.Fluid);
         json.WriteStartObject("case");
         json.WriteNull("tag");
         json.WriteNull("name");
@@ -28,8 +29,7 @@ internal static class StateJson
         json.WriteStartObject("stations");
         JsonStation.Write(json, "at", answer.Fluid, answer.At);
         json.WriteEndObject();
-        json.WriteStartArray("findings");
-        json.WriteEndArray();
+        JsonAnswer.Findings(json, answer.Findings, options);
         json.WriteEndObject();
         json.Flush();
         to.WriteByte((byte)'\n');

@@ -7,7 +7,7 @@ namespace FlowDuct.Cli.Rendering;
 /// <summary>The text answer of a property question: one line a quantity.</summary>
 internal static class StateText
 {
-    private static readonly string[] s_keys = ["p", "T", "x", "superheat", "h", "s", "u", "rho", "cp", "cv", "w", "V", "M", "p0", "T0", "h0"];
+    private static readonly string[] s_keys = ["p", "T", "x", "superheat", "h", "s", "u", "rho", "cp", "cv", "w", "w_wet", "kappa", "mu", "nu", "lambda", "prandtl", "sigma", "V", "M", "p0", "T0", "h0"];
 
     internal static void Write(TextWriter to, StateAnswer answer, RenderOptions options)
     {
@@ -28,8 +28,9 @@ internal static class StateText
             Line(to, "saturation temperature at p", "Tsat", TextFigures.Number(T, unit, Wider(options)), unit.Spelling);
         }
 
+        TextAnswer.Findings(to, answer.Findings, options);
         to.WriteLine();
-        if (!options.Quiet) TextWrap.Write(to, string.Empty, $"properties: {answer.Fluid.Formulation}{NoticeWords(answer)}", 0);
+        if (!options.Quiet) TextWrap.Write(to, string.Empty, $"properties: {answer.Fluid.Formulation}{(answer.StationWith(Notices.RegionGap) is null ? string.Empty : "; in the gap between two of its regions, served by the cooler one")}", 0);
         TextWrap.Write(to, string.Empty, TextAnswer.Caution, 0);
     }
 
@@ -39,17 +40,6 @@ internal static class StateText
         UnitReading unit = TextFigures.UnitOf(row, options);
         string unitWord = unit.Dimension == Dimension.Ratio ? string.Empty : unit.Spelling;
         Line(to, row.Name, row.Symbol, TextFigures.Number(value, unit, Wider(options)), unitWord);
-    }
-
-    private static string NoticeWords(StateAnswer answer)
-    {
-        Notices notices = answer.At.State.Notices;
-        string words = string.Empty;
-        if ((notices & Notices.Extrapolated) != 0) words += "; below the fit, heat capacity held at its value at 200 K";
-        if ((notices & Notices.BelowTriplePoint) != 0) words += "; below the triple point, where ice would form at equilibrium";
-        if ((notices & Notices.NearCritical) != 0) words += "; near the critical point, where properties change steeply";
-        if ((notices & Notices.RegionGap) != 0) words += "; in the gap between two regions, served by the cooler one";
-        return words;
     }
 
     // A property table carries one digit more than a device sheet.

@@ -25,7 +25,7 @@ internal static class TextAnswer
         Device(to, answer, options);
         Energy(to, answer, options);
         Laws(to, answer, options);
-        Findings(to, answer, options);
+        Findings(to, answer.Findings, options);
         Assumed(to, answer, options);
         to.WriteLine();
         TextWrap.Write(to, string.Empty, Caution, 0);
@@ -102,9 +102,9 @@ internal static class TextAnswer
         _ => "not judged",
     };
 
-    private static void Findings(TextWriter to, DeviceAnswer answer, RenderOptions options)
+    internal static void Findings(TextWriter to, IReadOnlyList<Finding> findings, RenderOptions options)
     {
-        List<Finding> shown = [.. answer.Findings.Where(f => !options.Quiet || f.Severity != Severity.Note)];
+        List<Finding> shown = [.. findings.Where(f => !options.Quiet || f.Severity != Severity.Note)];
         if (shown.Count == 0) return;
         to.WriteLine();
         to.WriteLine("findings");

@@ -4,7 +4,7 @@ using FlowDuct.Fluids;
 namespace FlowDuct.Devices;
 
 /// <summary>The whole answer to a case.</summary>
-internal sealed record DeviceAnswer
+internal sealed record DeviceAnswer : IStations
 {
     internal required DeviceCase Case { get; init; }
 
@@ -42,10 +42,10 @@ internal sealed record DeviceAnswer
     internal Fluid Fluid => Case.Fluid;
 
     /// <summary>True where no finding is an error and, if strict, none is a caution either.</summary>
-    internal bool Passes(bool strict) => Findings.All(f => f.Severity < (strict ? Severity.Caution : Severity.Error));
+    internal bool Passes(bool strict) => FindingRules.Pass(Findings, strict);
 
-    /// <summary>The first station, along the flow, whose state carries a notice; null where none does.</summary>
-    internal StationAnswer? StationWith(Notices notice)
+    /// <inheritdoc/>
+    public StationAnswer? StationWith(Notices notice)
     {
         StationAnswer?[] stations = [Inlet, Throat, Exit];
         return Array.Find(stations, at => at is not null && (at.State.Notices & notice) != 0);

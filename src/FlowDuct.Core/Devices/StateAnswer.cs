@@ -1,12 +1,19 @@
 using FlowDuct.Errors;
+using FlowDuct.Findings;
 using FlowDuct.Fluids;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Devices;
 
 /// <summary>The answer to a property question: one station.</summary>
-internal sealed record StateAnswer(Fluid Fluid, GivenSlots Given, StationAnswer At)
+internal sealed record StateAnswer(Fluid Fluid, GivenSlots Given, StationAnswer At) : IStations
 {
+    /// <summary>What the state shows.</summary>
+    internal IReadOnlyList<Finding> Findings => FindingRules.Apply(this);
+
+    /// <inheritdoc/>
+    public StationAnswer? StationWith(Notices notice) => (At.State.Notices & notice) != 0 ? At : null;
+
     /// <summary>Saturation temperature at this pressure, K; null where there is none.</summary>
     internal double? SaturationTemperature => Fluid.TrySaturationTemperature(At.State.p, out double T) ? T : null;
 

@@ -28,6 +28,13 @@ internal static class StationFigureTable
         ("T0", (_, at) => at.Stagnation?.T),
         ("h0", (_, at) => at.StagnationEnthalpy),
         ("superheat", Superheat),
+        ("kappa", (_, at) => at.HasState && at.State.w > 0 ? at.State.kappa : null),
+        ("w_wet", (fluid, at) => at.HasState && fluid.TryWetSideSpeedOfSound(at.State, out double w) ? w : null),
+        ("mu", (fluid, at) => TransportOf(fluid, at)?.mu),
+        ("nu", (fluid, at) => TransportOf(fluid, at)?.mu * at.State.v),
+        ("lambda", (fluid, at) => TransportOf(fluid, at)?.lambda),
+        ("prandtl", (fluid, at) => TransportOf(fluid, at) is Transport flow ? flow.mu * at.State.cp / flow.lambda : null),
+        ("sigma", (fluid, at) => at.HasState && at.State.HasQuality && fluid.TrySurfaceTension(at.State.T, out double sigma) ? sigma : null),
     ];
 
     /// <summary>The number of a key, or null where it cannot be known.</summary>
@@ -40,6 +47,9 @@ internal static class StationFigureTable
 
         return null;
     }
+
+    private static Transport? TransportOf(Fluid fluid, StationAnswer at) =>
+        at.HasState && at.State.HasHeatCapacities && fluid.TryTransport(at.State, out Transport transport) ? transport : null;
 
     private static double? Superheat(Fluid fluid, StationAnswer at) =>
         at.HasState && !at.State.HasQuality && fluid.TrySaturationTemperature(at.State.p, out double T) ? at.State.T - T : null;

@@ -1,4 +1,5 @@
 using FlowDuct.Devices;
+using FlowDuct.Fluids;
 
 namespace FlowDuct.Findings;
 
@@ -17,21 +18,32 @@ internal static class FindingRules
         Flashing.Check,
         WetExit.Check,
         ErosionRisk.Check,
-        Icing.Check,
+        a => Icing.Check(a.Fluid, a),
         LowTemperature.Check,
         NearChoking.Check,
         ModelDoubtful.Check,
-        NearCritical.Check,
+        a => NearCritical.Check(a.Fluid, a),
         IllConditioned.Check,
         ReactionForce.Check,
         Choked.Check,
         RoundingLimited.Check,
-        Extrapolated.Check,
+        a => Extrapolated.Check(a.Fluid, a),
         SubAtmospheric.Check,
         InletAtRest.Check,
         AssumedAmbient.Check,
         HeatSign.Check,
     ];
+
+    /// <summary>True where no finding is an error and, if strict, none is a caution either.</summary>
+    internal static bool Pass(IReadOnlyList<Finding> findings, bool strict) =>
+        findings.All(f => f.Severity < (strict ? Severity.Caution : Severity.Error));
+
+    /// <summary>The rules that speak of a state alone.</summary>
+    internal static readonly Func<Fluid, IStations, Finding?>[] OfStates = [Icing.Check, NearCritical.Check, Extrapolated.Check];
+
+    /// <summary>The findings of a property answer, gravest first.</summary>
+    internal static IReadOnlyList<Finding> Apply(StateAnswer answer) =>
+        [.. OfStates.Select(rule => rule(answer.Fluid, answer)).OfType<Finding>().OrderByDescending(finding => finding.Severity)];
 
     /// <summary>The findings of an answer, gravest first.</summary>
     internal static IReadOnlyList<Finding> Apply(DeviceAnswer answer) =>

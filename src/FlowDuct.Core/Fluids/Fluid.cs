@@ -58,6 +58,30 @@ public abstract class Fluid
     /// </summary>
     internal abstract bool TrySaturationOnIsentrope(double s, out FluidState singlePhaseSide);
 
+    /// <summary>
+    /// On the saturation line the speed of sound, m/s, of the equilibrium mixture just inside the wet region, where the state itself has
+    /// that of its one phase; false elsewhere.
+    /// </summary>
+    internal virtual bool TryWetSideSpeedOfSound(in FluidState at, out double w)
+    {
+        w = 0;
+        return false;
+    }
+
+    /// <summary>Viscosity and thermal conductivity of a state of one phase; false where no formulation holds.</summary>
+    internal virtual bool TryTransport(in FluidState at, out Transport transport)
+    {
+        transport = default;
+        return false;
+    }
+
+    /// <summary>Surface tension, N/m, at a saturation temperature, K; false where there is none.</summary>
+    internal virtual bool TrySurfaceTension(double T, out double sigma)
+    {
+        sigma = 0;
+        return false;
+    }
+
     /// <summary>Names the limit behind an outcome of the pair (first, second); called only to speak of a failure.</summary>
     internal abstract RangeViolation Explain(Outcome outcome, StatePair pair, double first, double second);
 }

@@ -55,4 +55,10 @@ public readonly struct FluidState
 
     /// <summary>Specific internal energy, J/kg.</summary>
     internal double u => h - (p * v);
+
+    /// <summary>(dv/dp) at constant s, m3/(kg.Pa), of one phase or of the equilibrium mixture.</summary>
+    internal double vpAtS => -(v / w) * (v / w);
+
+    /// <summary>Isentropic exponent -(v/p)(dp/dv) at constant s; the ratio of heat capacities for an ideal gas only.</summary>
+    internal double kappa => w * w / (p * v);
 }

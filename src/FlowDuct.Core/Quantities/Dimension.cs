@@ -68,4 +68,16 @@ internal enum Dimension
 
     /// <summary>Mass flow rate per area, kg/(m2.s).</summary>
     MassFlux,
+
+    /// <summary>Dynamic viscosity, Pa.s.</summary>
+    DynamicViscosity,
+
+    /// <summary>Kinematic viscosity, m2/s.</summary>
+    KinematicViscosity,
+
+    /// <summary>Thermal conductivity, W/(m.K).</summary>
+    ThermalConductivity,
+
+    /// <summary>Surface tension, N/m.</summary>
+    SurfaceTension,
 }

@@ -28,6 +28,10 @@ internal static class DimensionWords
         Dimension.Force => "force",
         Dimension.Angle => "angle",
         Dimension.MassFlux => "mass flux",
+        Dimension.DynamicViscosity => "dynamic viscosity",
+        Dimension.KinematicViscosity => "kinematic viscosity",
+        Dimension.ThermalConductivity => "thermal conductivity",
+        Dimension.SurfaceTension => "surface tension",
         _ => throw new ArgumentOutOfRangeException(nameof(dimension)),
     };
 
@@ -53,6 +57,10 @@ internal static class DimensionWords
         Dimension.Force => "N",
         Dimension.Angle => "rad",
         Dimension.MassFlux => "kg/(m2.s)",
+        Dimension.DynamicViscosity => "Pa.s",
+        Dimension.KinematicViscosity => "m2/s",
+        Dimension.ThermalConductivity => "W/(m.K)",
+        Dimension.SurfaceTension => "N/m",
         _ => throw new ArgumentOutOfRangeException(nameof(dimension)),
     };
 }

@@ -18,6 +18,10 @@ internal static class DisplayUnits
         Dimension.StandardVolumeFlow => "Sm3/h",
         Dimension.HeatRate => "kW",
         Dimension.Angle => "deg",
+        Dimension.DynamicViscosity => "uPa.s",
+        Dimension.KinematicViscosity => "mm2/s",
+        Dimension.ThermalConductivity => "mW/(m.K)",
+        Dimension.SurfaceTension => "mN/m",
         _ => DimensionWords.SiUnit(dimension),
     };
 
@@ -38,6 +42,10 @@ internal static class DisplayUnits
         Dimension.Acceleration => "ft/s2",
         Dimension.Force => "lbf",
         Dimension.MassFlux => "lb/(ft2.s)",
+        Dimension.DynamicViscosity => "lb/(ft.h)",
+        Dimension.KinematicViscosity => "ft2/s",
+        Dimension.ThermalConductivity => "Btu/(h.ft.degF)",
+        Dimension.SurfaceTension => "lbf/ft",
         _ => Metric(dimension),
     };
 }

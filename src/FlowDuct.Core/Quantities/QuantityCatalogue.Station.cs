@@ -174,6 +174,17 @@ internal static partial class QuantityCatalogue
         },
     ];
 
+    private static QuantityRow Answer(string key, string symbol, string name, Dimension dimension, string help) => new()
+    {
+        Key = key,
+        Symbol = symbol,
+        Name = name,
+        Dimension = dimension,
+        Kind = QuantityKind.StationAnswer,
+        JsonKey = key,
+        Help = help,
+    };
+
     /// <summary>Quantities that are answered only.</summary>
     private static QuantityRow[] StationAnswerRows() =>
     [
@@ -208,6 +219,13 @@ internal static partial class QuantityCatalogue
             JsonKey = "cv",
             Help = "Heat capacity per mass at constant volume.",
         },
+        Answer("kappa", "kappa", "isentropic exponent", Dimension.Ratio, "Isentropic exponent -(v/p)(dp/dv) at constant entropy; not the ratio of heat capacities."),
+        Answer("w_wet", "w_wet", "speed of sound, wet side", Dimension.Velocity, "On the saturation line: speed of sound of the equilibrium mixture just inside the wet region."),
+        Answer("mu", "mu", "dynamic viscosity", Dimension.DynamicViscosity, "Dynamic viscosity of one phase."),
+        Answer("nu", "nu", "kinematic viscosity", Dimension.KinematicViscosity, "Dynamic viscosity over density."),
+        Answer("lambda", "lambda", "thermal conductivity", Dimension.ThermalConductivity, "Thermal conductivity of one phase."),
+        Answer("prandtl", "Pr", "Prandtl number", Dimension.Ratio, "Dynamic viscosity times isobaric heat capacity over thermal conductivity."),
+        Answer("sigma", "sigma", "surface tension", Dimension.SurfaceTension, "Surface tension between liquid and vapour at saturation."),
         new()
         {
             Key = "phase",

@@ -162,5 +162,25 @@ internal static partial class UnitTable
 
         new("kg/(m2.s)", Dimension.MassFlux, 1, Si),
         new("lb/(ft2.s)", Dimension.MassFlux, Pound / (Foot * Foot), Sp811),
+
+        new("Pa.s", Dimension.DynamicViscosity, 1, Si),
+        new("mPa.s", Dimension.DynamicViscosity, 1e-3, Si),
+        new("uPa.s", Dimension.DynamicViscosity, 1e-6, Si),
+        new("cP", Dimension.DynamicViscosity, 1e-3, Sp811),
+        new("lb/(ft.s)", Dimension.DynamicViscosity, Pound / Foot, Sp811),
+        new("lb/(ft.h)", Dimension.DynamicViscosity, Pound / (Foot * Hour), Sp811),
+
+        new("m2/s", Dimension.KinematicViscosity, 1, Si),
+        new("mm2/s", Dimension.KinematicViscosity, 1e-6, Si),
+        new("cSt", Dimension.KinematicViscosity, 1e-6, Sp811),
+        new("ft2/s", Dimension.KinematicViscosity, Foot * Foot, Sp811),
+
+        new("W/(m.K)", Dimension.ThermalConductivity, 1, Si),
+        new("mW/(m.K)", Dimension.ThermalConductivity, 1e-3, Si),
+        new("Btu/(h.ft.degF)", Dimension.ThermalConductivity, Btu / (Hour * Foot * DegreeFahrenheit), Sp811),
+
+        new("N/m", Dimension.SurfaceTension, 1, Si),
+        new("mN/m", Dimension.SurfaceTension, 1e-3, Si),
+        new("lbf/ft", Dimension.SurfaceTension, PoundForce / Foot, Sp811),
     ];
 }

@@ -46,6 +46,9 @@ public sealed class UnitTableTests
         ("ft3/lb", "ft3/lb", Dimension.SpecificVolume),
         ("ft2/s2", "ft2/s2", Dimension.SpecificEnergy),
         ("lb/(s ft2)", "lb/(ft2.s)", Dimension.MassFlux),
+        ("lb/(ft s)", "lb/(ft.s)", Dimension.DynamicViscosity),
+        ("cP", "cP", Dimension.DynamicViscosity),
+        ("Btu_IT/(h ft F)", "Btu/(h.ft.degF)", Dimension.ThermalConductivity),
     ];
 
     /// <summary>Independent of the expressions of the table: SI prefixes, minutes and hours, international foot, yard and nautical mile.</summary>
@@ -114,12 +117,21 @@ public sealed class UnitTableTests
         ("MW", 1000000),
         ("ft/s2", 0.3048),
         ("kN", 1000),
+        ("mPa.s", 0.001),
+        ("uPa.s", 0.000001),
+        ("lb/(ft.h)", 0.00041337887321376453),
+        ("mm2/s", 0.000001),
+        ("cSt", 0.000001),
+        ("ft2/s", 0.09290304),
+        ("mW/(m.K)", 0.001),
+        ("mN/m", 0.001),
+        ("lbf/ft", 14.593902937206365),
     ];
 
     private static readonly string[] WithoutCounterpart =
     [
         "Btu_IT", "cal_IT", "cal_th", "ft lbf", "metric horsepower", "ton of refrigeration (12000 Btu_IT/h)", "US gallon",
-        "lb/(ft s)", "lbf s/ft2", "cP", "Btu_IT/(h ft F)", "lb/(s in2)",
+        "lbf s/ft2", "lb/(s in2)",
     ];
 
     [Fact]

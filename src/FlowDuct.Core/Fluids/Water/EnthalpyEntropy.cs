@@ -17,6 +17,7 @@ internal static class EnthalpyEntropy
 
     internal static Outcome Solve(double h, double s, in FluidState near, out FluidState state)
     {
+        if (ColdLiquid.TrySolve(h, s, out Outcome cold, out state)) return cold;
         double p = near.Phase != Phase.None ? near.p : Start, scale = Math.Max(Math.Abs(h), 1e3);
         (double low, double high) = (WaterConstants.pLeast, WaterConstants.pMost);
 
@@ -35,7 +36,7 @@ internal static class EnthalpyEntropy
             p = next > low && next < high ? next : Middle(low, high);
         }
 
-        return Settled(h, s, low, atLow, atHigh, out state);
+        return Settled(h, s, low, high, atLow, atHigh, out state);
     }
 
     // A liquid is nearly linear in p, a vapour in ln p.
@@ -44,14 +45,21 @@ internal static class EnthalpyEntropy
 
     private static double Middle(double low, double high) => high > 2 * low ? Math.Sqrt(low * high) : (low + high) / 2;
 
-    // The bracket has closed: on the end of the range, on the rounding of a root, or on a step between two regions.
-    private static Outcome Settled(double h, double s, double low, Outcome atLow, Outcome atHigh, out FluidState state)
+    // The bracket has closed: on a root, its rounding carried past the end of the range; on that end; or on a step between two regions.
+    private static Outcome Settled(double h, double s, double low, double high, Outcome atLow, Outcome atHigh, out FluidState state)
     {
-        state = default;
+        double most = NoiseFloor * Math.Max(Math.Abs(h), 1e3);
+        Outcome below = Inverse<ByEntropy>.Solve(low, s, out state);
+        if (below == Outcome.Ok && Math.Abs(h - state.h) <= most) return Outcome.Ok;
+        Outcome above = Inverse<ByEntropy>.Solve(high, s, out FluidState upper);
+        if (above == Outcome.Ok && Math.Abs(h - upper.h) <= most)
+        {
+            state = upper;
+            return Outcome.Ok;
+        }
+
         if (atLow != Outcome.Ok) return atLow;
-        if (atHigh != Outcome.Ok) return atHigh;
-        Outcome outcome = Inverse<ByEntropy>.Solve(low, s, out state);
-        if (outcome != Outcome.Ok || Math.Abs(h - state.h) <= NoiseFloor * Math.Max(Math.Abs(h), 1e3)) return outcome;
-        return RegionEdge.Extend(h, s, ref state) ? Outcome.Ok : Outcome.NotConverged;
+        if (atHigh != Outcome.Ok) return below == Outcome.Ok && RegionEdge.Hotter(h, s, ref state) ? Outcome.Ok : atHigh;
+        return below == Outcome.Ok && RegionEdge.Extend(h, s, ref state) ? Outcome.Ok : Outcome.NotConverged;
     }
 }

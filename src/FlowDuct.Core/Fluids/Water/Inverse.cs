@@ -131,7 +131,7 @@ internal static class Inverse<TKind>
     // What region 2 answered stands where region 5 does not reach down to the property: the gap.
     private static Outcome InRegion5(double p, double y, ref FluidState state)
     {
-        if (p > WaterConstants.pMost5) return Outcome.PairTooHigh;
+        if (p > WaterConstants.pMost5) return state.T <= WaterConstants.T25 + EdgeRounding ? Outcome.Ok : Outcome.PairTooHigh;
         RegionState bottom = Region5.State(p, WaterConstants.T25), top = Region5.State(p, WaterConstants.TMost);
         if (y > TKind.Of(top)) return y <= TKind.Of(top) + (Closure * Math.Abs(y)) ? Accept(top, ref state) : Outcome.PairTooHigh;
         if (y < TKind.Of(bottom))
@@ -159,7 +159,7 @@ internal static class Inverse<TKind>
     }
 
     // A millionth of a kelvin past the least temperature is the rounding of the given pair.
-    private const double EdgeRounding = 1e-6;
+    internal const double EdgeRounding = 1e-6;
 
     /// <summary>One Newton step at constant p inside the bracket; true where the state closes on the property.</summary>
     private static bool Step(in RegionState at, double y, ref double T, ref double low, ref double high)

@@ -8,6 +8,7 @@ internal static class PressureDensity
 {
     // Water at 273.15 K is as dense as at 281 K; beyond this temperature each density belongs to one temperature.
     private const double OneToOne = 290;
+    private const int MostSteps = 60;
 
     internal static Outcome Solve(double p, double rho, out FluidState state)
     {
@@ -25,26 +26,41 @@ internal static class PressureDensity
             else low = T;
         }
 
+        if (p > SaturationLine.pAtT13 && TryRegion3(p, rho, out state)) return Outcome.Ok;
         double cold = Math.Min(OneToOne, high * (1 - 1e-13));
-        if (low == WaterConstants.TLeast && p >= SaturationLine.pAtLeastT && v <= Volume(p, cold)) low = Densest(p, v, cold);
-        Outcome outcome = Between(p, v, low, high, out state);
-        bool dense = state.T > WaterConstants.T13 && state.T <= WaterConstants.TB23Most && p > Boundaries.pB23(state.T);
-        if (outcome == Outcome.Ok && dense) state = AtDensity(p, rho, state);
-        return outcome;
+        if (low == WaterConstants.TLeast && p >= SaturationLine.pAtLeastT && v <= Volume(p, cold) * (1 + 1e-12)) low = Densest(p, v, cold);
+        return Between(p, v, low, high, out state);
     }
 
-    // Near the critical point the density hangs on the last bits of T; region 3 knows it exactly, so T is found beside it.
-    private static FluidState AtDensity(double p, double rho, in FluidState near)
+    // Region 3 knows its density exactly, and at constant density p rises with T everywhere: Newton inside a bracket.
+    private static bool TryRegion3(double p, double rho, out FluidState state)
     {
-        double T = near.T;
-        for (int i = 0; i < 8; i++)
+        state = default;
+        double edge = Boundaries.TB23(p), v = 1 / rho;
+        if (v <= Region1.State(p, WaterConstants.T13).v || v >= Region2.State(p, edge).v) return false;
+        double low = WaterConstants.T13 - 1, high = Math.Min(edge, WaterConstants.TB23Most) + 1, T = low;
+        RegionState at = default;
+        for (int i = 0; i < MostSteps; i++)
         {
-            RegionState trial = Region3.State(rho, T, out _, out double pT);
-            T -= (trial.p - p) / pT;
+            at = Region3.State(rho, T, out _, out double pT);
+            if (at.p > p) high = T;
+            else low = T;
+            double next = T - ((at.p - p) / pT);
+            if (!(next >= low && next <= high)) next = (low + high) / 2;
+            if (Math.Abs(next - T) <= 2e-16 * T) break;
+            T = next;
         }
 
-        RegionState at = Region3.State(rho, T);
-        return new FluidState(p, T, 1 / rho, at.h, at.s, at.cp, at.cv, at.w, 0, near.Phase, near.Notices);
+        bool outside = T < WaterConstants.T13 || T > edge;
+        Notices notices = NoticesOf.State(p, T) | (outside ? Notices.RegionGap : Notices.None);
+        state = new FluidState(p, T, v, at.h, at.s, at.cp, at.cv, at.w, 0, PhaseOf(p, T, rho), notices);
+        return true;
+    }
+
+    private static Phase PhaseOf(double p, double T, double rho)
+    {
+        if (p > WaterConstants.pc && T > WaterConstants.Tc) return Phase.Supercritical;
+        return T <= WaterConstants.Tc && rho > WaterConstants.rhoc ? Phase.Liquid : Phase.SuperheatedVapour;
     }
 
     private static Outcome Wet(in SaturatedPair pair, double v, out FluidState state)

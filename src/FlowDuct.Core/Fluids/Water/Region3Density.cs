@@ -19,13 +19,17 @@ internal static class Region3Density
         return p >= SaturationLine.Pressure(T) ? Liquid(p, T) : Vapour(p, T);
     }
 
+    /// <summary>Density of the saturated liquid, p being the saturation pressure of T.</summary>
+    internal static double SaturatedLiquid(double p, double T) => WaterConstants.Tc - T < CriticalBand ? WaterConstants.rhoc : Liquid(p, T);
+
+    /// <summary>Density of the saturated vapour, p being the saturation pressure of T.</summary>
+    internal static double SaturatedVapour(double p, double T) => WaterConstants.Tc - T < CriticalBand ? WaterConstants.rhoc : Vapour(p, T);
+
     /// <summary>Root on the liquid side: from above, where p(rho) is convex, Newton walks down to it.</summary>
-    internal static double Liquid(double p, double T) =>
-        WaterConstants.Tc - T < CriticalBand && p < WaterConstants.pc ? WaterConstants.rhoc : Newton(p, T, WaterConstants.rhoc, Most, LiquidStart(T));
+    internal static double Liquid(double p, double T) => Newton(p, T, WaterConstants.rhoc, Most, LiquidStart(T));
 
     /// <summary>Root on the vapour side: from below, where p(rho) is concave, Newton walks up to it.</summary>
-    internal static double Vapour(double p, double T) =>
-        WaterConstants.Tc - T < CriticalBand ? WaterConstants.rhoc : Newton(p, T, Least, WaterConstants.rhoc, Least);
+    internal static double Vapour(double p, double T) => Newton(p, T, Least, WaterConstants.rhoc, Least);
 
     private static double LiquidStart(double T) => T > 640 ? 640 : Most;
 

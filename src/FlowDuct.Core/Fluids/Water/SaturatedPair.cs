@@ -11,15 +11,15 @@ internal readonly struct SaturatedPair(double p, double T, in RegionState liquid
     /// <summary>Both states at p, Pa, from its saturation temperature T, K: regions 1 and 2 up to 623.15 K, region 3 above.</summary>
     internal static SaturatedPair At(double p, double T) => T <= WaterConstants.T13
         ? new SaturatedPair(p, T, Region1.State(p, T), Region2.State(p, T))
-        : new SaturatedPair(p, T, Region3.State(Region3Density.Liquid(p, T), T), Region3.State(Region3Density.Vapour(p, T), T));
+        : new SaturatedPair(p, T, Region3.State(Region3Density.SaturatedLiquid(p, T), T), Region3.State(Region3Density.SaturatedVapour(p, T), T));
 
     /// <summary>Saturated liquid alone.</summary>
     internal static RegionState LiquidAt(double p, double T) =>
-        T <= WaterConstants.T13 ? Region1.State(p, T) : Region3.State(Region3Density.Liquid(p, T), T);
+        T <= WaterConstants.T13 ? Region1.State(p, T) : Region3.State(Region3Density.SaturatedLiquid(p, T), T);
 
     /// <summary>Saturated vapour alone.</summary>
     internal static RegionState VapourAt(double p, double T) =>
-        T <= WaterConstants.T13 ? Region2.State(p, T) : Region3.State(Region3Density.Vapour(p, T), T);
+        T <= WaterConstants.T13 ? Region2.State(p, T) : Region3.State(Region3Density.SaturatedVapour(p, T), T);
 
     /// <summary>The homogeneous equilibrium mixture of quality x.</summary>
     internal FluidState Mix(double x)
@@ -31,7 +31,7 @@ internal readonly struct SaturatedPair(double p, double T, in RegionState liquid
     }
 
     // (dv/dp) at constant s of the mixture: both phases move along the saturation line and mass changes phase.
-    private double SpeedOfSound(double x, double v)
+    internal double SpeedOfSound(double x, double v)
     {
         double slope = SaturationLine.Slope(p, T);
         double dvLiquid = Liquid.vp + (Liquid.vT * slope), dvVapour = Vapour.vp + (Vapour.vT * slope);

@@ -95,6 +95,18 @@ public sealed class WaterFluid : Fluid
         return FromTX(RootFinder.Find(Excess, low, high, atLow, atHigh), x, out singlePhaseSide) == Outcome.Ok;
     }
 
+    internal override bool TryWetSideSpeedOfSound(in FluidState at, out double w)
+    {
+        w = 0;
+        if (at.Phase is not (Phase.SaturatedLiquid or Phase.SaturatedVapour)) return false;
+        var pair = SaturatedPair.At(at.p, at.T);
+
+        // At the critical point there is no wet side.
+        if (!(pair.Vapour.v > pair.Liquid.v)) return false;
+        w = pair.SpeedOfSound(at.x, at.v);
+        return true;
+    }
+
     internal override RangeViolation Explain(Outcome outcome, StatePair pair, double first, double second) =>
         WaterRange.Explain(outcome, pair, first, second);
 
