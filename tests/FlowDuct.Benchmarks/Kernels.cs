@@ -1,4 +1,5 @@
 using System.Diagnostics;
+using FlowDuct.Flow;
 using FlowDuct.Fluids;
 using FlowDuct.Fluids.Gases;
 using FlowDuct.Fluids.Water;
@@ -21,6 +22,7 @@ internal static class Kernels
         ("FromPS", PS),
         ("FromHS", HS),
         ("FromPRho", PRho),
+        ("NormalShock", Shock),
     ];
 
     internal static int Run(string[] args)
@@ -149,6 +151,18 @@ internal static class Kernels
         {
             fluid.FromPRho(at.p, at.rho, out FluidState got);
             sum += got.w;
+        }
+
+        return sum;
+    }
+
+    private static double Shock(Fluid fluid, FluidState[] states)
+    {
+        double sum = 0;
+        foreach (ref readonly FluidState at in states.AsSpan())
+        {
+            NormalShock.TryFind(fluid, at, 1.5 * at.w, out FluidState got, out double V2);
+            sum += got.w + V2;
         }
 
         return sum;
