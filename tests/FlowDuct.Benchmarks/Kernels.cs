@@ -11,6 +11,7 @@ internal static class Kernels
 {
     private const int States = 1024;
     private const int Sweeps = 64;
+    private const int Slow = 16;
 
     /// <summary>Calls one property function over prepared states and returns a sum, so that nothing is optimised away.</summary>
     private delegate double Kernel(Fluid fluid, FluidState[] states);
@@ -23,6 +24,9 @@ internal static class Kernels
         ("FromHS", HS),
         ("FromPRho", PRho),
         ("NormalShock", Shock),
+        ("ObliqueToPressure", Oblique),
+        ("LargestDeflection", Deflection),
+        ("PrandtlMeyer", Fan),
     ];
 
     internal static int Run(string[] args)
@@ -41,7 +45,7 @@ internal static class Kernels
             {
                 foreach ((string name, Kernel kernel) in Calls)
                 {
-                    double ns = Time(kernel, fluid, states, ref sink);
+                    double ns = Time(kernel, fluid, states, ref sink) * (name is "LargestDeflection" or "PrandtlMeyer" ? Slow : 1);
                     if (round >= 0)
                         Of(times, (fluid.Name, name)).Add(ns);
                 }
@@ -163,6 +167,44 @@ internal static class Kernels
         {
             NormalShock.TryFind(fluid, at, 1.5 * at.w, out FluidState got, out double V2);
             sum += got.w + V2;
+        }
+
+        return sum;
+    }
+
+    private static double Oblique(Fluid fluid, FluidState[] states)
+    {
+        double sum = 0;
+        foreach (ref readonly FluidState at in states.AsSpan())
+        {
+            ObliqueShock.TryToPressure(fluid, at, 2 * at.w, 1.5 * at.p, out ObliqueWave wave);
+            sum += wave.Theta;
+        }
+
+        return sum;
+    }
+
+    // Slow members: every sixteenth state, counted as such.
+    private static double Deflection(Fluid fluid, FluidState[] states)
+    {
+        double sum = 0;
+        for (int i = 0; i < states.Length; i += Slow)
+        {
+            ObliqueShock.TryLargestDeflection(fluid, states[i], 1.5 * states[i].w, out ObliqueWave wave);
+            sum += wave.Theta;
+        }
+
+        return sum;
+    }
+
+    private static double Fan(Fluid fluid, FluidState[] states)
+    {
+        double sum = 0;
+        for (int i = 0; i < states.Length; i += Slow)
+        {
+            ref readonly FluidState at = ref states[i];
+            PrandtlMeyer.TryTurning(fluid, at.h + (1.2 * at.w * at.w), at.s, at.p, 0.5 * at.p, out double nu);
+            sum += nu;
         }
 
         return sum;
