@@ -1,4 +1,5 @@
 using System.Diagnostics;
+using FlowDuct.Flow;
 using FlowDuct.Fluids;
 using FlowDuct.Fluids.Gases;
 using FlowDuct.Fluids.Water;
@@ -10,6 +11,7 @@ internal static class Kernels
 {
     private const int States = 1024;
     private const int Sweeps = 64;
+    private const int Slow = 16;
 
     /// <summary>Calls one property function over prepared states and returns a sum, so that nothing is optimised away.</summary>
     private delegate double Kernel(Fluid fluid, FluidState[] states);
@@ -21,6 +23,10 @@ internal static class Kernels
         ("FromPS", PS),
         ("FromHS", HS),
         ("FromPRho", PRho),
+        ("NormalShock", Shock),
+        ("ObliqueToPressure", Oblique),
+        ("LargestDeflection", Deflection),
+        ("PrandtlMeyer", Fan),
     ];
 
     internal static int Run(string[] args)
@@ -39,7 +45,7 @@ internal static class Kernels
             {
                 foreach ((string name, Kernel kernel) in Calls)
                 {
-                    double ns = Time(kernel, fluid, states, ref sink);
+                    double ns = Time(kernel, fluid, states, ref sink) * (name is "LargestDeflection" or "PrandtlMeyer" ? Slow : 1);
                     if (round >= 0)
                         Of(times, (fluid.Name, name)).Add(ns);
                 }
@@ -149,6 +155,56 @@ internal static class Kernels
         {
             fluid.FromPRho(at.p, at.rho, out FluidState got);
             sum += got.w;
+        }
+
+        return sum;
+    }
+
+    private static double Shock(Fluid fluid, FluidState[] states)
+    {
+        double sum = 0;
+        foreach (ref readonly FluidState at in states.AsSpan())
+        {
+            NormalShock.TryFind(fluid, at, 1.5 * at.w, out FluidState got, out double V2);
+            sum += got.w + V2;
+        }
+
+        return sum;
+    }
+
+    private static double Oblique(Fluid fluid, FluidState[] states)
+    {
+        double sum = 0;
+        foreach (ref readonly FluidState at in states.AsSpan())
+        {
+            ObliqueShock.TryToPressure(fluid, at, 2 * at.w, 1.5 * at.p, out ObliqueWave wave);
+            sum += wave.Theta;
+        }
+
+        return sum;
+    }
+
+    // Slow members: every sixteenth state, counted as such.
+    private static double Deflection(Fluid fluid, FluidState[] states)
+    {
+        double sum = 0;
+        for (int i = 0; i < states.Length; i += Slow)
+        {
+            ObliqueShock.TryLargestDeflection(fluid, states[i], 1.5 * states[i].w, out ObliqueWave wave);
+            sum += wave.Theta;
+        }
+
+        return sum;
+    }
+
+    private static double Fan(Fluid fluid, FluidState[] states)
+    {
+        double sum = 0;
+        for (int i = 0; i < states.Length; i += Slow)
+        {
+            ref readonly FluidState at = ref states[i];
+            PrandtlMeyer.TryTurning(fluid, at.h + (1.2 * at.w * at.w), at.s, at.p, 0.5 * at.p, out double nu);
+            sum += nu;
         }
 
         return sum;

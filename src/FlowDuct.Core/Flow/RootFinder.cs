@@ -14,13 +14,22 @@ internal static class RootFinder
     /// <returns>The end of the final bracket at which f is smaller in size.</returns>
     internal static double Find(Func<double, double> f, double a, double b, double fa, double fb)
     {
+        var function = new ByDelegate(f);
+        return Find(ref function, a, b, fa, fb);
+    }
+
+    /// <summary>The same for a function in a struct: no allocation.</summary>
+    /// <returns>The end of the final bracket at which f is smaller in size.</returns>
+    internal static double Find<TFunction>(ref TFunction f, double a, double b, double fa, double fb)
+        where TFunction : struct, IScalarFunction
+    {
         if (fa == 0) return a;
         double c = a, fc = fa, t = 0.5;
         double best = Math.Abs(fa) < Math.Abs(fb) ? a : b;
         for (int step = 0; step < MostSteps; step++)
         {
             double x = a + (t * (b - a));
-            double fx = f(x);
+            double fx = f.At(x);
             if (Math.Sign(fx) == Math.Sign(fa)) (c, fc) = (a, fa);
             else (c, fc, b, fb) = (b, fb, a, fa);
             (a, fa) = (x, fx);
@@ -40,5 +49,10 @@ internal static class RootFinder
         bool smooth = 1 - Math.Sqrt(1 - xi) < phi && phi < Math.Sqrt(xi);
         if (!smooth) return 0.5;
         return (fa / (fb - fa) * fc / (fb - fc)) + ((c - a) / (b - a) * fa / (fc - fa) * fb / (fc - fb));
+    }
+
+    private readonly struct ByDelegate(Func<double, double> f) : IScalarFunction
+    {
+        public double At(double x) => f(x);
     }
 }
