@@ -242,14 +242,17 @@ string Tables()
 {
     string[] names =
     [
-        "region4", "b23", "b2bc", "h3ab",
+        "region4", "b23", "b2bc", "h3ab", "viscosity_h0", "viscosity_h1", "conductivity_l0", "conductivity_l1", "conductivity_zeta",
+        "melting_ih", "sublimation",
     ];
     StringBuilder code = Head("The coefficient tables that loops walk, in printed order").Append("internal static class WaterTables\n{\n");
     foreach (string name in names)
     {
         List<Term> terms = Read(name);
         string word = string.Concat(name.Split('_').Select(part => char.ToUpperInvariant(part[0]) + part[1..]));
-        if (terms.Any(t => t.I != 0)) Span(code, "sbyte", word + "I", terms.Select(t => ((int)t.I).ToString(CultureInfo.InvariantCulture)));
+        bool whole = terms.All(t => t.I == Math.Floor(t.I));
+        if (!whole) Span(code, "double", word + "I", terms.Select(t => t.I.ToString("R", CultureInfo.InvariantCulture)));
+        else if (terms.Any(t => t.I != 0)) Span(code, "sbyte", word + "I", terms.Select(t => ((int)t.I).ToString(CultureInfo.InvariantCulture)));
         if (terms.Any(t => t.J != 0)) Span(code, "sbyte", word + "J", terms.Select(t => ((int)t.J).ToString(CultureInfo.InvariantCulture)));
         Span(code, "double", word + "N", terms.Select(t => Literal(t.N)));
     }

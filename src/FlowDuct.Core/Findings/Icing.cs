@@ -4,7 +4,7 @@ using FlowDuct.Quantities;
 
 namespace FlowDuct.Findings;
 
-/// <summary>Water below its triple point: at equilibrium there would be ice.</summary>
+/// <summary>Water where ice is stable, or so thin that what condenses from it is ice.</summary>
 internal static class Icing
 {
     // IAPWS R7-97(2012), Eq. (9): triple point of water.
@@ -12,8 +12,15 @@ internal static class Icing
 
     internal static Finding? Check(Fluid fluid, IStations stations)
     {
-        StationAnswer? cold = stations.StationWith(Notices.BelowTriplePoint);
-        return cold is null ? null : new Finding("icing", Severity.Caution, cold.State.p, TriplePressure, "IAPWS R7-97(2012)", text =>
-            $"below the triple point ({text.Text(TriplePressure, Dimension.Pressure)}, {text.Text(273.16, Dimension.Temperature)}) ice forms at equilibrium; the answer is vapour that does not freeze");
+        if (stations.StationWith(Notices.Ice) is StationAnswer frozen)
+        {
+            return new Finding("icing", Severity.Caution, frozen.State.T, 273.16, "IAPWS R14-08(2011)", text =>
+                $"at {text.Text(frozen.State.T, Dimension.Temperature, 5)} and this pressure ice is the stable phase; the answer is water that does not freeze");
+        }
+
+        return stations.StationWith(Notices.BelowTriplePoint) is StationAnswer thin
+            ? new Finding("icing", Severity.Note, thin.State.p, TriplePressure, "IAPWS R7-97(2012)", text =>
+                $"{text.Text(thin.State.p, Dimension.Pressure, 4)} lies below the triple-point pressure {text.Text(TriplePressure, Dimension.Pressure, 4)}: what condenses at it is ice")
+            : null;
     }
 }

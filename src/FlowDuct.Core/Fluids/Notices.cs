@@ -16,9 +16,12 @@ public enum Notices
     /// <summary>The pair falls into a gap between two regions and is served by the cooler region's equation past its edge.</summary>
     RegionGap = 4,
 
-    /// <summary>Below the triple-point pressure or temperature: at equilibrium there would be ice.</summary>
+    /// <summary>Below the triple-point pressure: what condenses from here is ice.</summary>
     BelowTriplePoint = 8,
 
     /// <summary>So near the critical point that derivatives lose digits.</summary>
     NearCritical = 16,
+
+    /// <summary>Ice is the stable phase here; the state is one that does not freeze.</summary>
+    Ice = 32,
 }

@@ -51,7 +51,8 @@ internal static class NoticesOf
 
     internal static Notices State(double p, double T)
     {
-        Notices notices = T < WaterConstants.Tt ? Notices.BelowTriplePoint : Notices.None;
+        Notices notices = p < IceLine.TriplePressure ? Notices.BelowTriplePoint : Notices.None;
+        if (T < WaterConstants.Tt && IceLine.Holds(p, T)) notices |= Notices.Ice;
         bool near = Math.Abs(T - WaterConstants.Tc) < NearT && Math.Abs(p - WaterConstants.pc) < NearP * WaterConstants.pc;
         return near ? notices | Notices.NearCritical : notices;
     }

@@ -107,6 +107,27 @@ public sealed class WaterFluid : Fluid
         return true;
     }
 
+    internal override bool TryTransport(in FluidState at, out Transport transport)
+    {
+        transport = default;
+        if (!at.HasHeatCapacities || !(at.T <= Viscosity.MostT) || CheckPT(at.p, at.T) != Outcome.Ok) return false;
+        RegionState one = at.Phase switch
+        {
+            Phase.SaturatedLiquid => SaturatedPair.LiquidAt(at.p, at.T),
+            Phase.SaturatedVapour => SaturatedPair.VapourAt(at.p, at.T),
+            _ => RegionAt(at.p, at.T, out _),
+        };
+        double mu = Viscosity.Of(one.T, 1 / one.v);
+        transport = new Transport(mu, ThermalConductivity.Of(one, mu));
+        return true;
+    }
+
+    internal override bool TrySurfaceTension(double T, out double sigma)
+    {
+        sigma = SurfaceTension.Of(T);
+        return T >= WaterConstants.TLeast && T <= WaterConstants.Tc;
+    }
+
     internal override RangeViolation Explain(Outcome outcome, StatePair pair, double first, double second) =>
         WaterRange.Explain(outcome, pair, first, second);
 

@@ -140,14 +140,21 @@ public class InverseTests
         Assert.True(double.IsFinite(violation.Limit));
     }
 
-    // Below the triple-point pressure only vapour lies in the range; it says that ice would form only where it is that cold.
-    [Fact]
-    public void Thin_cold_vapour_is_region_2()
+    // Below the triple-point pressure only vapour lies in the range, and what condenses from it is ice. IAPWS R14-08(2011): at 273.15 K
+    // ice stands between 611.15 Pa (sublimation) and about 1.3 bar (melting).
+    [Theory]
+    [InlineData(300, 273.155, Notices.BelowTriplePoint)]
+    [InlineData(300, 300, Notices.BelowTriplePoint)]
+    [InlineData(612, 274, Notices.None)]
+    [InlineData(1e5, 273.15, Notices.Ice)]
+    [InlineData(1.25e5, 273.15, Notices.Ice)]
+    [InlineData(1.4e5, 273.15, Notices.None)]
+    [InlineData(1e5, 273.1551, Notices.None)]
+    [InlineData(611.3, 273.15, Notices.BelowTriplePoint | Notices.Ice)]
+    public void Cold_water_says_where_ice_is_stable(double p, double T, Notices notices)
     {
-        Assert.Equal(Outcome.Ok, s_water.FromPT(300, 273.155, out FluidState cold));
-        Assert.Equal(Notices.BelowTriplePoint, cold.Notices);
-        Assert.Equal(Outcome.Ok, s_water.FromPT(300, 300, out FluidState warm));
-        Assert.Equal(Notices.None, warm.Notices);
+        Assert.Equal(Outcome.Ok, s_water.FromPT(p, T, out FluidState state));
+        Assert.Equal(notices, state.Notices);
     }
 
     // In cold water one density belongs to two temperatures: the warmer one is the documented answer.
