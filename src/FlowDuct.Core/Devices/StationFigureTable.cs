@@ -15,7 +15,7 @@ internal static class StationFigureTable
         ("s", (_, at) => at.HasState ? at.State.s : null),
         ("u", (_, at) => at.HasState ? at.State.u : null),
         ("rho", (_, at) => at.HasState ? at.State.rho : null),
-        ("cp", (_, at) => at.State.HasHeatCapacities ? at.State.cp : null),
+        ("cp", (_, at) => at.State.HasIsobaricHeatCapacity ? at.State.cp : null),
         ("cv", (_, at) => at.State.HasHeatCapacities ? at.State.cv : null),
         ("w", (_, at) => at.HasState ? at.State.w : null),
         ("V", (_, at) => at.Velocity),
@@ -49,7 +49,7 @@ internal static class StationFigureTable
     }
 
     private static Transport? TransportOf(Fluid fluid, StationAnswer at) =>
-        at.HasState && at.State.HasHeatCapacities && fluid.TryTransport(at.State, out Transport transport) ? transport : null;
+        at.HasState && at.State.HasIsobaricHeatCapacity && fluid.TryTransport(at.State, out Transport transport) ? transport : null;
 
     private static double? Superheat(Fluid fluid, StationAnswer at) =>
         at.HasState && !at.State.HasQuality && fluid.TrySaturationTemperature(at.State.p, out double T) ? at.State.T - T : null;

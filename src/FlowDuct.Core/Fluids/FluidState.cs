@@ -50,6 +50,9 @@ public readonly struct FluidState
     /// <summary>True where heat capacities exist (everywhere but between the saturation lines).</summary>
     public bool HasHeatCapacities => Phase is not (Phase.Wet or Phase.None);
 
+    /// <summary>True where cp is a number: not between the saturation lines, and not at the critical point, where it has no bound.</summary>
+    public bool HasIsobaricHeatCapacity => HasHeatCapacities && cp > 0 && cp < 1e10;
+
     /// <summary>Density, kg/m3.</summary>
     internal double rho => 1 / v;
 

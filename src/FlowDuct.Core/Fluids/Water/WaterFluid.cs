@@ -110,7 +110,7 @@ public sealed class WaterFluid : Fluid
     internal override bool TryTransport(in FluidState at, out Transport transport)
     {
         transport = default;
-        if (!at.HasHeatCapacities || !(at.T <= Viscosity.MostT) || CheckPT(at.p, at.T) != Outcome.Ok) return false;
+        if (!at.HasIsobaricHeatCapacity || !(at.T <= Viscosity.MostT) || CheckPT(at.p, at.T) != Outcome.Ok) return false;
         RegionState one = at.Phase switch
         {
             Phase.SaturatedLiquid => SaturatedPair.LiquidAt(at.p, at.T),
