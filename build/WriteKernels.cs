@@ -168,21 +168,28 @@ string Tables()
     [
         "region2_ideal", "region2_metastable_ideal", "region2_metastable_residual", "region3", "region4", "region5_ideal", "region5_residual",
         "b23", "b2bc", "h3ab", "region3a_T_ph", "region3b_T_ph", "region3a_v_ph", "region3b_v_ph", "region3a_T_ps", "region3b_T_ps",
-        "region3a_v_ps", "region3b_v_ps",
+        "region3a_v_ps", "region3b_v_ps", "region1_p_hs", "h2ab", "region2a_p_hs", "region2b_p_hs", "region2c_p_hs", "region3_psat_h",
+        "region3_psat_s", "region3a_p_hs", "region3b_p_hs", "hsat_liq_1_s", "hsat_liq_3a_s", "hsat_vap_2ab_s", "hsat_vap_2c3b_s", "hB13_s",
+        "TB23_hs", "Tsat_hs",
     ];
     StringBuilder code = Head("The coefficient tables that loops walk, in printed order").Append("internal static class WaterTables\n{\n");
     foreach (string name in names)
     {
         List<Term> terms = Read(name);
         string word = string.Concat(name.Split('_').Select(part => char.ToUpperInvariant(part[0]) + part[1..]));
-        if (terms.Any(t => t.I != 0)) Span(code, "sbyte", word + "I", terms.Select(t => ((int)t.I).ToString(CultureInfo.InvariantCulture)));
-        if (terms.Any(t => t.J != 0)) Span(code, "sbyte", word + "J", terms.Select(t => ((int)t.J).ToString(CultureInfo.InvariantCulture)));
+        if (terms.Any(t => t.I != 0)) Span(code, "sbyte", word + "I", terms.Select(t => Whole(t.I)));
+        if (terms.Any(t => t.J != 0)) Span(code, "sbyte", word + "J", terms.Select(t => Whole(t.J)));
         Span(code, "double", word + "N", terms.Select(t => Literal(t.N)));
     }
 
     code.Length -= 1;
     return code.Append("}\n").ToString();
 }
+
+// A table that needs more than a whole power of one byte must not lose it here unseen.
+string Whole(double exponent) => exponent == (sbyte)exponent
+    ? ((sbyte)exponent).ToString(CultureInfo.InvariantCulture)
+    : throw new InvalidDataException($"exponent {exponent} is no whole number of one byte");
 
 void Span(StringBuilder code, string type, string name, IEnumerable<string> values) =>
     code.Append($"    internal static ReadOnlySpan<{type}> {name} => [{string.Join(", ", values)}];\n\n");
