@@ -15,6 +15,7 @@ Write("Region1Kernel.g.cs", Gibbs("Region1Kernel", "region1", "IAPWS R7-97(2012)
 Write("Region2Kernel.g.cs", Gibbs("Region2Kernel", "region2_residual", "IAPWS R7-97(2012), Eq. (17); x = pi, y = tau - 0.5"));
 Write("BackwardKernels.g.cs", Backward());
 Write("WaterTables.g.cs", Tables());
+Write("Region3VolumeTables.g.cs", Volume());
 return same ? 0 : 1;
 
 string FindRoot()
@@ -38,12 +39,18 @@ void Write(string name, string text)
     Console.Error.WriteLine($"{name} differs from its tables; run: dotnet run build/WriteKernels.cs");
 }
 
-List<Term> Read(string table)
+(string[] Heads, string[][] Rows) Cells(string table)
 {
     string[] lines = [.. File.ReadLines(Path.Combine(water, "Coefficients", table + ".csv")).Where(line => line.Length > 0 && line[0] != '#')];
-    string[] heads = lines[0].Split(',');
+    return (lines[0].Split(','), [.. lines.Skip(1).Select(line => line.Split(','))]);
+}
+
+List<Term> Read(string table) => Terms(Cells(table).Heads, Cells(table).Rows);
+
+List<Term> Terms(string[] heads, IEnumerable<string[]> rows)
+{
     int i = Array.IndexOf(heads, "I"), j = Array.IndexOf(heads, "J"), n = Array.IndexOf(heads, "n");
-    return [.. lines.Skip(1).Select(line => line.Split(',')).Select(cells => new Term(Exponent(cells, i), Exponent(cells, j), cells[n]))];
+    return [.. rows.Select(cells => new Term(Exponent(cells, i), Exponent(cells, j), cells[n]))];
 }
 
 double Exponent(string[] cells, int column) =>
@@ -185,6 +192,37 @@ string Tables()
     code.Length -= 1;
     return code.Append("}\n").ToString();
 }
+
+// The rows of all subregions follow each other; First says where each begins, and a last entry where all end.
+string Volume()
+{
+    (string[] heads, string[][] rows) = Cells("region3_v_pT");
+    (string[] names, string[][] parameters) = Cells("region3_v_pT_parameters");
+    List<Term> terms = Terms(heads, rows);
+    StringBuilder code = Head("v(p,T) of region 3 and its subregions, SR5-05(2016), in printed order").Append("internal static class Region3VolumeTables\n{\n");
+    Span(code, "short", "First", parameters.Select(cells => First(rows, cells[0])).Append(rows.Length).Select(row => row.ToString(CultureInfo.InvariantCulture)));
+    Span(code, "sbyte", "I", terms.Select(t => Whole(t.I)));
+    Span(code, "sbyte", "J", terms.Select(t => Whole(t.J)));
+    Span(code, "double", "N", terms.Select(t => Literal(t.N)));
+    foreach ((string name, string column) in new[] { ("VStar", "v_star_m3_per_kg"), ("PStar", "p_star_MPa"), ("TStar", "T_star_K"), ("A", "a"), ("B", "b") })
+        Span(code, "double", name, parameters.Select(cells => Literal(cells[Array.IndexOf(names, column)])));
+
+    // Roots and powers as whole numbers; the exponential form has none of them and is marked by a power of 0.
+    foreach ((string name, string column) in new[] { ("RootP", "c"), ("RootT", "d") })
+        Span(code, "byte", name, parameters.Select(cells => Inverse(cells[Array.IndexOf(names, column)])));
+    Span(code, "byte", "Power", parameters.Select(cells => cells[Array.IndexOf(names, "e")] is { Length: > 0 } e ? e : "0"));
+    (string[] edgeHeads, string[][] edges) = Cells("region3_v_pT_boundaries");
+    foreach (IGrouping<string, string[]> edge in edges.GroupBy(cells => cells[0]))
+        Span(code, "double", "Edge" + edge.Key[1..], Terms(edgeHeads, edge).Select(t => Literal(t.N)));
+    code.Length -= 1;
+    return code.Append("}\n").ToString();
+}
+
+int First(string[][] rows, string subregion) => Array.FindIndex(rows, cells => cells[0] == subregion);
+
+string Inverse(string printed) => printed.Length == 0
+    ? "1"
+    : (1 / double.Parse(printed, CultureInfo.InvariantCulture)).ToString(CultureInfo.InvariantCulture);
 
 // A table that needs more than a whole power of one byte must not lose it here unseen.
 string Whole(double exponent) => exponent == (sbyte)exponent
