@@ -19,6 +19,7 @@ Write("MetastableKernel.g.cs", Kernel(
     "MetastableKernel", "region2_metastable_residual", "region2_metastable_ideal", Sums.All, Sums.None, "IAPWS R7-97(2012), Eqs. (16), (19); x = pi, y = tau - 0.5"));
 Write("BackwardKernels.g.cs", Backward());
 Write("WaterTables.g.cs", Tables());
+Write("Region3VolumeTables.g.cs", Volume());
 return same ? 0 : 1;
 
 string FindRoot()
@@ -42,12 +43,18 @@ void Write(string name, string text)
     Console.Error.WriteLine($"{name} differs from its tables; run: dotnet run build/WriteKernels.cs");
 }
 
-List<Term> Read(string table)
+(string[] Heads, string[][] Rows) Cells(string table)
 {
     string[] lines = [.. File.ReadLines(Path.Combine(water, "Coefficients", table + ".csv")).Where(line => line.Length > 0 && line[0] != '#')];
-    string[] heads = lines[0].Split(',');
+    return (lines[0].Split(','), [.. lines.Skip(1).Select(line => line.Split(','))]);
+}
+
+List<Term> Read(string table) => Terms(Cells(table).Heads, Cells(table).Rows);
+
+List<Term> Terms(string[] heads, IEnumerable<string[]> rows)
+{
     int i = Array.IndexOf(heads, "I"), j = Array.IndexOf(heads, "J"), n = Array.IndexOf(heads, "n");
-    return [.. lines.Skip(1).Select(line => line.Split(',')).Select(cells => new Term(Exponent(cells, i), Exponent(cells, j), cells[n]))];
+    return [.. rows.Select(cells => new Term(Exponent(cells, i), Exponent(cells, j), cells[n]))];
 }
 
 double Exponent(string[] cells, int column) =>
@@ -251,7 +258,9 @@ string Tables()
 {
     string[] names =
     [
-        "region4", "b23", "b2bc", "h3ab", "viscosity_h0", "viscosity_h1", "conductivity_l0", "conductivity_l1", "conductivity_zeta",
+        "region4", "b23", "b2bc", "h3ab", "region1_p_hs", "h2ab", "region2a_p_hs", "region2b_p_hs", "region2c_p_hs", "region3_psat_h",
+        "region3_psat_s", "region3a_p_hs", "region3b_p_hs", "hsat_liq_1_s", "hsat_liq_3a_s", "hsat_vap_2ab_s", "hsat_vap_2c3b_s", "hB13_s",
+        "TB23_hs", "Tsat_hs", "viscosity_h0", "viscosity_h1", "conductivity_l0", "conductivity_l1", "conductivity_zeta",
         "melting_ih", "sublimation",
     ];
     StringBuilder code = Head("The coefficient tables that loops walk, in printed order").Append("internal static class WaterTables\n{\n");
@@ -261,14 +270,50 @@ string Tables()
         string word = string.Concat(name.Split('_').Select(part => char.ToUpperInvariant(part[0]) + part[1..]));
         bool whole = terms.All(t => t.I == Math.Floor(t.I));
         if (!whole) Span(code, "double", word + "I", terms.Select(t => t.I.ToString("R", CultureInfo.InvariantCulture)));
-        else if (terms.Any(t => t.I != 0)) Span(code, "sbyte", word + "I", terms.Select(t => ((int)t.I).ToString(CultureInfo.InvariantCulture)));
-        if (terms.Any(t => t.J != 0)) Span(code, "sbyte", word + "J", terms.Select(t => ((int)t.J).ToString(CultureInfo.InvariantCulture)));
+        else if (terms.Any(t => t.I != 0)) Span(code, "sbyte", word + "I", terms.Select(t => Whole(t.I)));
+        if (terms.Any(t => t.J != 0)) Span(code, "sbyte", word + "J", terms.Select(t => Whole(t.J)));
         Span(code, "double", word + "N", terms.Select(t => Literal(t.N)));
     }
 
     code.Length -= 1;
     return code.Append("}\n").ToString();
 }
+
+// The rows of all subregions follow each other; First says where each begins, and a last entry where all end.
+string Volume()
+{
+    (string[] heads, string[][] rows) = Cells("region3_v_pT");
+    (string[] names, string[][] parameters) = Cells("region3_v_pT_parameters");
+    List<Term> terms = Terms(heads, rows);
+    StringBuilder code = Head("v(p,T) of region 3 and its subregions, SR5-05(2016), in printed order").Append("internal static class Region3VolumeTables\n{\n");
+    Span(code, "short", "First", parameters.Select(cells => First(rows, cells[0])).Append(rows.Length).Select(row => row.ToString(CultureInfo.InvariantCulture)));
+    Span(code, "sbyte", "I", terms.Select(t => Whole(t.I)));
+    Span(code, "sbyte", "J", terms.Select(t => Whole(t.J)));
+    Span(code, "double", "N", terms.Select(t => Literal(t.N)));
+    foreach ((string name, string column) in new[] { ("VStar", "v_star_m3_per_kg"), ("PStar", "p_star_MPa"), ("TStar", "T_star_K"), ("A", "a"), ("B", "b") })
+        Span(code, "double", name, parameters.Select(cells => Literal(cells[Array.IndexOf(names, column)])));
+
+    // Roots and powers as whole numbers; the exponential form has none of them and is marked by a power of 0.
+    foreach ((string name, string column) in new[] { ("RootP", "c"), ("RootT", "d") })
+        Span(code, "byte", name, parameters.Select(cells => Inverse(cells[Array.IndexOf(names, column)])));
+    Span(code, "byte", "Power", parameters.Select(cells => cells[Array.IndexOf(names, "e")] is { Length: > 0 } e ? e : "0"));
+    (string[] edgeHeads, string[][] edges) = Cells("region3_v_pT_boundaries");
+    foreach (IGrouping<string, string[]> edge in edges.GroupBy(cells => cells[0]))
+        Span(code, "double", "Edge" + edge.Key[1..], Terms(edgeHeads, edge).Select(t => Literal(t.N)));
+    code.Length -= 1;
+    return code.Append("}\n").ToString();
+}
+
+int First(string[][] rows, string subregion) => Array.FindIndex(rows, cells => cells[0] == subregion);
+
+string Inverse(string printed) => printed.Length == 0
+    ? "1"
+    : (1 / double.Parse(printed, CultureInfo.InvariantCulture)).ToString(CultureInfo.InvariantCulture);
+
+// A table that needs more than a whole power of one byte must not lose it here unseen.
+string Whole(double exponent) => exponent == (sbyte)exponent
+    ? ((sbyte)exponent).ToString(CultureInfo.InvariantCulture)
+    : throw new InvalidDataException($"exponent {exponent} is no whole number of one byte");
 
 void Span(StringBuilder code, string type, string name, IEnumerable<string> values) =>
     code.Append($"    internal static ReadOnlySpan<{type}> {name} => [{string.Join(", ", values)}];\n\n");

@@ -3,6 +3,7 @@ using FlowDuct.Benchmarks;
 return args switch
 {
     ["kernels", .. string[] rest] => Kernels.Run(rest),
+    ["backward", .. string[] rest] => Backward.Run(rest),
     ["startup", .. string[] rest] => Startup.Run(rest),
     _ => Usage(),
 };
@@ -12,6 +13,7 @@ static int Usage()
     Console.Error.WriteLine("""
         Timings of FlowDuct; results are CSV with the machine and the versions on top.
           kernels [--output FILE]                              ns per property call, one thread
+          backward [--output FILE]                             ns per call of the supplementary water equations
           startup [--runs N] --output FILE COMMAND [COMMAND]   whole processes, interleaved; the first command is the baseline
         Quote ratios from one run, never absolute times from two.
         """);

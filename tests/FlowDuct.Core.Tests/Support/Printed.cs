@@ -5,7 +5,7 @@ namespace FlowDuct.Core.Tests.Support;
 /// <summary>A number as a table prints it: its value and half a unit of its last printed digit.</summary>
 public readonly record struct Printed(double Value, double HalfDigit)
 {
-    /// <summary>Reads a number such as 29.0344, -125.5297 or 0.100215168E-02.</summary>
+    /// <summary>Reads a decimal number such as 29.0344 or -125.5297, with or without a power of ten as in 0.100215168E-02.</summary>
     public static Printed Parse(string text)
     {
         int e = text.IndexOfAny(['E', 'e']);

@@ -34,7 +34,7 @@ internal static class ThermalConductivity
 
     /// <summary>lambda1 of reduced temperature and density, Eq. (17).</summary>
     internal static double Dense(double t, double delta) => Math.Exp(
-        delta * TwoPowers.Sum((1 / t) - 1, delta - 1, WaterTables.ConductivityL1I, WaterTables.ConductivityL1J, WaterTables.ConductivityL1N));
+        delta * PowerSum.Of((1 / t) - 1, delta - 1, WaterTables.ConductivityL1I, WaterTables.ConductivityL1J, WaterTables.ConductivityL1N));
 
     /// <summary>lambda2, Eq. (18): zeta is the reduced (drho/dp) at constant T, cp and mu reduced.</summary>
     internal static double Critical(double t, double delta, double cp, double kappa, double zeta, double mu)

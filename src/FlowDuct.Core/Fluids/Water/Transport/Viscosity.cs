@@ -14,7 +14,7 @@ internal static class Viscosity
     internal static double Of(double T, double rho)
     {
         double t = T / WaterConstants.Tc, delta = rho / WaterConstants.rhoc;
-        return Dilute(t) * Math.Exp(delta * TwoPowers.Sum((1 / t) - 1, delta - 1, WaterTables.ViscosityH1I, WaterTables.ViscosityH1J, WaterTables.ViscosityH1N)) * 1e-6;
+        return Dilute(t) * Math.Exp(delta * PowerSum.Of((1 / t) - 1, delta - 1, WaterTables.ViscosityH1I, WaterTables.ViscosityH1J, WaterTables.ViscosityH1N)) * 1e-6;
     }
 
     // Eq. (11): the limit of zero density.
