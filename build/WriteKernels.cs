@@ -20,6 +20,7 @@ Write("MetastableKernel.g.cs", Kernel(
 Write("BackwardKernels.g.cs", Backward());
 Write("WaterTables.g.cs", Tables());
 Write("Region3VolumeTables.g.cs", Volume());
+Write("Region3VolumeKernels.g.cs", VolumeKernels());
 return same ? 0 : 1;
 
 string FindRoot()
@@ -240,18 +241,24 @@ string Backward()
         code.Append($"    /// <summary>{source}.</summary>\n    internal static double {name}(double x, double y)\n    {{\n");
         Powers(code, "x", terms.Select(t => (int)t.I));
         Powers(code, "y", terms.Select(t => (int)t.J));
-        code.Append("        double sum = 0;\n");
-        foreach (IGrouping<double, Term> group in terms.GroupBy(t => t.I))
-        {
-            string inner = string.Join(" + ", group.Select(t => $"({Literal(t.N)}{Times("y", (int)t.J)})"));
-            code.Append($"        sum += ({inner}){Times("x", (int)group.Key)};\n");
-        }
-
-        code.Append("        return sum;\n    }\n\n");
+        Plain(code, terms);
     }
 
     code.Length -= 1;
     return code.Append("}\n").ToString();
+}
+
+// The sum alone, terms of one power of x together.
+void Plain(StringBuilder code, List<Term> terms)
+{
+    code.Append("        double sum = 0;\n");
+    foreach (IGrouping<double, Term> group in terms.GroupBy(t => t.I))
+    {
+        string inner = string.Join(" + ", group.Select(t => $"({Literal(t.N)}{Times("y", (int)t.J)})"));
+        code.Append($"        sum += ({inner}){Times("x", (int)group.Key)};\n");
+    }
+
+    code.Append("        return sum;\n    }\n\n");
 }
 
 string Tables()
@@ -282,14 +289,8 @@ string Tables()
 // The rows of all subregions follow each other; First says where each begins, and a last entry where all end.
 string Volume()
 {
-    (string[] heads, string[][] rows) = Cells("region3_v_pT");
     (string[] names, string[][] parameters) = Cells("region3_v_pT_parameters");
-    List<Term> terms = Terms(heads, rows);
-    StringBuilder code = Head("v(p,T) of region 3 and its subregions, SR5-05(2016), in printed order").Append("internal static class Region3VolumeTables\n{\n");
-    Span(code, "short", "First", parameters.Select(cells => First(rows, cells[0])).Append(rows.Length).Select(row => row.ToString(CultureInfo.InvariantCulture)));
-    Span(code, "sbyte", "I", terms.Select(t => Whole(t.I)));
-    Span(code, "sbyte", "J", terms.Select(t => Whole(t.J)));
-    Span(code, "double", "N", terms.Select(t => Literal(t.N)));
+    StringBuilder code = Head("Parameters and edges of the subregions of v(p,T) in region 3, SR5-05(2016), in printed order").Append("internal static class Region3VolumeTables\n{\n");
     foreach ((string name, string column) in new[] { ("VStar", "v_star_m3_per_kg"), ("PStar", "p_star_MPa"), ("TStar", "T_star_K"), ("A", "a"), ("B", "b") })
         Span(code, "double", name, parameters.Select(cells => Literal(cells[Array.IndexOf(names, column)])));
 
@@ -304,7 +305,28 @@ string Volume()
     return code.Append("}\n").ToString();
 }
 
-int First(string[][] rows, string subregion) => Array.FindIndex(rows, cells => cells[0] == subregion);
+string VolumeKernels()
+{
+    (string[] heads, string[][] rows) = Cells("region3_v_pT");
+    StringBuilder code = Head("The sums of v(p,T) in the subregions of region 3, SR5-05(2016), Eqs. (4), (5)").Append("internal static class Region3VolumeKernels\n{\n");
+    code.Append("    /// <summary>The sum of subregion k, 0 for 3a to 25 for 3z.</summary>\n    internal static double Sum(int k, double x, double y) => k switch\n    {\n");
+    string[] subregions = [.. rows.Select(cells => cells[0]).Distinct()];
+    for (int k = 0; k < subregions.Length; k++) code.Append($"        {(k == subregions.Length - 1 ? "_" : k.ToString(CultureInfo.InvariantCulture))} => {Method(subregions[k])}(x, y),\n");
+    code.Append("    };\n\n");
+    foreach (IGrouping<string, string[]> subregion in rows.GroupBy(cells => cells[0]))
+    {
+        List<Term> terms = Terms(heads, subregion);
+        code.Append($"    private static double {Method(subregion.Key)}(double x, double y)\n    {{\n");
+        Powers(code, "x", terms.Select(t => (int)t.I));
+        Powers(code, "y", terms.Select(t => (int)t.J));
+        Plain(code, terms);
+    }
+
+    code.Length -= 1;
+    return code.Append("}\n").ToString();
+
+    string Method(string subregion) => "V" + subregion;
+}
 
 string Inverse(string printed) => printed.Length == 0
     ? "1"

@@ -12,13 +12,10 @@ internal static class EnthalpyEntropy
     // A bracket this narrow holds a step, not a root: p keeps no more digits.
     private const double BracketEnd = 4e-15;
 
-    // Without a neighbour the search starts in the middle of what plants use.
-    private const double Start = 1e6;
-
     internal static Outcome Solve(double h, double s, in FluidState near, out FluidState state)
     {
         if (ColdLiquid.TrySolve(h, s, out Outcome cold, out state)) return cold;
-        double p = near.Phase != Phase.None ? near.p : Start, scale = Math.Max(Math.Abs(h), 1e3);
+        double p = near.Phase != Phase.None ? near.p : EnthalpyEntropyStart.Pressure(h, s), scale = Math.Max(Math.Abs(h), 1e3);
         (double low, double high) = (WaterConstants.pLeast, WaterConstants.pMost);
 
         // What stands at each end of the bracket: the end of the range, or a state with too little or too much enthalpy.

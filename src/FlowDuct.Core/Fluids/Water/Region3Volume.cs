@@ -14,9 +14,7 @@ internal static class Region3Volume
     {
         double x = Root((p * 1e-6 / Region3VolumeTables.PStar[k]) - Region3VolumeTables.A[k], Region3VolumeTables.RootP[k]);
         double y = Root((T / Region3VolumeTables.TStar[k]) - Region3VolumeTables.B[k], Region3VolumeTables.RootT[k]);
-        Range rows = Region3VolumeTables.First[k]..Region3VolumeTables.First[k + 1];
-        double sum = PowerSum.Of(x, y, Region3VolumeTables.I[rows], Region3VolumeTables.J[rows], Region3VolumeTables.N[rows]);
-        return Region3VolumeTables.VStar[k] * Whole(sum, Region3VolumeTables.Power[k]);
+        return Region3VolumeTables.VStar[k] * Whole(Region3VolumeKernels.Sum(k, x, y), Region3VolumeTables.Power[k]);
     }
 
     private static double Root(double x, byte root) => root switch
