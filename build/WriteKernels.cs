@@ -21,6 +21,7 @@ Write("BackwardKernels.g.cs", Backward());
 Write("WaterTables.g.cs", Tables());
 Write("Region3VolumeTables.g.cs", Volume());
 Write("Region3VolumeKernels.g.cs", VolumeKernels());
+Write(Path.Combine("Verification", "CheckRows.g.cs"), CheckRows());
 return same ? 0 : 1;
 
 string FindRoot()
@@ -105,6 +106,49 @@ string[] Names(Sums sums) => sums switch
 };
 
 string Outs(Sums sums) => "double x, double y, " + string.Join(", ", Names(sums).Select(n => "out double " + n));
+
+// The tables that selfcheck runs on the user's machine are the ones that the tests read; values of the running text are left to the tests.
+string CheckRows()
+{
+    string[] columns = ["source", "table", "equation", "input1_name", "input1_value", "input1_unit", "input2_name", "input2_value", "input2_unit", "output_name", "output_value", "output_unit"];
+    StringBuilder code = Head("Printed check values, a line each: source, table, equation, two inputs and the output with name, value and unit")
+        .Replace("namespace FlowDuct.Fluids.Water;", "namespace FlowDuct.Fluids.Water.Verification;")
+        .Append("internal static class CheckRows\n{\n    internal const string Text = \"\"\"\n");
+    foreach (string table in new[] { "if97_check", "backward_check", "transport_check" })
+    {
+        string[] lines = [.. File.ReadLines(Path.Combine(root, "tests", "reference", "water", table + ".csv")).Where(line => line.Length > 0 && line[0] != '#')];
+        List<string> heads = Quoted(lines[0]);
+        foreach (List<string> cells in lines.Skip(1).Select(Quoted))
+        {
+            if (cells[heads.IndexOf("table")].EndsWith("(text value)", StringComparison.Ordinal)) continue;
+            code.Append("        ").AppendJoin('|', columns.Select(column => cells[heads.IndexOf(column)])).Append('\n');
+        }
+    }
+
+    return code.Append("        \"\"\";\n}\n").ToString();
+}
+
+// Cells of a line in which quotes hold commas; a quote inside is doubled.
+List<string> Quoted(string line)
+{
+    List<string> cells = [];
+    StringBuilder cell = new();
+    bool quoted = false;
+    for (int i = 0; i < line.Length; i++)
+    {
+        if (line[i] == '"' && quoted && i + 1 < line.Length && line[i + 1] == '"') cell.Append(line[i++]);
+        else if (line[i] == '"') quoted = !quoted;
+        else if (line[i] != ',' || quoted) cell.Append(line[i]);
+        else
+        {
+            cells.Add(cell.ToString());
+            cell.Clear();
+        }
+    }
+
+    cells.Add(cell.ToString());
+    return cells;
+}
 
 int Count(string body) => body.Split('\n').Sum(line => line.Split(' ').Count(word => word is "*" or "+" or "+=" or "-" or "/"));
 

@@ -2,6 +2,7 @@ using FlowDuct.Cli.Rendering;
 using FlowDuct.Devices;
 using FlowDuct.Errors;
 using FlowDuct.Findings;
+using FlowDuct.Fluids.Water.Verification;
 
 namespace FlowDuct.Cli.CommandLine;
 
@@ -46,9 +47,19 @@ internal static class Application
         {
             CommandName.Fluids => Text(memory, Listings.Fluids),
             CommandName.Units => Text(memory, to => Listings.Units(to, arguments.Words)),
+            CommandName.SelfCheck => SelfCheck(arguments, memory),
             CommandName.State => State(arguments, memory, terminal),
             _ => Device(arguments, memory, terminal),
         };
+    }
+
+    private static int SelfCheck(Arguments arguments, MemoryStream memory)
+    {
+        bool json = RenderBinder.WantsJson(new CaseBinder(arguments)), quiet = arguments.Has("--quiet");
+        IReadOnlyList<CheckResult> results = CheckResult.Run();
+        if (json) SelfCheckJson.Write(memory, results);
+        else Text(memory, to => SelfCheckText.Write(to, results, quiet));
+        return results.All(result => result.Met) ? ExitStatus.Passed : ExitStatus.Failed;
     }
 
     private static int State(Arguments arguments, MemoryStream memory, bool terminal)

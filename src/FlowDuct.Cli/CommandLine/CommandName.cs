@@ -22,6 +22,9 @@ internal enum CommandName
     /// <summary>The list of units.</summary>
     Units = 16,
 
+    /// <summary>The printed check values of the formulations, computed here.</summary>
+    SelfCheck = 32,
+
     /// <summary>Both devices.</summary>
     Devices = Nozzle | Diffuser,
 
@@ -29,5 +32,5 @@ internal enum CommandName
     Answering = State | Devices,
 
     /// <summary>All commands.</summary>
-    All = Answering | Fluids | Units,
+    All = Answering | Fluids | Units | SelfCheck,
 }

@@ -12,7 +12,7 @@ internal static class Usage
     internal static FlowDuctException UnknownCommand(string word) => Refuse(
         string.Empty,
         $"{Echo.Ascii(word)} is not a command",
-        Nearest(word, CommandTable.All.Select(row => row.Word)) is string near ? $"did you mean {near}?" : "write one of state, nozzle, diffuser, fluids, units");
+        Nearest(word, CommandTable.All.Select(row => row.Word)) is string near ? $"did you mean {near}?" : "write one of " + CommandTable.WordsOf(CommandName.All));
 
     internal static FlowDuctException BeforeCommand(string word) => Nearest(word, ["--help", "--version"]) is string near && near != word
         ? Refuse(string.Empty, $"{Echo.Ascii(word)} is not an option", $"did you mean {near}?")

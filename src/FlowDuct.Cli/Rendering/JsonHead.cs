@@ -12,15 +12,21 @@ internal static class JsonHead
 
     internal static void Write(Utf8JsonWriter json, string verdict, Fluid fluid)
     {
+        WriteTool(json, verdict);
+        json.WriteStartObject("method");
+        json.WriteString(fluid.Name, fluid.Formulation);
+        json.WriteEndObject();
+    }
+
+    /// <summary>Schema, verdict and the program.</summary>
+    internal static void WriteTool(Utf8JsonWriter json, string verdict)
+    {
         json.WriteNumber("schema", Schema);
         json.WriteString("verdict", verdict);
         json.WriteStartObject("tool");
         json.WriteString("name", "flowduct");
         json.WriteString("version", ToolVersion.Version);
         json.WriteString("commit", ToolVersion.Commit);
-        json.WriteEndObject();
-        json.WriteStartObject("method");
-        json.WriteString(fluid.Name, fluid.Formulation);
         json.WriteEndObject();
     }
 

@@ -1,10 +1,11 @@
 using System.Globalization;
 using FlowDuct.Core.Tests.Support;
+using FlowDuct.Fluids.Water.Verification;
 using Xunit;
 
 namespace FlowDuct.Core.Tests.Fluids.Water;
 
-/// <summary>Every printed check value of IAPWS SR2-01(2014), SR4-04(2014) and SR5-05(2016), and those of SR3-03(2014) for psat and its texts.</summary>
+/// <summary>Values in the running text of the supplementary releases, and which printed digits exact arithmetic misses.</summary>
 public class BackwardCheckTests
 {
     private static readonly IReadOnlyList<IReadOnlyDictionary<string, string>> s_rows = ReferenceTable.Read("water/backward_check.csv");
@@ -28,7 +29,9 @@ public class BackwardCheckTests
         var rows = new TheoryData<int, string>();
         for (int i = 0; i < s_rows.Count; i++)
         {
+            // The table rows are checked with all others, in CheckRowTests.
             IReadOnlyDictionary<string, string> row = s_rows[i];
+            if (!row["table"].EndsWith("(text value)", StringComparison.Ordinal)) continue;
             rows.Add(i, $"{row["source"]} {row["table"]} {row["equation"]} {row["input1_value"]} {row["input2_value"]}");
         }
 
@@ -106,7 +109,7 @@ public class BackwardCheckTests
         double a = Number(row["input1_value"]) * nudge, b = Number(row["input2_value"]);
         return row["table"].EndsWith("(text value)", StringComparison.Ordinal)
             ? TextValues.Of(row["equation"], a, b, nudge)
-            : PrintedEquations.Of(row["equation"], a, b);
+            : SupplementaryEquations.Of(row["equation"], a, b);
     }
 
     private static double Number(string text) => text.Length == 0 ? 0 : double.Parse(text, CultureInfo.InvariantCulture);

@@ -1,6 +1,7 @@
 using System.Globalization;
 using FlowDuct.Core.Tests.Support;
 using FlowDuct.Fluids.Water;
+using FlowDuct.Fluids.Water.Verification;
 
 namespace FlowDuct.Core.Tests.Fluids.Water;
 
@@ -10,9 +11,9 @@ internal sealed record SubregionCell(int Subregion, double PAbove, double PUpto,
     internal static readonly IReadOnlyList<SubregionCell> All = [.. ReferenceTable.Read("water/region3_subregions.csv").Select(row => new SubregionCell(
         row["subregion"][1] - 'a', Pressure(row["p_above_MPa"]), Pressure(row["p_upto_MPa"]), row["T_above"], row["T_upto"]))];
 
-    internal double Low(double p) => TAbove.Length == 0 ? WaterConstants.T13 : PrintedEquations.Edge(TAbove, p);
+    internal double Low(double p) => TAbove.Length == 0 ? WaterConstants.T13 : SupplementaryEquations.Edge(TAbove, p);
 
-    internal double High(double p) => TUpto.Length == 0 ? Boundaries.TB23(p * 1e6) : PrintedEquations.Edge(TUpto, p);
+    internal double High(double p) => TUpto.Length == 0 ? Boundaries.TB23(p * 1e6) : SupplementaryEquations.Edge(TUpto, p);
 
     /// <summary>Points strictly inside, spread evenly; where its edges cross, a cell has none.</summary>
     internal IEnumerable<(double p, double T)> Points(int count)

@@ -1,6 +1,7 @@
 using System.Globalization;
 using FlowDuct.Core.Tests.Support;
 using FlowDuct.Fluids.Water;
+using FlowDuct.Fluids.Water.Verification;
 using Xunit;
 
 namespace FlowDuct.Core.Tests.Fluids.Water;
@@ -30,7 +31,7 @@ public class SubregionTests
     {
         foreach (SubregionCell cell in s_cells.Where(cell => cell.TUpto.Length > 0))
         {
-            double p = cell.PUpto, T = PrintedEquations.Edge(cell.TUpto, p);
+            double p = cell.PUpto, T = SupplementaryEquations.Edge(cell.TUpto, p);
             if (cell.Low(p) < T) Assert.True(Region3Subregion.Of(p, T) == cell.Subregion, cell.ToString());
         }
     }

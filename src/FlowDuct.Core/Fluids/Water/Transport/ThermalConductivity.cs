@@ -5,8 +5,8 @@ namespace FlowDuct.Fluids.Water;
 internal static class ThermalConductivity
 {
     // R15-11, Eq. (1) to (6) and Table 3. cp is reduced with the gas constant of IAPWS-95, not with that of IF97.
-    private const double R = 461.51805;
-    private const double Lambda = 177.8514;
+    internal const double R = 461.51805;
+    internal const double Lambda = 177.8514;
     private const double InverseCutOff = 0.40e-9;
     private const double Xi0 = 0.13e-9;
     private const double Gamma0 = 0.06;

@@ -1,9 +1,7 @@
-using FlowDuct.Fluids.Water;
-
-namespace FlowDuct.Core.Tests.Fluids.Water;
+namespace FlowDuct.Fluids.Water.Verification;
 
 /// <summary>The supplementary equations by the name that the check values carry, in the units of the releases: MPa, kJ and K.</summary>
-internal static class PrintedEquations
+internal static class SupplementaryEquations
 {
     internal static double Of(string equation, double a, double b) => equation switch
     {
@@ -23,6 +21,11 @@ internal static class PrintedEquations
         "boundary hB13(s), Eq. (7)" => EnthalpyEntropyEdges.hB13(a * 1e3) / 1e3,
         "boundary TB23(h,s), Eq. (8)" => EnthalpyEntropyEdges.TB23(a * 1e3, b * 1e3),
         "two-phase Tsat(h,s), Eq. (9)" => WetTemperature.Of(a * 1e3, b * 1e3),
+        _ when equation.StartsWith("boundary h3ab", StringComparison.Ordinal) => Boundaries.h3ab(a * 1e6) / 1e3,
+        _ when equation.StartsWith("backward T(p,h) subregion 3", StringComparison.Ordinal) => Region3Backward.FromPH(a * 1e6, b * 1e3).T,
+        _ when equation.StartsWith("backward T(p,s) subregion 3", StringComparison.Ordinal) => Region3Backward.FromPS(a * 1e6, b * 1e3).T,
+        _ when equation.StartsWith("backward v(p,h) subregion 3", StringComparison.Ordinal) => 1 / Region3Backward.FromPH(a * 1e6, b * 1e3).rho,
+        _ when equation.StartsWith("backward v(p,s) subregion 3", StringComparison.Ordinal) => 1 / Region3Backward.FromPS(a * 1e6, b * 1e3).rho,
         _ when equation.StartsWith("v(p,T) subregion 3", StringComparison.Ordinal) => Volume(equation[^1] - 'a', a * 1e6, b),
         _ when equation.StartsWith("subregion boundary T", StringComparison.Ordinal) => Edge(equation[^6..^3], a),
         _ => throw new ArgumentOutOfRangeException(nameof(equation), equation, "no such equation"),
