@@ -86,22 +86,20 @@ string Kernel(string name, string residual, string? ideal, Sums sums, Sums searc
     code.Append($"    internal static void Sums({Outs(sums)})\n    {{\n{body}    }}\n");
     if (search != Sums.None)
     {
-        code.Append($"\n    /// <summary>What a search asks for: {(search == Sums.ByY ? "g, y g_y, y^2 g_yy, y^3 g_yyy" : "x g_x, x^2 g_xx")}.</summary>\n");
+        code.Append($"\n    /// <summary>What a search asks for: {(search == Sums.ByY ? "g, y g_y, y^2 g_yy" : "x g_x, x^2 g_xx")}.</summary>\n");
         code.Append($"    internal static void Search({Outs(search)})\n    {{\n{Body(terms, search)}    }}\n");
     }
 
     if (ideal is null) return code.Append("}\n").ToString();
     code.Append("\n    /// <summary>The ideal-gas part without its ln(pi), by y = tau: g, y g_y, y^2 g_yy.</summary>\n");
     code.Append($"    internal static void Ideal(double y, out double g, out double gy, out double gyy)\n    {{\n{idealBody}    }}\n");
-    if (search != Sums.ByY) return code.Append("}\n").ToString();
-    code.Append("\n    /// <summary>The same with y^3 g_yyy.</summary>\n");
-    return code.Append($"    internal static void IdealSearch(double y, out double g, out double gy, out double gyy, out double gyyy)\n    {{\n{IdealBody(Read(ideal), true)}    }}\n}}\n").ToString();
+    return code.Append("}\n").ToString();
 }
 
 string[] Names(Sums sums) => sums switch
 {
     Sums.All => ["g", "gx", "gxx", "gy", "gyy", "gxy"],
-    Sums.ByY => ["g", "gy", "gyy", "gyyy"],
+    Sums.ByY => ["g", "gy", "gyy"],
     _ => ["gx", "gxx"],
 };
 
@@ -155,24 +153,22 @@ int Count(string body) => body.Split('\n').Sum(line => line.Split(' ').Count(wor
 // Terms of one power of x share it: a, b, c are their sum and its scaled derivatives by y.
 string Body(List<Term> terms, Sums sums)
 {
-    bool byY = sums != Sums.ByX, byX = sums != Sums.ByY, third = sums == Sums.ByY;
+    bool byY = sums != Sums.ByX, byX = sums != Sums.ByY;
     StringBuilder code = new();
     Powers(code, "x", terms.Select(t => (int)t.I));
     Powers(code, "y", terms.Select(t => (int)t.J));
-    code.Append(third ? "        double a, b, c, d, t;\n" : byY ? "        double a, b, c, t;\n" : "        double a;\n");
+    code.Append(byY ? "        double a, b, c, t;\n" : "        double a;\n");
     HashSet<string> begun = [];
     foreach (IGrouping<double, Term> group in terms.GroupBy(t => t.I))
     {
         int power = (int)group.Key;
         if (power == 0 && !byY) continue;
-        Inner(code, [.. group], byY, third);
+        Inner(code, [.. group], byY);
         string x = power == 0 ? string.Empty : Times("x", power);
         if (x.Length > 0) code.Append(byY ? $"        a = a{x};\n        b = b{x};\n        c = c{x};\n" : $"        a = a{x};\n");
-        if (x.Length > 0 && third) code.Append($"        d = d{x};\n");
         if (byY) Add("g", "a");
         if (byY) Add("gy", "b");
         if (byY) Add("gyy", "c");
-        if (third) Add("gyyy", "d");
         if (!byX || power == 0) continue;
         Add("gx", Scaled(power, "a"));
         if (byY) Add("gxy", Scaled(power, "b"));
@@ -184,7 +180,7 @@ string Body(List<Term> terms, Sums sums)
     void Add(string sum, string what) => code.Append($"        {sum} {(begun.Add(sum) ? "=" : "+=")} {what};\n");
 }
 
-void Inner(StringBuilder code, List<Term> group, bool byY, bool third)
+void Inner(StringBuilder code, List<Term> group, bool byY)
 {
     if (!byY)
     {
@@ -192,30 +188,26 @@ void Inner(StringBuilder code, List<Term> group, bool byY, bool third)
         return;
     }
 
-    bool b = false, c = false, d = false;
+    bool b = false, c = false;
     for (int i = 0; i < group.Count; i++)
     {
         int j = (int)group[i].J;
         code.Append($"        t = {Literal(group[i].N)}{Times("y", j)};\n        a {(i == 0 ? "=" : "+=")} t;\n");
         if (j != 0) code.Append($"        b {(b ? "+=" : "=")} {Scaled(j, "t")};\n");
         if (j * (j - 1) != 0) code.Append($"        c {(c ? "+=" : "=")} {Scaled(j * (j - 1), "t")};\n");
-        int cube = third ? j * (j - 1) * (j - 2) : 0;
-        if (cube != 0) code.Append($"        d {(d ? "+=" : "=")} {Scaled(cube, "t")};\n");
-        (b, c, d) = (b || j != 0, c || j * (j - 1) != 0, d || cube != 0);
+        (b, c) = (b || j != 0, c || j * (j - 1) != 0);
     }
 
     if (!b) code.Append("        b = 0;\n");
     if (!c) code.Append("        c = 0;\n");
-    if (third && !d) code.Append("        d = 0;\n");
 }
 
-string IdealBody(List<Term> terms, bool third = false)
+string IdealBody(List<Term> terms)
 {
     StringBuilder code = new();
     Powers(code, "y", terms.Select(t => (int)t.J));
-    Inner(code, terms, true, third);
-    string text = code.ToString().Replace("a +", "g +").Replace("a =", "g =").Replace("b +", "gy +").Replace("b =", "gy =").Replace("c +", "gyy +").Replace("c =", "gyy =")
-        .Replace("d +", "gyyy +").Replace("d =", "gyyy =");
+    Inner(code, terms, true);
+    string text = code.ToString().Replace("a +", "g +").Replace("a =", "g =").Replace("b +", "gy +").Replace("b =", "gy =").Replace("c +", "gyy +").Replace("c =", "gyy =");
     return "        double t;\n" + text;
 }
 

@@ -18,8 +18,23 @@ internal static class Backward
         ("p(h,s) region 2", EnthalpyEntropyGuess.p2, Points((u, w) => Pair(Region2.State(1e5 + (u * 15e6), 640 + (w * 430))))),
         ("p(h,s) region 3", Region3EnthalpyEntropy.p3, Points((u, w) => Pair(Region3.State(200 + (u * 400), 650 + (w * 50))))),
         ("Tsat(h,s)", WetTemperature.Of, Points((u, w) => (2000e3 + (u * 400e3), 5500 + (w * 1000)))),
+        ("T(p,s) region 2", Region2.TFromPS, Points((u, w) => PS(Region2.State(1e5 + (u * 3.4e6), 530 + (w * 500))))),
+        ("T(p,h) region 2", Region2.TFromPH, Points((u, w) => PH(Region2.State(1e5 + (u * 3.4e6), 530 + (w * 500))))),
+        ("h, s, cp region 2", Caloric, Points((u, w) => (1e5 + (u * 3.4e6), 530 + (w * 500)))),
+        ("full region 2", (p, T) => Region2.State(p, T).w, Points((u, w) => (1e5 + (u * 3.4e6), 530 + (w * 500)))),
+        ("Tsat(p)", (p, _) => SaturationLine.Temperature(p), Points((u, w) => (1e5 + (u * 3.4e6), 530 + (w * 500)))),
         ("T(p,h) region 1, straight-line code", Region1.TFromPH, Points((u, w) => (20e6 + (u * 80e6), 1e5 + (w * 1.4e6)))),
     ];
+
+    private static (double, double) PS(RegionState at) => (at.p, at.s);
+
+    private static (double, double) PH(RegionState at) => (at.p, at.h);
+
+    private static double Caloric(double p, double T)
+    {
+        Region2.Caloric(p, T, out double h, out double s, out double cp);
+        return h + s + cp;
+    }
 
     internal static int Run(string[] args)
     {

@@ -12,39 +12,86 @@ internal static class Choking
     // Just inside the wet region: far above the closure of the inverses, far below any printed digit.
     private const double WetSide = 1 - 1e-9;
 
+    // (V/w)^2 - 1 keeps no more digits; the flux, being greatest there, changes by its square.
+    private const double SonicClosure = 4e-14;
+    private const int MostQuickSteps = 12;
+
     /// <summary>Finds the throat of an isentrope that starts from rest at p0, Pa; false where none lies inside the range.</summary>
     internal static bool TryFind(Fluid fluid, double h0, double s, double p0, out FluidState throat, out bool atKink)
     {
         atKink = false;
-        double Excess(double p) => fluid.FromPS(p, s, default, out FluidState at) == Outcome.Ok ? SonicExcess(at, h0) : double.NegativeInfinity;
-        double top = p0;
-        if (fluid.TrySaturationOnIsentrope(s, out FluidState edge) && edge.p < p0)
-        {
-            if (SonicExcess(edge, h0) <= 0) return Solve(fluid, s, Excess, edge.p, p0, out throat);
-            throat = edge;
-            atKink = true;
-            top = edge.p * WetSide;
-            if (!(Excess(top) > 0)) return fluid.FromPS(top, s, default, out _) == Outcome.Ok;
-            atKink = false;
-        }
-
-        double low = top;
-        while (Excess(low) > 0) low *= 0.85;
-        return fluid.FromPS(low, s, default, out throat) == Outcome.Ok && Solve(fluid, s, Excess, low, top, out throat);
+        return TryQuick(fluid, h0, s, p0, out throat) || TryThorough(fluid, h0, s, p0, out throat, out atKink);
     }
 
     /// <summary>The subsonic pressure, Pa, at which the isentrope carries the flux G, kg/(m2.s), between p* and p0.</summary>
     internal static double SubsonicPressure(Fluid fluid, double h0, double s, double G, double pThroat, double p0)
     {
-        double Excess(double p) => fluid.FromPS(p, s, default, out FluidState at) == Outcome.Ok ? (Energy.Velocity(h0, at.h) / at.v) - G : -G;
-        return RootFinder.Find(Excess, pThroat, p0, Excess(pThroat), -G);
+        var excess = new FluxExcess(fluid, h0, s, G);
+        return RootFinder.Find(ref excess, pThroat, p0, excess.At(pThroat), -G);
+    }
+
+    // One phase from rest to throat: secant in ln p from the throat of a gas of constant isentropic exponent.
+    private static bool TryQuick(Fluid fluid, double h0, double s, double p0, out FluidState throat)
+    {
+        if (fluid.FromPS(p0, s, default, out throat) != Outcome.Ok) return false;
+        bool wet = throat.Phase == Phase.Wet, vapour = throat.Phase is Phase.Gas or Phase.SuperheatedVapour or Phase.Supercritical;
+        double kappa = throat.kappa;
+        if (!(wet || vapour) || !(kappa is > 1.01 and < 3)) return false;
+        double x = Math.Log(p0) + (kappa / (kappa - 1) * Math.Log(2 / (kappa + 1))), before = 0, step = 0;
+        for (int i = 0; i < MostQuickSteps; i++)
+        {
+            if (fluid.FromPS(Math.Exp(x), s, throat, out throat) != Outcome.Ok) return false;
+            if (wet ? throat.Phase != Phase.Wet : throat.Phase is not (Phase.Gas or Phase.SuperheatedVapour or Phase.Supercritical)) return false;
+            double w2 = throat.w * throat.w, excess = SonicExcess(throat, h0) / w2;
+            if (Math.Abs(excess) <= SonicClosure) return true;
+
+            // w^2 of such a gas changes by (kappa - 1)/kappa of itself, the kinetic energy by v dp.
+            double slope = i == 0 || step == 0 ? ((kappa - 1) / kappa) + (2 / kappa) : (excess - before) / step;
+            double next = -excess / slope;
+            if (!(Math.Abs(next) < 0.3)) return false;
+            if (Math.Abs(next) <= 2e-15) return Math.Abs(excess) <= 20 * SonicClosure;
+            (before, step) = (excess, next);
+            x += next;
+        }
+
+        return false;
+    }
+
+    private static bool TryThorough(Fluid fluid, double h0, double s, double p0, out FluidState throat, out bool atKink)
+    {
+        atKink = false;
+        var excess = new Excess(fluid, h0, s);
+        double top = p0;
+        if (fluid.TrySaturationOnIsentrope(s, out FluidState edge) && edge.p < p0)
+        {
+            if (SonicExcess(edge, h0) <= 0) return Solve(fluid, s, excess, edge.p, p0, out throat);
+            throat = edge;
+            atKink = true;
+            top = edge.p * WetSide;
+            if (!(excess.At(top) > 0)) return fluid.FromPS(top, s, default, out _) == Outcome.Ok;
+            atKink = false;
+        }
+
+        double low = top;
+        while (excess.At(low) > 0) low *= 0.85;
+        return fluid.FromPS(low, s, default, out throat) == Outcome.Ok && Solve(fluid, s, excess, low, top, out throat);
     }
 
     private static double SonicExcess(in FluidState at, double h0) => (at.w * at.w) - (2 * (h0 - at.h));
 
-    private static bool Solve(Fluid fluid, double s, Func<double, double> excess, double low, double high, out FluidState throat)
+    private static bool Solve(Fluid fluid, double s, Excess excess, double low, double high, out FluidState throat)
     {
-        double p = RootFinder.Find(excess, low, high, excess(low), excess(high));
+        double p = RootFinder.Find(ref excess, low, high, excess.At(low), excess.At(high));
         return fluid.FromPS(p, s, default, out throat) == Outcome.Ok;
+    }
+
+    private readonly struct Excess(Fluid fluid, double h0, double s) : IScalarFunction
+    {
+        public double At(double p) => fluid.FromPS(p, s, default, out FluidState at) == Outcome.Ok ? SonicExcess(at, h0) : double.NegativeInfinity;
+    }
+
+    private readonly struct FluxExcess(Fluid fluid, double h0, double s, double G) : IScalarFunction
+    {
+        public double At(double p) => fluid.FromPS(p, s, default, out FluidState at) == Outcome.Ok ? (Energy.Velocity(h0, at.h) / at.v) - G : -G;
     }
 }

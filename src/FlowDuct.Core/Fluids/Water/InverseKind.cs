@@ -12,8 +12,8 @@ internal interface IInverseKind
     /// <summary>The property itself, of h and s.</summary>
     static abstract double Pick(double h, double s);
 
-    /// <summary>Its first two derivatives by T at constant p, of cp, dcp/dT and T.</summary>
-    static abstract (double First, double Second) Slopes(double cp, double cpT, double T);
+    /// <summary>Its derivative by T at constant p, of cp and T.</summary>
+    static abstract double Slope(double cp, double T);
 
     /// <summary>No liquid of region 1 has more of it.</summary>
     static abstract double MostOfRegion1 { get; }
@@ -53,7 +53,7 @@ internal readonly struct ByEnthalpy : IInverseKind
 
     public static double Pick(double h, double s) => h;
 
-    public static (double First, double Second) Slopes(double cp, double cpT, double T) => (cp, cpT);
+    public static double Slope(double cp, double T) => cp;
 
     public static double ByDensity(in RegionState at, double prho, double pT) => (prho * at.v) - (at.T * pT * at.v * at.v);
 
@@ -82,7 +82,7 @@ internal readonly struct ByEntropy : IInverseKind
 
     public static double Pick(double h, double s) => s;
 
-    public static (double First, double Second) Slopes(double cp, double cpT, double T) => (cp / T, (cpT - (cp / T)) / T);
+    public static double Slope(double cp, double T) => cp / T;
 
     public static double ByDensity(in RegionState at, double prho, double pT) => -pT * at.v * at.v;
 

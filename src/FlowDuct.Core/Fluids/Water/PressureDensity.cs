@@ -77,7 +77,13 @@ internal static class PressureDensity
         state = default;
         if (atLow > 0) return atLow <= 1e-12 * v ? WaterFluid.Instance.FromPT(p, low, out state) : Outcome.PairTooLow;
         if (atHigh < 0) return atHigh >= -1e-9 * v ? WaterFluid.Instance.FromPT(p, inside, out state) : Outcome.PairTooHigh;
-        return WaterFluid.Instance.FromPT(p, RootFinder.Find(T => Volume(p, T) - v, low, inside, atLow, atHigh), out state);
+        var excess = new VolumeExcess(p, v);
+        return WaterFluid.Instance.FromPT(p, RootFinder.Find(ref excess, low, inside, atLow, atHigh), out state);
+    }
+
+    private readonly struct VolumeExcess(double p, double v) : IScalarFunction
+    {
+        public double At(double T) => Volume(p, T) - v;
     }
 
     private static double Volume(double p, double T) => WaterFluid.RegionAt(p, T, out _).v;

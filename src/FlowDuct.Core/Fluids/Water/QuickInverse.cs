@@ -13,8 +13,8 @@ internal static class QuickInverse<TKind>
     // Overlaps and gaps between regions are narrower, 0.07 K at most.
     private const double Clear = 0.15;
 
-    // So small a step moves h and s by its first order and leaves every other property as it is.
-    private const double Last = 1e-10;
+    // So small a step moves h, s and v by their first order and every other property by less than 1e-10 of itself.
+    private const double Last = 3e-8;
     private const int MostSteps = 3;
 
     /// <summary>True with the state, or false where the thorough way has to be gone.</summary>
@@ -29,8 +29,8 @@ internal static class QuickInverse<TKind>
     {
         double T = TKind.GuessRegion2(p, y), edge = ColdEdge(p);
         if (!(T > edge + Clear && T < WaterConstants.T25 - Clear)) return false;
-        Region2.Caloric(p, T, out double h, out double s, out double cp, out double cpT);
-        double step = FirstStep(y - TKind.Pick(h, s), TKind.Slopes(cp, cpT, T));
+        Region2.Caloric(p, T, out double h, out double s, out double cp);
+        double step = (y - TKind.Pick(h, s)) / TKind.Slope(cp, T);
         for (int i = 0; i < MostSteps && Math.Abs(step) < MostStep; i++)
         {
             T += step;
@@ -50,8 +50,8 @@ internal static class QuickInverse<TKind>
         double T = TKind.GuessRegion1(p, y);
         double edge = p < SaturationLine.pAtT13 ? SaturationLine.Temperature(p) : WaterConstants.T13;
         if (!(T < edge - Clear && T > WaterConstants.TLeast + Clear)) return false;
-        Region1.Caloric(p, T, out double h, out double s, out double cp, out double cpT);
-        double step = FirstStep(y - TKind.Pick(h, s), TKind.Slopes(cp, cpT, T));
+        Region1.Caloric(p, T, out double h, out double s, out double cp);
+        double step = (y - TKind.Pick(h, s)) / TKind.Slope(cp, T);
         for (int i = 0; i < MostSteps && Math.Abs(step) < MostStep; i++)
         {
             T += step;
@@ -63,13 +63,6 @@ internal static class QuickInverse<TKind>
         }
 
         return false;
-    }
-
-    // Chebyshev's step: from 25 mK it lands within a billionth of a kelvin.
-    private static double FirstStep(double excess, (double First, double Second) slopes)
-    {
-        double step = excess / slopes.First;
-        return step * (1 - (step * slopes.Second / (2 * slopes.First)));
     }
 
     private static double ColdEdge(double p)

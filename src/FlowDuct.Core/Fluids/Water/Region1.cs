@@ -14,15 +14,14 @@ internal static class Region1
         return RegionState.FromGibbs(p, T, g, -px * gx, px * px * gxx, ty * gy, ty * ty * gyy, -px * ty * gxy);
     }
 
-    /// <summary>h, J/kg, s and cp, J/(kg.K), and dcp/dT at constant p, without the derivatives by pressure.</summary>
-    internal static void Caloric(double p, double T, out double h, out double s, out double cp, out double cpT)
+    /// <summary>h, J/kg, s and cp, J/(kg.K), without the derivatives by pressure.</summary>
+    internal static void Caloric(double p, double T, out double h, out double s, out double cp)
     {
         double tau = 1386 / T, y = tau - 1.222, ty = tau / y;
-        Region1Kernel.Search(7.1 - (p / 16.53e6), y, out double g, out double gy, out double gyy, out double gyyy);
+        Region1Kernel.Search(7.1 - (p / 16.53e6), y, out double g, out double gy, out double gyy);
         h = WaterConstants.R * T * ty * gy;
         s = WaterConstants.R * ((ty * gy) - g);
         cp = -WaterConstants.R * ty * ty * gyy;
-        cpT = ((WaterConstants.R * ty * ty * ty * gyyy) - (2 * cp)) / T;
     }
 
     /// <summary>First guess of T, K, from p, Pa, and h, J/kg. R7-97(2012), Eq. (11); within 25 mK.</summary>

@@ -17,17 +17,16 @@ internal static class Region2
         return RegionState.FromGibbs(p, T, Math.Log(pi) + i + g, 1 + gx, gxx - 1, it + (ty * gy), itt + (ty * ty * gyy), ty * gxy);
     }
 
-    /// <summary>h, J/kg, s and cp, J/(kg.K), and dcp/dT at constant p, without the derivatives by pressure.</summary>
-    internal static void Caloric(double p, double T, out double h, out double s, out double cp, out double cpT)
+    /// <summary>h, J/kg, s and cp, J/(kg.K), without the derivatives by pressure.</summary>
+    internal static void Caloric(double p, double T, out double h, out double s, out double cp)
     {
         double pi = p * 1e-6, tau = 540 / T, y = tau - 0.5, ty = tau / y;
-        Region2Kernel.Search(pi, y, out double g, out double gy, out double gyy, out double gyyy);
-        Region2Kernel.IdealSearch(tau, out double i, out double it, out double itt, out double ittt);
+        Region2Kernel.Search(pi, y, out double g, out double gy, out double gyy);
+        Region2Kernel.Ideal(tau, out double i, out double it, out double itt);
         double gt = it + (ty * gy);
         h = WaterConstants.R * T * gt;
         s = WaterConstants.R * (gt - Math.Log(pi) - i - g);
         cp = -WaterConstants.R * (itt + (ty * ty * gyy));
-        cpT = ((WaterConstants.R * (ittt + (ty * ty * ty * gyyy))) - (2 * cp)) / T;
     }
 
     /// <summary>First guess of T, K, from p, Pa, and h, J/kg. R7-97(2012), Eqs. (21)-(24); within 25 mK.</summary>

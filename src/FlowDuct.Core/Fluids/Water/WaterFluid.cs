@@ -1,5 +1,3 @@
-using FlowDuct.Flow;
-
 namespace FlowDuct.Fluids.Water;
 
 /// <summary>Water and steam by IAPWS-IF97, IAPWS R7-97(2012), regions 1 to 5; wet states are homogeneous mixtures at equilibrium.</summary>
@@ -79,20 +77,10 @@ public sealed class WaterFluid : Fluid
         return exists;
     }
 
-    // s" falls and s' rises with temperature to the critical entropy, so each isentrope meets one of them once at most.
     internal override bool TrySaturationOnIsentrope(double s, out FluidState singlePhaseSide)
     {
         singlePhaseSide = default;
-        double x = s >= WaterConstants.sc ? 1 : 0;
-        double Excess(double T)
-        {
-            FromTX(T, x, out FluidState at);
-            return at.s - s;
-        }
-
-        double low = WaterConstants.TLeast, high = WaterConstants.Tc - 1e-3, atLow = Excess(low), atHigh = Excess(high);
-        if (Math.Sign(atLow) == Math.Sign(atHigh)) return false;
-        return FromTX(RootFinder.Find(Excess, low, high, atLow, atHigh), x, out singlePhaseSide) == Outcome.Ok;
+        return SaturationByEntropy.TryTemperature(s, out double T) && FromTX(T, s >= WaterConstants.sc ? 1 : 0, out singlePhaseSide) == Outcome.Ok;
     }
 
     internal override bool TryWetSideSpeedOfSound(in FluidState at, out double w)
