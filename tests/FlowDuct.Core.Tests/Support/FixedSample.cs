@@ -16,6 +16,9 @@ internal static class FixedSample
         for (long i = 0; i < total; i++) check(gen.Generate(pcg, null, out _));
     }
 
+    internal static void Each<T1, T2, T3>(this Gen<(T1 First, T2 Second, T3 Third)> gen, Action<T1, T2, T3> check, int count) =>
+        gen.Each(all => check(all.First, all.Second, all.Third), count);
+
     internal static void Each<T1, T2>(this Gen<(T1 First, T2 Second)> gen, Action<T1, T2> check, int count) =>
         gen.Each(pair => check(pair.First, pair.Second), count);
 }

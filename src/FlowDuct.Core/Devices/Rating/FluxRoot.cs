@@ -1,0 +1,38 @@
+using FlowDuct.Fluids;
+
+namespace FlowDuct.Devices.Rating;
+
+/// <summary>The pressure on a path at which it carries a mass flux: Newton in ln p inside a bracket.</summary>
+internal static class FluxRoot
+{
+    private const int MostSteps = 100;
+
+    // Of the flux: what the closure of the property calls leaves.
+    private const double Closure = 1e-13;
+
+    /// <summary>Finds the state between two pressures, Pa, of which the flux lies above the target at one and below it at the other.</summary>
+    internal static bool TryFind(LossPath path, double target, double pMore, double pLess, double start, out FluidState state, out double V)
+    {
+        double more = Math.Log(pMore), less = Math.Log(pLess), x = Math.Log(start);
+        state = default;
+        V = 0;
+        for (int i = 0; i < MostSteps; i++)
+        {
+            if (!(x > Math.Min(more, less) && x < Math.Max(more, less))) x = (more + less) / 2;
+            Outcome outcome = path.At(Math.Exp(x), state, out FluidState at, out double speed);
+            double flux = outcome == Outcome.Ok ? speed / at.v : 0, excess = (flux / target) - 1;
+            if (outcome == Outcome.Ok) (state, V) = (at, speed);
+            if (Math.Abs(excess) <= Closure) return true;
+            if (excess > 0) more = x;
+            else less = x;
+            if (Math.Abs(more - less) <= 4e-16 * Math.Abs(x)) return Math.Abs(excess) < 1e-9;
+
+            // On an isentrope d ln G = p v (1/w^2 - 1/V^2) d ln p; a loss bends it little.
+            double slope = outcome == Outcome.Ok && speed > 0 ? at.p * at.v * ((1 / (at.w * at.w)) - (1 / (speed * speed))) : 0;
+            double next = x - (Math.Log(flux / target) / slope);
+            x = double.IsFinite(next) ? next : (more + less) / 2;
+        }
+
+        return false;
+    }
+}
