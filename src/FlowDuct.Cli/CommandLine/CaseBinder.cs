@@ -42,9 +42,11 @@ internal sealed class CaseBinder
     internal DeviceCase Device(DeviceKind kind)
     {
         Fluid fluid = Fluid();
-        GivenSlots inlet = default, exit = default;
+        GivenSlots inlet = default, exit = default, throat = default, back = default;
         Fill(ref inlet, "--inlet", Station.Inlet);
         if (_arguments.Has("--exit")) Fill(ref exit, "--exit", Station.Exit);
+        if (_arguments.Has("--throat")) Fill(ref throat, "--throat", Station.Throat);
+        if (_arguments.Has("--back")) Fill(ref back, "--back", StationLists.Back);
         (GivenSlots options, bool flowIsVolume) = Options(fluid);
         var c = new DeviceCase
         {
@@ -59,7 +61,7 @@ internal sealed class CaseBinder
             UsesGauge = _usesGauge,
             FlowIsVolume = flowIsVolume,
         };
-        (c.Inlet, c.Exit, c.Options) = (inlet, exit, options);
+        (c.Inlet, c.Exit, c.Options, c.Throat, c.Back) = (inlet, exit, options, throat, back);
         return c;
     }
 
@@ -86,9 +88,11 @@ internal sealed class CaseBinder
         }
     }
 
-    private void Fill(ref GivenSlots slots, string option, Station station)
+    private void Fill(ref GivenSlots slots, string option, Station station) => Fill(ref slots, option, station.ToList());
+
+    private void Fill(ref GivenSlots slots, string option, StationLists list)
     {
-        foreach (StationItem item in StationListParser.Parse(option, station, _arguments.Value(option)!, AmbientPressure))
+        foreach (StationItem item in StationListParser.Parse(option, list, _arguments.Value(option)!, AmbientPressure))
         {
             slots.Set((int)item.Slot, item.Value.Si, item.Value.HalfWidth);
             _usesGauge |= item.Value.WasGauge;

@@ -12,7 +12,7 @@ internal static class Assumptions
         yield return answer.Case.Heat == 0 ? "steady, one-dimensional, adiabatic, no work" : "steady, one-dimensional, no work";
         if (answer.Fluid.HasSaturation && answer.Exit.State.Phase == Fluids.Phase.Wet) yield return "wet states: one homogeneous mixture at equilibrium";
         foreach (string line in answer.Assumptions) yield return line;
-        if (answer.Performance.Thrust is not null && answer.Exit.Mach >= 1) yield return "thrust: against the ambient pressure";
+        if (answer.Performance.Thrust is not null && answer.Exit.Mach >= 1) yield return answer.BackPressure is null ? "thrust: against the ambient pressure" : "thrust: against the back pressure";
         if (!answer.Case.AmbientGiven) yield return AmbientWords(answer.Case, text);
     }
 

@@ -39,7 +39,9 @@ internal static class JsonAnswer
         json.WriteString("fluid", c.Fluid.Name);
         json.WriteStartObject("given");
         JsonHead.Given(json, "inlet.", c.Inlet);
+        JsonHead.Given(json, "throat.", c.Throat);
         JsonHead.Given(json, "exit.", c.Exit);
+        JsonHead.Given(json, "back.", c.Back);
         foreach (QuantityRow row in QuantityCatalogue.Options)
         {
             if (row.OptionSlot is CaseOption option && c.Has(option)) json.WriteNumber(GivenKey(row, c), c.Value(option));

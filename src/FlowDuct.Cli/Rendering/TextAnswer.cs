@@ -63,6 +63,8 @@ internal static class TextAnswer
         "isentropic_efficiency" when answer.EfficiencyImplied => "   implied by the figures",
         "isentropic_efficiency" when answer.TakenIdeal => "   assumed",
         "isentropic_efficiency" when answer.Case.Has(CaseOption.Efficiency) => "   given",
+        "discharge_coefficient" when answer.Case.Has(CaseOption.DischargeCoefficient) => "   given",
+        "discharge_coefficient" when answer.Case.Has(CaseOption.Flow) => "   implied by the flow",
         "recovery" when answer.Case.Has(CaseOption.Recovery) => "   given",
         _ => string.Empty,
     };

@@ -1,3 +1,4 @@
+using FlowDuct.Findings;
 using FlowDuct.Flow;
 using FlowDuct.Fluids;
 using FlowDuct.Quantities;
@@ -25,9 +26,34 @@ internal static class Auditor
 
     private static Audit JudgeMass(DeviceAnswer a, Audit audit)
     {
+        if (a.Rating is not null) return JudgeRatedMass(a, audit);
         if (a.Performance.MassFlow is not double flow) return audit;
         audit = JudgeSection(a, audit, flow, Station.Inlet);
         return audit.Mass == Verdict.Broken ? audit : JudgeSection(a, audit, flow, Station.Exit);
+    }
+
+    // A given flow beside sections: against the flow that they pass, or, where it implies the coefficient, against the isentropic flow.
+    private static Audit JudgeRatedMass(DeviceAnswer a, Audit audit)
+    {
+        if (!a.Case.Has(CaseOption.Flow) || Surplus(a) is not double surplus) return audit;
+        double rounding = Rounding.Effect(a.Case, Surplus, surplus);
+        bool agrees = Implied(a) ? surplus <= 1e-9 : Math.Abs(surplus) <= 1e-9, explained = (Implied(a) ? surplus : Math.Abs(surplus)) <= rounding;
+        double flow = a.Case.Value(CaseOption.Flow) * (a.Case.FlowIsVolume ? a.Inlet.State.rho : 1);
+        return agrees ? audit : audit with
+        {
+            Mass = explained ? Verdict.WithinRounding : AboveEquilibriumFlow.Explains(a) ? Verdict.Holds : Verdict.Broken,
+            MassFlowFound = flow / (1 + surplus),
+            MassFlowRounding = rounding * flow,
+        };
+    }
+
+    private static bool Implied(DeviceAnswer a) => !a.Case.Has(CaseOption.DischargeCoefficient) && !a.Case.FlowIsVolume;
+
+    private static double? Surplus(DeviceAnswer a)
+    {
+        if (a.Rating is not Rating.NozzleRating rating || a.Performance.DischargeCoefficient is null) return null;
+        double flow = a.Case.Value(CaseOption.Flow) * (a.Case.FlowIsVolume ? a.Inlet.State.rho : 1);
+        return (flow / (Implied(a) ? rating.IsentropicFlow : rating.MassFlow)) - 1;
     }
 
     private static Audit JudgeSection(DeviceAnswer a, Audit audit, double flow, Station station)

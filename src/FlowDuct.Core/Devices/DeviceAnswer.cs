@@ -37,6 +37,12 @@ internal sealed record DeviceAnswer : IStations
     /// <summary>What was decided for the reader, in words.</summary>
     internal IReadOnlyList<string> Assumptions { get; init; } = [];
 
+    /// <summary>The rating behind the answer, where sections and a back pressure were given; else null.</summary>
+    internal Rating.NozzleRating? Rating { get; init; }
+
+    /// <summary>The back pressure that the rating used, Pa; null where none was given.</summary>
+    internal double? BackPressure { get; init; }
+
     internal IReadOnlyList<Finding> Findings { get; init; } = [];
 
     internal Fluid Fluid => Case.Fluid;

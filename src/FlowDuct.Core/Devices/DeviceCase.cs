@@ -55,6 +55,8 @@ internal sealed record DeviceCase
     private GivenSlots _inlet;
     private GivenSlots _exit;
     private GivenSlots _options;
+    private GivenSlots _throat;
+    private GivenSlots _back;
 
     internal required DeviceKind Device { get; init; }
 
@@ -86,6 +88,12 @@ internal sealed record DeviceCase
     internal ref GivenSlots Exit => ref _exit;
 
     internal ref GivenSlots Options => ref _options;
+
+    /// <summary>What is given of the throat (nozzle).</summary>
+    internal ref GivenSlots Throat => ref _throat;
+
+    /// <summary>What is given of the space beyond the exit (nozzle).</summary>
+    internal ref GivenSlots Back => ref _back;
 
     internal bool Has(CaseOption option) => _options.Has((int)option);
 

@@ -15,7 +15,12 @@ internal sealed record Inlet(StationAnswer Station, StationFigures Given, double
     internal static Inlet Solve(DeviceCase c)
     {
         StationFigures given = StationFigures.Read(c.Inlet, Quantities.Station.Inlet);
-        VelocityDatum datum = Datum(c, given);
+        return SolveAt(c, given, Datum(c, given));
+    }
+
+    /// <summary>The same at a velocity that is known or tried.</summary>
+    internal static Inlet SolveAt(DeviceCase c, StationFigures given, VelocityDatum datum)
+    {
         Figure figures = given.Given & (Figures.Static | Figures.Stagnation);
         InletRecipe recipe = InletRecipes.Find(figures, datum.Kind != VelocityKind.None) ?? throw NoRecipe(given, datum);
         RefuseSaturatedReading(c.Fluid, given);

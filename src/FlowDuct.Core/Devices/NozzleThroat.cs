@@ -31,10 +31,11 @@ internal static class NozzleThroat
             Regime = regime,
             Choked = p2 <= critical.p + band,
             CriticalPressureRatio = critical.p / rest.p,
+            DischargeCoefficient = a.Case.Has(CaseOption.DischargeCoefficient) ? a.Case.Value(CaseOption.DischargeCoefficient) : null,
         };
         bool hasThroat = shape == NozzleShape.ConvergentDivergent && below;
         StationAnswer? throat = hasThroat
-            ? StationAnswer.From(a.Fluid, critical, Energy.Velocity(rest.h, critical.h)).Carrying(a.Performance.MassFlow)
+            ? StationAnswer.From(a.Fluid, critical, Energy.Velocity(rest.h, critical.h)).Carrying(a.Performance.MassFlow / a.Case.ValueOr(CaseOption.DischargeCoefficient, 1))
             : null;
         return a with { Throat = throat, Performance = performance, Assumptions = assumptions };
     }

@@ -25,6 +25,22 @@ internal sealed record Performance
 
     internal double? ThroatAreaRatio { get; init; }
 
+    internal double? ConvergentLength { get; init; }
+
+    internal double? DivergentLength { get; init; }
+
+    /// <summary>Mass flow over isentropic flow of the throat.</summary>
+    internal double? DischargeCoefficient { get; init; }
+
+    internal Rating.BackPressureLimits Limits { get; init; }
+
+    internal Rating.ShockAnswer? Shock { get; init; }
+
+    /// <summary>Stagnation pressure behind the shock over that before it.</summary>
+    internal double? ShockStagnationPressureRatio { get; init; }
+
+    internal Rating.JetAnswer? Jet { get; init; }
+
     internal double? EntropyRise { get; init; }
 
     internal double? ExitVelocityIdeal { get; init; }

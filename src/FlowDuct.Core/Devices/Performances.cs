@@ -20,13 +20,24 @@ internal static class Performances
             HeatRate = a.Case.Heat != 0 ? flow * a.Case.Heat : null,
             PressureChange = exit.State.p - first.p,
             StagnationPressureRatio = p02 / p01,
-            AreaRatio = Quotient(inlet.Flux, exit.Flux),
-            ThroatAreaRatio = a.Throat is null ? null : Quotient(a.Throat.Flux, exit.Flux),
+            AreaRatio = Sections(exit, inlet) ?? Quotient(inlet.Flux, exit.Flux),
+            ThroatAreaRatio = a.Throat is null ? null : Sections(exit, a.Throat) ?? Quotient(a.Throat.Flux, exit.Flux),
+            Jet = a.Rating is Rating.NozzleRating rating ? Rating.JetAnswer.Of(a.Fluid, rating, a.BackPressure!.Value) : null,
+            ConvergentLength = Length(a, CaseOption.ConvergentAngle, inlet, a.Throat ?? exit),
+            DivergentLength = a.Throat is null ? null : Length(a, CaseOption.DivergentAngle, exit, a.Throat),
             Thrust = Thrust(a, flow),
             AxialForce = AxialForce(a, flow),
         };
         return a.Case.Device == DeviceKind.Nozzle ? NozzlePerformance.Add(a, performance) : DiffuserPerformance.Add(a, performance);
     }
+
+    private static double? Sections(StationAnswer of, StationAnswer to) => of.Area * of.Openings / (to.Area * to.Openings);
+
+    // Between two bores on one axis; several openings of one end have no common cone.
+    private static double? Length(DeviceAnswer a, CaseOption angle, StationAnswer wide, StationAnswer narrow) =>
+        a.Case.Has(angle) && wide.Openings == narrow.Openings && wide.Diameter - narrow.Diameter is double growth and > 0
+            ? growth / (2 * Math.Tan(a.Case.Value(angle) / 2))
+            : null;
 
     internal static double? Quotient(double? numerator, double? denominator) => denominator is double d && d > 0 && numerator > 0 ? numerator / d : null;
 
@@ -50,7 +61,7 @@ internal static class Performances
     private static double? Thrust(DeviceAnswer a, double? flow)
     {
         if (a.Case.Device != DeviceKind.Nozzle || a.Exit.Area is not double A2) return null;
-        double pa = a.Exit.Mach < 1 ? a.Exit.State.p : a.Case.AmbientPressure;
+        double pa = a.BackPressure ?? (a.Exit.Mach < 1 ? a.Exit.State.p : a.Case.AmbientPressure);
         return (flow * a.Exit.Velocity) + ((a.Exit.State.p - pa) * A2 * a.Exit.Openings);
     }
 

@@ -16,6 +16,8 @@ internal static class Rounding
         {
             sum += Of(c, result, now, slot, c.Inlet, (copy, value) => copy.Inlet.Set(slot, value));
             sum += Of(c, result, now, slot, c.Exit, (copy, value) => copy.Exit.Set(slot, value));
+            sum += Of(c, result, now, slot, c.Throat, (copy, value) => copy.Throat.Set(slot, value));
+            sum += Of(c, result, now, slot, c.Back, (copy, value) => copy.Back.Set(slot, value));
             sum += Of(c, result, now, slot, c.Options, (copy, value) => copy.Options.Set(slot, value));
         }
 

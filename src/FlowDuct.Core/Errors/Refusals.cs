@@ -117,7 +117,57 @@ internal static class Refusals
     internal static FlowDuctException ConvergentBelowCritical(double p, double pCritical) => NoAnswer(
         "--exit",
         $"p={Units.Text(p, Dimension.Pressure)} is below the critical pressure {Units.Text(pCritical, Dimension.Pressure)}: a convergent nozzle cannot reach it in its exit plane",
-        "if the nozzle has a throat before its exit, write --shape convergent-divergent; a space beyond the exit is not asked for yet");
+        "if that is the pressure of the space, write --back; if the nozzle has a throat before its exit, write --shape convergent-divergent");
+
+    internal static FlowDuctException ExitNarrowerThanThroat(double throat, double exit) => NotUnderstood(
+        "--exit",
+        $"the exit area {Units.Text(exit, Dimension.Area)} is smaller than the throat area {Units.Text(throat, Dimension.Area)}: the exit would be the throat",
+        "give the narrowest section as --throat, or the exit bore alone for a convergent nozzle");
+
+    internal static FlowDuctException ShapeAgainstSections() => NotUnderstood(
+        "--shape", "convergent does not fit two different sections", "leave --throat or --shape out");
+
+    internal static FlowDuctException ExitFollows(Figure extra) => NotUnderstood(
+        "--exit", $"with sections and a back pressure the exit follows; {Figures.Names(extra)} is given too", "leave it out, or leave --throat and --back out");
+
+    internal static FlowDuctException ThroatFollows() => NotUnderstood(
+        "--throat", "the throat pressure follows from inlet, sections and back pressure", "give A or d (and n) of the throat only");
+
+    internal static FlowDuctException BackTwice() => NotUnderstood("--back", "the back pressure is given more than once", "keep one of p, dp, rise, p/p0, p/p1");
+
+    internal static FlowDuctException ExitAndBack() => NotUnderstood(
+        "--exit", "with sections the exit pressure follows from the back pressure; both are given", "leave p of the exit out");
+
+    internal static FlowDuctException BackMissing() => NotUnderstood(
+        "--back", "nothing says what the nozzle discharges into", "give for example --back \"p=1 atm\"");
+
+    internal static FlowDuctException LossWithSections() => NotUnderstood(
+        "--loss-coefficient", "a nozzle given by its sections takes its loss as an efficiency", "give --efficiency or --velocity-coefficient");
+
+    internal static FlowDuctException ElevationWithThroat() => NoAnswer(
+        "--exit", "elevation beside a throat is not modelled", "leave z out: ten metres are 0.1 kJ/kg");
+
+    internal static FlowDuctException SupersonicInlet() => NoAnswer(
+        "--inlet", "the inlet is faster than sound: a nozzle given by its sections is rated from a subsonic inlet", "give a slower inlet");
+
+    internal static FlowDuctException InletSectionTooNarrow() => NoAnswer(
+        "--inlet", "the inlet section passes less than the throat: it would choke first", "check the bores of inlet and throat");
+
+    internal static FlowDuctException InletSectionTooWide() => NoAnswer(
+        "--inlet", "so wide an inlet is at rest", "leave its section out");
+
+    internal static FlowDuctException NotRated(Devices.Rating.RatingOutcome outcome, Fluid fluid, double back, double p0) => outcome switch
+    {
+        Devices.Rating.RatingOutcome.Reversed => NoAnswer(
+            "--back",
+            $"p={Units.Text(back, Dimension.Pressure)} is above the stagnation pressure at the inlet, {Units.Text(p0, Dimension.Pressure)}: the flow would turn round",
+            "give a back pressure below it"),
+        Devices.Rating.RatingOutcome.TooGreatALoss => NoAnswer(
+            "--efficiency", "so great a loss leaves no flow from this throat through this exit", "give a higher efficiency or a larger exit"),
+        Devices.Rating.RatingOutcome.NoThroat or Devices.Rating.RatingOutcome.OutsideRange => NoAnswer(
+            "--inlet", "the expansion leaves the range of the fluid before it is solved", $"valid range: {fluid.RangeText}"),
+        _ => throw new InvalidOperationException($"a bracketed search of the rating did not close ({outcome})"),
+    };
 
     internal static FlowDuctException HeatWithChoking() => NoAnswer(
         "--heat", "heat beside a throat or choking is not modelled", "leave the heat out, or give an exit above the critical pressure");

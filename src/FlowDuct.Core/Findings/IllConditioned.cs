@@ -12,7 +12,7 @@ internal static class IllConditioned
 
     internal static Finding? Check(DeviceAnswer a)
     {
-        if (!a.EfficiencyImplied || a.SaturatedReading || a.Performance.IsentropicEfficiency is not double now) return null;
+        if (!a.EfficiencyImplied || a.Rating is not null || a.SaturatedReading || a.Performance.IsentropicEfficiency is not double now) return null;
         double effect = Rounding.Effect(a.Case, b => Performances.Of(b).IsentropicEfficiency, now);
         return effect <= Limit ? null : new Finding("ill-conditioned", Severity.Caution, effect, Limit, "printed rounding of the given figures", text =>
             $"the printed digits leave the implied efficiency uncertain by +/- {text.Text(effect, Dimension.Ratio, 2)}; measure the velocity or the pressures more finely");

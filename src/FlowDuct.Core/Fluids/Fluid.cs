@@ -68,6 +68,13 @@ public abstract class Fluid
         return false;
     }
 
+    /// <summary>The same fluid with its vapour kept from condensing; false where there is no such formulation.</summary>
+    internal virtual bool TryFrozen(out Fluid? frozen)
+    {
+        frozen = null;
+        return false;
+    }
+
     /// <summary>Viscosity and thermal conductivity of a state of one phase; false where no formulation holds.</summary>
     internal virtual bool TryTransport(in FluidState at, out Transport transport)
     {

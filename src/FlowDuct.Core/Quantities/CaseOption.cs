@@ -29,4 +29,13 @@ internal enum CaseOption
 
     /// <summary>Gravitational acceleration, m/s2.</summary>
     Gravity,
+
+    /// <summary>Discharge coefficient (nozzle).</summary>
+    DischargeCoefficient,
+
+    /// <summary>Included angle of the convergent part, rad (nozzle).</summary>
+    ConvergentAngle,
+
+    /// <summary>Included angle of the divergent part, rad (nozzle).</summary>
+    DivergentAngle,
 }

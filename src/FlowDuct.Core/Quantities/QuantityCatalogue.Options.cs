@@ -140,5 +140,48 @@ internal static partial class QuantityCatalogue
             Help = "Acceleration of free fall; 9.80665 m/s2 unless given.",
             Example = "9.81 m/s2",
         },
+        new()
+        {
+            Key = "discharge_coefficient",
+            Symbol = "Cd",
+            Word = "discharge-coefficient",
+            Name = "discharge coefficient",
+            Dimension = Dimension.Ratio,
+            Kind = QuantityKind.Option,
+            OptionSlot = CaseOption.DischargeCoefficient,
+            JsonKey = "discharge_coefficient",
+            Limits = new QuantityLimits(0, 1.2, false),
+            AnsweredAs = ["discharge_coefficient"],
+            Help = "Mass flow over the isentropic flow of the throat (nozzle).",
+            Example = "0.985",
+        },
+        new()
+        {
+            Key = "convergent_angle",
+            Symbol = "2theta_c",
+            Word = "convergent-angle",
+            Name = "included angle of the convergence",
+            Dimension = Dimension.Angle,
+            Kind = QuantityKind.Option,
+            OptionSlot = CaseOption.ConvergentAngle,
+            JsonKey = "convergent_angle",
+            Limits = new QuantityLimits(0, Math.PI, false),
+            Help = "Included angle of the convergent part; gives its length where both bores are known (nozzle).",
+            Example = "40 deg",
+        },
+        new()
+        {
+            Key = "divergent_angle",
+            Symbol = "2theta_d",
+            Word = "divergent-angle",
+            Name = "included angle of the divergence",
+            Dimension = Dimension.Angle,
+            Kind = QuantityKind.Option,
+            OptionSlot = CaseOption.DivergentAngle,
+            JsonKey = "divergent_angle",
+            Limits = new QuantityLimits(0, Math.PI, false),
+            Help = "Included angle of the divergent part; gives its length where both bores are known (nozzle).",
+            Example = "10 deg",
+        },
     ];
 }

@@ -19,6 +19,8 @@ internal static partial class QuantityCatalogue
             "Throat pressure at choking over inlet stagnation pressure."),
         Result("area_ratio", "A2/A1", "area ratio", Dimension.Ratio, "Exit area over inlet area."),
         Result("throat_area_ratio", "A2/At", "throat area ratio", Dimension.Ratio, "Exit area over throat area."),
+        Result("convergent_length", "Lc", "length of the convergence", Dimension.Length, "Axial length from inlet to throat bore at the included angle."),
+        Result("divergent_length", "Ld", "length of the divergence", Dimension.Length, "Axial length from throat to exit bore at the included angle."),
         Result("entropy_rise", "s2-s1", "entropy rise", Dimension.SpecificEntropy, "Entropy of the exit minus entropy of the inlet."),
         Result("exit_velocity_ideal", "V2s", "isentropic exit velocity", Dimension.Velocity,
             "Exit velocity of the isentropic expansion to the exit pressure."),
@@ -61,11 +63,11 @@ internal static partial class QuantityCatalogue
         Result("heat_rate", "Q", "heat rate", Dimension.HeatRate, "Heat added to the whole flow."),
         Result("lost_work", "wl", "lost work", Dimension.SpecificEnergy,
             "Ambient temperature times the entropy generated, per mass."),
-        Result("back_pressure_limits.subsonic", "p_sub", "greatest choking back pressure", Dimension.Pressure,
+        Result("back_pressure_limits.subsonic", "p_sub", "back pressure, choking up to", Dimension.Pressure,
             "Above this back pressure the throat is not choked."),
-        Result("back_pressure_limits.shock_at_exit", "p_shock", "back pressure of a shock at the exit", Dimension.Pressure,
+        Result("back_pressure_limits.shock_at_exit", "p_shock", "back pressure, shock at the exit", Dimension.Pressure,
             "Back pressure at which a normal shock stands in the exit plane."),
-        Result("back_pressure_limits.full_expansion", "p_full", "back pressure of full expansion", Dimension.Pressure,
+        Result("back_pressure_limits.full_expansion", "p_full", "back pressure, full expansion", Dimension.Pressure,
             "Back pressure equal to that of the supersonic exit plane."),
     ];
 
@@ -77,6 +79,12 @@ internal static partial class QuantityCatalogue
         Result("shock.M_upstream", "M_up", "Mach number before the shock", Dimension.Ratio, "Mach number just before the shock."),
         Result("shock.M_downstream", "M_dn", "Mach number behind the shock", Dimension.Ratio, "Mach number just behind the shock."),
         Result("shock.area_ratio", "As/At", "shock area ratio", Dimension.Ratio, "Area at the shock over throat area."),
+        Result("shock.stagnation_pressure_ratio", "p0dn/p0up", "stagnation pressure ratio, shock", Dimension.Ratio,
+            "Stagnation pressure behind the shock over that before it."),
+        Result("jet.pressure_ratio", "p2/pb", "exit plane over back pressure", Dimension.Ratio, "Pressure in the exit plane over back pressure."),
+        Result("jet.wave_angle", "beta", "shock angle at the lip", Dimension.Angle, "Angle of the oblique shock at the lip to the jet (overexpanded)."),
+        Result("jet.turning_angle", "delta", "turning of the jet at the lip", Dimension.Angle,
+            "Angle by which the jet turns at the lip: inwards overexpanded, outwards underexpanded."),
     ];
 
     private static QuantityRow Result(

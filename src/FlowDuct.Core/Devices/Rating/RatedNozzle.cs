@@ -1,0 +1,119 @@
+using FlowDuct.Errors;
+using FlowDuct.Flow;
+using FlowDuct.Fluids;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Devices.Rating;
+
+/// <summary>Answers a nozzle that is given by sections and back pressure.</summary>
+internal static class RatedNozzle
+{
+    // Unit areas serve a nozzle without sections: the flow follows from nothing then, and stays unknown.
+    private const double UnitArea = 1;
+
+    internal static DeviceAnswer Solve(DeviceCase c)
+    {
+        Refuse(c);
+        Inlet inlet = RatedInlet.Solve(c);
+        if (inlet.V > inlet.State.w) throw Refusals.SupersonicInlet();
+        FluidState rest = inlet.Station.Stagnation ?? throw Refusals.NoSuchInlet(inlet.Given.Given);
+        NozzleGeometryReader geometry = NozzleGeometryReader.Read(c, inlet.State.p, rest.p);
+        NozzleRating rating = Rate(c, rest, geometry);
+        return Assemble(c, inlet, geometry, rating);
+    }
+
+    /// <summary>The rating at an inlet; a flow given without a coefficient implies the coefficient.</summary>
+    internal static NozzleRating Rate(DeviceCase c, in FluidState rest, NozzleGeometryReader geometry)
+    {
+        double efficiency = c.Has(CaseOption.VelocityCoefficient)
+            ? c.Value(CaseOption.VelocityCoefficient) * c.Value(CaseOption.VelocityCoefficient)
+            : c.ValueOr(CaseOption.Efficiency, 1);
+        double? coefficient = c.Has(CaseOption.DischargeCoefficient) ? c.Value(CaseOption.DischargeCoefficient) : null;
+        bool throat = geometry.Throat.Has(Figure.Section), exit = geometry.Exit.Has(Figure.Section);
+        double exitArea = exit ? NozzleGeometryReader.Area(geometry.Exit) : throat ? NozzleGeometryReader.Area(geometry.Throat) : UnitArea;
+        double throatArea = throat ? NozzleGeometryReader.Area(geometry.Throat) : exitArea;
+        var nozzle = new NozzleGeometry(throatArea, exitArea, efficiency, coefficient);
+        var inlet = new RatingInlet(c.Fluid, rest.h, rest.s, rest.p);
+        NozzleRating rating = One(inlet, nozzle, geometry);
+        if (coefficient is not null || !c.Has(CaseOption.Flow) || c.FlowIsVolume || !(throat || exit) || rating.IsentropicFlow == 0) return rating;
+        return One(inlet, nozzle with { DischargeCoefficient = c.Value(CaseOption.Flow) / rating.IsentropicFlow }, geometry);
+    }
+
+    private static NozzleRating One(in RatingInlet inlet, in NozzleGeometry nozzle, NozzleGeometryReader geometry)
+    {
+        bool divergent = geometry.Shape == NozzleShape.ConvergentDivergent && nozzle.ExitArea > nozzle.ThroatArea;
+        RatingOutcome outcome = divergent
+            ? DivergentNozzle.Rate(inlet, nozzle, geometry.Back, out NozzleRating rating)
+            : ConvergentNozzle.Rate(inlet, nozzle, geometry.Back, out rating);
+        return outcome == RatingOutcome.Ok ? rating : throw Refusals.NotRated(outcome, inlet.Fluid, geometry.Back, inlet.p0);
+    }
+
+    private static void Refuse(DeviceCase c)
+    {
+        if (c.Has(CaseOption.Heat) || c.Has(CaseOption.HeatLoss)) throw Refusals.HeatWithChoking();
+        if (c.Has(CaseOption.LossCoefficient)) throw Refusals.LossWithSections();
+        if (c.Has(CaseOption.Efficiency) && c.Has(CaseOption.VelocityCoefficient)) throw Refusals.LossTwice("efficiency, velocity coefficient");
+        foreach (GivenSlots slots in (GivenSlots[])[c.Inlet, c.Throat, c.Exit])
+        {
+            if (slots.Has((int)StationSymbol.Elevation) && slots.Value((int)StationSymbol.Elevation) != 0) throw Refusals.ElevationWithThroat();
+        }
+    }
+
+    private static DeviceAnswer Assemble(DeviceCase c, Inlet inlet, NozzleGeometryReader geometry, in NozzleRating rating)
+    {
+        bool sections = geometry.Throat.Has(Figure.Section) || geometry.Exit.Has(Figure.Section);
+        double? flow = sections ? rating.MassFlow : inlet.MassFlow;
+        bool divergent = geometry.Shape == NozzleShape.ConvergentDivergent && geometry.Throat.Has(Figure.Section) && geometry.Exit.Has(Figure.Section);
+        StationFigures exitSection = geometry.Exit.Has(Figure.Section) ? geometry.Exit : geometry.Throat;
+        List<string> assumptions = [];
+        if (geometry.ShapeWords.Length > 0) assumptions.Add(geometry.ShapeWords);
+        if (rating.AtKink && rating.Choked) assumptions.Add("the flux is greatest where the flow meets saturation, not where M = 1");
+        if (c.Back.Mask == 0) assumptions.Add("back pressure: the given exit pressure");
+        if (sections) assumptions.Add(CoefficientWords(inlet));
+        var answer = new DeviceAnswer
+        {
+            Case = c,
+            Inlet = inlet.Station.Carrying(flow),
+            Throat = divergent ? At(c.Fluid, rating.Throat, rating.ThroatVelocity, geometry.Throat) : null,
+            Exit = At(c.Fluid, rating.Exit, rating.ExitVelocity, exitSection).Carrying(flow),
+            Performance = Figures(c, rating, sections) with { MassFlow = flow, CriticalPressureRatio = rating.CriticalPressure / inlet.Station.Stagnation!.Value.p },
+            Audit = new Audit(),
+            InletTakenAtRest = inlet.TakenAtRest,
+            TakenIdeal = !c.Has(CaseOption.Efficiency) && !c.Has(CaseOption.VelocityCoefficient),
+            EfficiencyImplied = rating.Regime is Regime.ShockInDivergence or Regime.ShockAtExit or Regime.ChokedSubsonicExit,
+            Assumptions = assumptions,
+            Rating = rating,
+            BackPressure = geometry.Back,
+        };
+        double V1 = inlet.V, V2 = rating.ExitVelocity;
+        return answer with { Ledger = new Ledger(inlet.State.h, V1 * V1 / 2, 0, 0, rating.Exit.h, V2 * V2 / 2, 0) };
+    }
+
+    private static string CoefficientWords(Inlet inlet) => inlet.V > 0
+        ? "discharge coefficient: on the isentropic flow with the approach velocity"
+        : "discharge coefficient: on the isentropic flow from rest";
+
+    private static StationAnswer At(Fluid fluid, in FluidState state, double V, StationFigures section) => StationAnswer.From(fluid, state, V) with
+    {
+        Openings = section.Openings,
+        Area = section.Has(Figure.Section) ? section[Figure.Section] : null,
+    };
+
+    private static Performance Figures(DeviceCase c, in NozzleRating rating, bool sections)
+    {
+        double? coefficient = sections && rating.IsentropicFlow > 0 ? rating.MassFlow / rating.IsentropicFlow : null;
+        return new Performance
+        {
+            Regime = RegimeWords.Of(rating.Regime),
+            Choked = rating.Choked,
+            DischargeCoefficient = coefficient,
+            Limits = rating.Limits,
+            Shock = rating.Shock,
+            ShockStagnationPressureRatio = rating.Shock is ShockAnswer shock ? StagnationRatio(c.Fluid, shock) : null,
+        };
+    }
+
+    private static double? StagnationRatio(Fluid fluid, in ShockAnswer shock) =>
+        Stagnation.Of(fluid, shock.Upstream, shock.V1, out FluidState before) == Outcome.Ok
+        && Stagnation.Of(fluid, shock.Downstream, shock.V2, out FluidState behind) == Outcome.Ok ? behind.p / before.p : null;
+}

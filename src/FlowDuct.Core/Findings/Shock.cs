@@ -1,0 +1,17 @@
+using FlowDuct.Devices;
+using FlowDuct.Devices.Rating;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Findings;
+
+/// <summary>A normal shock stands in the divergence or in the exit plane.</summary>
+internal static class Shock
+{
+    internal static Finding? Check(DeviceAnswer a)
+    {
+        if (a.Performance.Shock is not ShockAnswer shock) return null;
+        double M = shock.V1 / shock.Upstream.w;
+        return new Finding("shock", Severity.Caution, shock.AreaRatio, M, "balances of mass, momentum and energy", text =>
+            $"a normal shock stands at {text.Text(shock.AreaRatio, Dimension.Ratio, 4)} times the throat area, M {text.Text(M, Dimension.Ratio, 4)} before it; a real one is a train of waves that moves and shakes");
+    }
+}
