@@ -54,6 +54,9 @@ internal sealed class CaseBinder
             Fluid = fluid,
             Shape = Choice("--shape", NozzleShape.Auto, ("convergent", NozzleShape.Convergent), ("convergent-divergent", NozzleShape.ConvergentDivergent)),
             Branch = Choice("--branch", Branch.Ask, ("subsonic", Branch.Subsonic), ("supersonic", Branch.Supersonic)),
+            Expansion = Choice(
+                "--expansion", ExpansionModel.Equilibrium, ("equilibrium", ExpansionModel.Equilibrium), ("supersaturated", ExpansionModel.Supersaturated),
+                ("single-phase", ExpansionModel.SinglePhase)),
             RecoveryBasis = Choice("--recovery-basis", RecoveryBasis.Stagnation, ("stagnation", RecoveryBasis.Stagnation), ("dynamic", RecoveryBasis.Dynamic)),
             AmbientPressure = AmbientPressure,
             AmbientTemperature = AmbientTemperature,

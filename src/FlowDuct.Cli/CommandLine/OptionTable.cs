@@ -28,6 +28,7 @@ internal static class OptionTable
         Of(CaseOption.BoundaryTemperature, "TEMP", CommandName.Devices),
         Of(CaseOption.Gravity, "ACCEL", CommandName.Devices),
         new("--shape", "SHAPE", "convergent or convergent-divergent; decided by the figures if not given.", "convergent", CommandName.Nozzle),
+        new("--expansion", "MODEL", "equilibrium (the default), supersaturated (vapour does not condense) or single-phase (liquid does not flash).", "supersaturated", CommandName.Nozzle),
         new("--branch", "BRANCH", "subsonic or supersonic, where two exits have the same figures.", "subsonic", CommandName.Devices),
         new("--format", "FORMAT", "text (the default) or json (coherent SI whatever the units).", "json", CommandName.Answering | CommandName.SelfCheck, OfTheCase: false),
         new("--output", "FILE", "Write to a file, whole or not at all.", "answer.txt", CommandName.Answering | CommandName.SelfCheck, OfTheCase: false),

@@ -40,6 +40,9 @@ internal sealed record DeviceAnswer : IStations
     /// <summary>The rating behind the answer, where sections and a back pressure were given; else null.</summary>
     internal Rating.NozzleRating? Rating { get; init; }
 
+    /// <summary>The fluid that expands, where its phase is held; else null.</summary>
+    internal Fluid? Expanding { get; init; }
+
     /// <summary>The back pressure that the rating used, Pa; null where none was given.</summary>
     internal double? BackPressure { get; init; }
 

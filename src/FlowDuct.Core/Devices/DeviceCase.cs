@@ -26,6 +26,19 @@ internal enum NozzleShape
     ConvergentDivergent,
 }
 
+/// <summary>What the fluid does where an expansion meets saturation.</summary>
+internal enum ExpansionModel
+{
+    /// <summary>Both phases stay in equilibrium.</summary>
+    Equilibrium,
+
+    /// <summary>Vapour does not condense.</summary>
+    Supersaturated,
+
+    /// <summary>Liquid does not flash.</summary>
+    SinglePhase,
+}
+
 /// <summary>Which of two solutions is wanted.</summary>
 internal enum Branch
 {
@@ -65,6 +78,8 @@ internal sealed record DeviceCase
     internal NozzleShape Shape { get; init; }
 
     internal Branch Branch { get; init; }
+
+    internal ExpansionModel Expansion { get; init; }
 
     internal RecoveryBasis RecoveryBasis { get; init; }
 

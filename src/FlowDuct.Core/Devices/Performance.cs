@@ -41,6 +41,8 @@ internal sealed record Performance
 
     internal Rating.JetAnswer? Jet { get; init; }
 
+    internal Rating.MetastableAnswer? Metastable { get; init; }
+
     internal double? EntropyRise { get; init; }
 
     internal double? ExitVelocityIdeal { get; init; }

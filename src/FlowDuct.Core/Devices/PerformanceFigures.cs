@@ -45,6 +45,11 @@ internal static class PerformanceFigures
         ("jet.pressure_ratio", p => p.Jet?.PressureRatio),
         ("jet.wave_angle", p => p.Jet?.WaveAngle),
         ("jet.turning_angle", p => p.Jet?.TurningAngle),
+        ("metastable.undercooling", p => p.Metastable?.Undercooling),
+        ("metastable.supersaturation_ratio", p => p.Metastable?.SupersaturationRatio),
+        ("metastable.equilibrium_flow", p => p.Metastable?.EquilibriumFlow),
+        ("metastable.reverted_moisture", p => p.Metastable?.RevertedMoisture),
+        ("metastable.flux_change", p => p.Metastable?.FluxChange),
     ];
 
     /// <summary>The number of a key, or null where it cannot be known.</summary>

@@ -141,6 +141,14 @@ internal static class Refusals
     internal static FlowDuctException BackMissing() => NotUnderstood(
         "--back", "nothing says what the nozzle discharges into", "give for example --back \"p=1 atm\"");
 
+    internal static FlowDuctException ExpansionDoesNotFit(ExpansionModel model) => NotUnderstood(
+        "--expansion",
+        model == ExpansionModel.SinglePhase ? "single-phase keeps a liquid from flashing, and this inlet is none of water" : "supersaturated keeps a vapour from condensing, and this inlet is none of water",
+        "leave it out for equilibrium");
+
+    internal static FlowDuctException ExpansionWithoutSections() => NotUnderstood(
+        "--expansion", "a held phase is solved for a nozzle with --back or --throat", "add --back, for example --back \"p=1 bar\"");
+
     internal static FlowDuctException LossWithSections() => NotUnderstood(
         "--loss-coefficient", "a nozzle given by its sections takes its loss as an efficiency", "give --efficiency or --velocity-coefficient");
 

@@ -14,6 +14,13 @@ internal static class ModelDoubtful
     {
         FluidState inlet = a.Inlet.State;
         bool wet = inlet.Phase == Phase.Wet;
+        if (a.Performance.Metastable is Devices.Rating.MetastableAnswer held)
+        {
+            string what = a.Exit.State.Phase == Phase.Liquid ? "the liquid is kept from flashing" : "the vapour is kept from condensing";
+            return new Finding("model-doubtful", Severity.Caution, held.Undercooling, null, "assumption", _ =>
+                $"{what}: where it gives way is not predicted, and the truth lies between this and equilibrium");
+        }
+
         if (a.Case.Device == DeviceKind.Diffuser && (wet || a.Exit.State.Phase == Phase.Wet))
         {
             return new Finding("model-doubtful", Severity.Caution, null, null, "assumption", _ =>

@@ -1,3 +1,5 @@
+using System.Diagnostics.CodeAnalysis;
+
 namespace FlowDuct.Fluids;
 
 /// <summary>An equation of state, the only thing that a device knows about its fluid.</summary>
@@ -68,10 +70,13 @@ public abstract class Fluid
         return false;
     }
 
-    /// <summary>The same fluid with its vapour kept from condensing; false where there is no such formulation.</summary>
-    internal virtual bool TryFrozen(out Fluid? frozen)
+    /// <summary>
+    /// The same fluid with the phase of a state held: vapour that does not condense, liquid that does not flash. False where it has one phase
+    /// only, or the state is wet already.
+    /// </summary>
+    internal virtual bool TryHeld(in FluidState at, [NotNullWhen(true)] out Fluid? held)
     {
-        frozen = null;
+        held = null;
         return false;
     }
 

@@ -87,6 +87,21 @@ internal static partial class QuantityCatalogue
             "Angle by which the jet turns at the lip: inwards overexpanded, outwards underexpanded."),
     ];
 
+    /// <summary>A phase that is held past saturation.</summary>
+    private static QuantityRow[] MetastableRows() =>
+    [
+        Result("metastable.undercooling", "dTu", "undercooling in the exit", Dimension.TemperatureDifference,
+            "Saturation temperature at the exit pressure minus exit temperature."),
+        Result("metastable.supersaturation_ratio", "p/psat", "supersaturation ratio in the exit", Dimension.Ratio,
+            "Exit pressure over saturation pressure at the exit temperature."),
+        Result("metastable.equilibrium_flow", "qm_eq", "mass flow at equilibrium", Dimension.MassFlow,
+            "Flow of the same nozzle with both phases in equilibrium."),
+        Result("metastable.reverted_moisture", "y_rev", "moisture after reversion", Dimension.Ratio,
+            "Moisture after the return to equilibrium at constant pressure, velocity and enthalpy."),
+        Result("metastable.flux_change", "G/G", "mass flux after reversion", Dimension.Ratio,
+            "Mass flux behind the return to equilibrium over that before it: the duct would have to widen by its inverse."),
+    ];
+
     private static QuantityRow Result(
         string key, string symbol, string name, Dimension dimension, string help, bool isText = false) => new()
         {

@@ -16,8 +16,8 @@ internal static class ConvergentNozzle
         rating = default;
         double band = DeviceSolver.LimitTolerance * inlet.p0;
         if (back > inlet.p0 + band) return RatingOutcome.Reversed;
-        if (!Choking.TryFind(inlet.Fluid, inlet.h0, inlet.s, inlet.p0, out FluidState ideal, out bool atKink)) return RatingOutcome.NoThroat;
         var path = new LossPath(inlet.Fluid, inlet.h0, inlet.h0, inlet.s, geometry.Efficiency);
+        if (!Choking.TryFind(inlet.Fluid, inlet.h0, inlet.s, inlet.p0, out FluidState ideal, out bool atKink)) return WithoutThroat(inlet, path, geometry, back, out rating);
         if (!TrySonic(path, ideal, inlet.p0, out FluidState sonic, out double sonicV)) return RatingOutcome.OutsideRange;
         bool choked = back <= sonic.p + band;
         FluidState exit = sonic;
@@ -35,6 +35,25 @@ internal static class ConvergentNozzle
             AtKink = atKink,
             Choked = choked,
             Limits = new BackPressureLimits(sonic.p, null, null),
+        };
+        return RatingOutcome.Ok;
+    }
+
+    // A liquid that does not flash reaches no speed of sound: the exit lies at any back pressure.
+    private static RatingOutcome WithoutThroat(
+        in RatingInlet inlet, LossPath path, in NozzleGeometry geometry, double back, out NozzleRating rating)
+    {
+        rating = default;
+        if (path.At(Math.Min(back, inlet.p0), default, out FluidState exit, out double V) != Outcome.Ok || !(V < exit.w)) return RatingOutcome.NoThroat;
+        if (inlet.Fluid.FromPS(exit.p, inlet.s, exit, out FluidState ideal) != Outcome.Ok) return RatingOutcome.OutsideRange;
+        double isentropic = Energy.Velocity(inlet.h0, ideal.h) / ideal.v * geometry.ExitArea;
+        rating = new NozzleRating
+        {
+            Regime = back >= inlet.p0 * (1 - DeviceSolver.LimitTolerance) ? Regime.NoFlow : Regime.Subsonic,
+            MassFlow = geometry.DischargeCoefficient is double Cd ? Cd * isentropic : V / exit.v * geometry.ExitArea,
+            IsentropicFlow = isentropic,
+            Exit = exit,
+            ExitVelocity = V,
         };
         return RatingOutcome.Ok;
     }

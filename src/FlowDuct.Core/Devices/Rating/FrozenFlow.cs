@@ -11,13 +11,11 @@ internal static class FrozenFlow
     {
         if (!a.Fluid.HasSaturation || a.Rating is not NozzleRating rating || a.Inlet.Stagnation is not FluidState rest) return null;
         double area = ThroatArea(a), back = a.BackPressure!.Value;
-        if (rest.Phase is Phase.Liquid or Phase.SaturatedLiquid)
-            return back < rest.p ? area * Math.Sqrt(2 * (rest.p - back) / rest.v) : null;
         bool crosses = rating.AtKink || rating.Exit.Phase == Phase.Wet || rating.Throat.Phase == Phase.Wet;
-        if (!crosses || !a.Fluid.TryFrozen(out Fluid? frozen)) return null;
-        var inlet = new RatingInlet(frozen!, rest.h, rest.s, rest.p);
-        RatingOutcome outcome = ConvergentNozzle.Rate(inlet, new NozzleGeometry(area, area, 1, null), back, out NozzleRating dry);
-        return outcome == RatingOutcome.Ok ? dry.MassFlow : null;
+        if (!crosses || !a.Fluid.TryHeld(rest, out Fluid? held)) return null;
+        var inlet = new RatingInlet(held, rest.h, rest.s, rest.p);
+        RatingOutcome outcome = ConvergentNozzle.Rate(inlet, new NozzleGeometry(area, area, 1, null), back, out NozzleRating frozen);
+        return outcome == RatingOutcome.Ok ? frozen.MassFlow : null;
     }
 
     private static double ThroatArea(DeviceAnswer a)

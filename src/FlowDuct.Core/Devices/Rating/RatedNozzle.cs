@@ -33,10 +33,19 @@ internal static class RatedNozzle
         double exitArea = exit ? NozzleGeometryReader.Area(geometry.Exit) : throat ? NozzleGeometryReader.Area(geometry.Throat) : UnitArea;
         double throatArea = throat ? NozzleGeometryReader.Area(geometry.Throat) : exitArea;
         var nozzle = new NozzleGeometry(throatArea, exitArea, efficiency, coefficient);
-        var inlet = new RatingInlet(c.Fluid, rest.h, rest.s, rest.p);
+        var inlet = new RatingInlet(HeldFluid(c, rest), rest.h, rest.s, rest.p);
         NozzleRating rating = One(inlet, nozzle, geometry);
         if (coefficient is not null || !c.Has(CaseOption.Flow) || c.FlowIsVolume || !(throat || exit) || rating.IsentropicFlow == 0) return rating;
         return One(inlet, nozzle with { DischargeCoefficient = c.Value(CaseOption.Flow) / rating.IsentropicFlow }, geometry);
+    }
+
+    /// <summary>The fluid that expands: the one of the case, or it with the phase of the inlet held.</summary>
+    internal static Fluid HeldFluid(DeviceCase c, in FluidState rest)
+    {
+        if (c.Expansion == ExpansionModel.Equilibrium) return c.Fluid;
+        bool liquid = rest.Phase is Phase.Liquid or Phase.SaturatedLiquid;
+        if (liquid != (c.Expansion == ExpansionModel.SinglePhase) || !c.Fluid.TryHeld(rest, out Fluid? held)) throw Refusals.ExpansionDoesNotFit(c.Expansion);
+        return held;
     }
 
     private static NozzleRating One(in RatingInlet inlet, in NozzleGeometry nozzle, NozzleGeometryReader geometry)
@@ -65,7 +74,9 @@ internal static class RatedNozzle
         double? flow = sections ? rating.MassFlow : inlet.MassFlow;
         bool divergent = geometry.Shape == NozzleShape.ConvergentDivergent && geometry.Throat.Has(Figure.Section) && geometry.Exit.Has(Figure.Section);
         StationFigures exitSection = geometry.Exit.Has(Figure.Section) ? geometry.Exit : geometry.Throat;
+        Fluid fluid = HeldFluid(c, inlet.Station.Stagnation!.Value);
         List<string> assumptions = [];
+        if (!ReferenceEquals(fluid, c.Fluid)) assumptions.Add("expansion: " + fluid.Formulation);
         if (geometry.ShapeWords.Length > 0) assumptions.Add(geometry.ShapeWords);
         if (rating.AtKink && rating.Choked) assumptions.Add("the flux is greatest where the flow meets saturation, not where M = 1");
         if (c.Back.Mask == 0) assumptions.Add("back pressure: the given exit pressure");
@@ -74,9 +85,9 @@ internal static class RatedNozzle
         {
             Case = c,
             Inlet = inlet.Station.Carrying(flow),
-            Throat = divergent ? At(c.Fluid, rating.Throat, rating.ThroatVelocity, geometry.Throat) : null,
-            Exit = At(c.Fluid, rating.Exit, rating.ExitVelocity, exitSection).Carrying(flow),
-            Performance = Figures(c, rating, sections) with { MassFlow = flow, CriticalPressureRatio = rating.CriticalPressure / inlet.Station.Stagnation!.Value.p },
+            Throat = divergent ? At(fluid, rating.Throat, rating.ThroatVelocity, geometry.Throat) : null,
+            Exit = At(fluid, rating.Exit, rating.ExitVelocity, exitSection).Carrying(flow),
+            Performance = Figures(c, rating, sections) with { MassFlow = flow, CriticalPressureRatio = rating.CriticalPressure > 0 ? rating.CriticalPressure / inlet.Station.Stagnation!.Value.p : null },
             Audit = new Audit(),
             InletTakenAtRest = inlet.TakenAtRest,
             TakenIdeal = !c.Has(CaseOption.Efficiency) && !c.Has(CaseOption.VelocityCoefficient),
@@ -84,6 +95,7 @@ internal static class RatedNozzle
             Assumptions = assumptions,
             Rating = rating,
             BackPressure = geometry.Back,
+            Expanding = fluid,
         };
         double V1 = inlet.V, V2 = rating.ExitVelocity;
         return answer with { Ledger = new Ledger(inlet.State.h, V1 * V1 / 2, 0, 0, rating.Exit.h, V2 * V2 / 2, 0) };

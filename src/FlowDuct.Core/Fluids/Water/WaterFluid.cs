@@ -1,3 +1,5 @@
+using System.Diagnostics.CodeAnalysis;
+
 namespace FlowDuct.Fluids.Water;
 
 /// <summary>Water and steam by IAPWS-IF97, IAPWS R7-97(2012), regions 1 to 5; wet states are homogeneous mixtures at equilibrium.</summary>
@@ -93,6 +95,17 @@ public sealed class WaterFluid : Fluid
         if (!(pair.Vapour.v > pair.Liquid.v)) return false;
         w = pair.SpeedOfSound(at.x, at.v);
         return true;
+    }
+
+    internal override bool TryHeld(in FluidState at, [NotNullWhen(true)] out Fluid? held)
+    {
+        held = at.Phase switch
+        {
+            Phase.Liquid or Phase.SaturatedLiquid => UnflashedWater.Instance,
+            Phase.SuperheatedVapour or Phase.SaturatedVapour or Phase.Supercritical => SupersaturatedWater.Instance,
+            _ => null,
+        };
+        return held is not null;
     }
 
     internal override bool TryTransport(in FluidState at, out Transport transport)
