@@ -1,5 +1,6 @@
 using FlowDuct.Cli.Rendering;
 using FlowDuct.Devices;
+using FlowDuct.Devices.Inverse;
 using FlowDuct.Errors;
 using FlowDuct.Findings;
 using FlowDuct.Fluids.Water.Verification;
@@ -77,10 +78,19 @@ internal static class Application
         var binder = new CaseBinder(arguments);
         RenderOptions options = RenderBinder.Bind(arguments, binder, terminal);
         bool json = RenderBinder.WantsJson(binder);
-        DeviceAnswer answer = DeviceSolver.Solve(binder.Device(arguments.Command == CommandName.Nozzle ? DeviceKind.Nozzle : DeviceKind.Diffuser));
+        DeviceCase c = binder.Device(arguments.Command == CommandName.Nozzle ? DeviceKind.Nozzle : DeviceKind.Diffuser);
+        DeviceAnswer answer = binder.Question() is InverseQuestion question ? Found(question, c, binder.RootNumber) : DeviceSolver.Solve(c);
         if (json) JsonAnswer.Write(memory, answer, options);
         else Text(memory, to => TextAnswer.Write(to, answer, options));
         return answer.Passes(options.Strict) ? ExitStatus.Passed : ExitStatus.Failed;
+    }
+
+    private static DeviceAnswer Found(InverseQuestion question, DeviceCase c, int? number)
+    {
+        IReadOnlyList<(DeviceAnswer Answer, FoundFigure Found)> roots = question.Solve(c);
+        int chosen = roots.Count == 1 ? 1 : number is int n && n >= 1 && n <= roots.Count ? n : throw Refusals.SeveralFound([.. roots.Select(root => root.Found)]);
+        DeviceAnswer answer = roots[chosen - 1].Answer with { Found = roots[chosen - 1].Found };
+        return answer with { Findings = FindingRules.Apply(answer) };
     }
 
     private static int Text(MemoryStream memory, Action<TextWriter> write)

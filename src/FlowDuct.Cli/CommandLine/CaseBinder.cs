@@ -1,4 +1,6 @@
+using System.Globalization;
 using FlowDuct.Devices;
+using FlowDuct.Devices.Inverse;
 using FlowDuct.Errors;
 using FlowDuct.Fluids;
 using FlowDuct.Quantities;
@@ -53,7 +55,7 @@ internal sealed class CaseBinder
             Device = kind,
             Fluid = fluid,
             Shape = Choice("--shape", NozzleShape.Auto, ("convergent", NozzleShape.Convergent), ("convergent-divergent", NozzleShape.ConvergentDivergent)),
-            Branch = Choice("--branch", Branch.Ask, ("subsonic", Branch.Subsonic), ("supersonic", Branch.Supersonic)),
+            Branch = RootNumber is null ? Choice("--branch", Branch.Ask, ("subsonic", Branch.Subsonic), ("supersonic", Branch.Supersonic)) : Branch.Ask,
             Expansion = Choice(
                 "--expansion", ExpansionModel.Equilibrium, ("equilibrium", ExpansionModel.Equilibrium), ("supersaturated", ExpansionModel.Supersaturated),
                 ("single-phase", ExpansionModel.SinglePhase)),
@@ -66,6 +68,24 @@ internal sealed class CaseBinder
         };
         (c.Inlet, c.Exit, c.Options, c.Throat, c.Back) = (inlet, exit, options, throat, back);
         return c;
+    }
+
+    /// <summary>The number of the answer chosen among several, counted from 1; null where --branch is a word or not given.</summary>
+    internal int? RootNumber => _arguments.Has("--find") && int.TryParse(_arguments.Value("--branch"), NumberStyles.None, CultureInfo.InvariantCulture, out int number) ? number : null;
+
+    /// <summary>What is asked backwards; null where nothing is.</summary>
+    internal InverseQuestion? Question()
+    {
+        if (!_arguments.Has("--find") && !_arguments.Has("--target")) return null;
+        string name = _arguments.Value("--find") ?? throw Usage.Refuse("--target", "a target needs the figure that may move", "add --find, for example --find back.p");
+        string target = _arguments.Value("--target") ?? throw Usage.Refuse("--find", "nothing says what the figure has to reach", "add --target, for example --target \"shock.area_ratio=1.5\"");
+        CaseSlot unknown = CaseSlot.Find(name.Replace('-', '_')) ?? throw Usage.Refuse("--find", $"{Echo.Ascii(name)} is no figure of a case", "write for example inlet.p0, back.p, exit.d, throat.d, efficiency, flow");
+        int equals = target.IndexOf('=', StringComparison.Ordinal);
+        string left = equals < 0 ? target : target[..equals].Trim();
+        ResultName result = ResultName.Find(left) ?? throw Usage.Refuse("--target", $"{Echo.Ascii(left)} is no result", "write for example mass_flow, exit.V, shock.area_ratio, throat.p");
+        if (equals < 0) throw Usage.Refuse("--target", $"{Echo.Ascii(target)} has no value", $"write for example --target \"{left}=...\" with its unit");
+        GivenValue value = ValueParser.Parse(new ValueContext("--target", result.Row, left + "="), target[(equals + 1)..].Trim(), AmbientPressure);
+        return new InverseQuestion(unknown, result, value.Si);
     }
 
     /// <summary>One of a few words, or the default where the option is not given.</summary>

@@ -1,5 +1,6 @@
 using System.Text.Json;
 using FlowDuct.Devices;
+using FlowDuct.Devices.Inverse;
 using FlowDuct.Findings;
 using FlowDuct.Quantities;
 
@@ -54,9 +55,27 @@ internal static class JsonAnswer
         if (!c.AmbientGiven) json.WriteNumber("ambient.p", c.AmbientPressure);
         if (!c.AmbientGiven) json.WriteNumber("ambient.T", c.AmbientTemperature);
         json.WriteEndObject();
+        Found(json, answer.Found);
         json.WriteStartArray("assumptions");
         foreach (string line in answer.Assumptions) json.WriteStringValue(line);
         json.WriteEndArray();
+        json.WriteEndObject();
+    }
+
+    private static void Found(Utf8JsonWriter json, FoundFigure? found)
+    {
+        if (found is null)
+        {
+            json.WriteNull("found");
+            return;
+        }
+
+        json.WriteStartObject("found");
+        json.WriteString("name", found.Question.Unknown.Name);
+        json.WriteNumber("value", found.Value);
+        json.WriteString("target", found.Question.Target.Name);
+        json.WriteNumber("target_value", found.Question.Value);
+        JsonNumbers.Write(json, "sensitivity", found.Sensitivity);
         json.WriteEndObject();
     }
 

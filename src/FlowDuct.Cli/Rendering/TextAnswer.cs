@@ -1,4 +1,5 @@
 using FlowDuct.Devices;
+using FlowDuct.Devices.Inverse;
 using FlowDuct.Findings;
 using FlowDuct.Fluids;
 using FlowDuct.Quantities;
@@ -47,6 +48,7 @@ internal static class TextAnswer
 
     private static void Device(TextWriter to, DeviceAnswer answer, RenderOptions options)
     {
+        Found(to, answer, options);
         to.WriteLine("device");
         foreach (QuantityRow row in QuantityCatalogue.Performance)
         {
@@ -57,6 +59,27 @@ internal static class TextAnswer
             Line(to, row.Name, TextFigures.Number(value, unit, options), unitWord + Remark(answer, row.Key));
         }
     }
+
+    // What was asked backwards, before everything that follows from it.
+    private static void Found(TextWriter to, DeviceAnswer answer, RenderOptions options)
+    {
+        if (answer.Found is not FoundFigure found) return;
+        InverseQuestion question = found.Question;
+        UnitReading unit = TextFigures.UnitOf(question.Unknown.Row, options), of = TextFigures.UnitOf(question.Target.Row, options);
+        to.WriteLine("found");
+        Line(to, question.Unknown.Name, options.Units.Number(found.Value, unit, (options.Digits ?? TextFigures.UsualDigits) + 2), UnitWord(unit));
+        Line(to, $"for {question.Target.Name}", TextFigures.Number(question.Value, of, options), UnitWord(of));
+        if (found.Sensitivity is double move) Line(to, "1 % of it moves the target by", options.Units.Text(move, Dimension.Ratio, 3), "%");
+        if (found.AlsoBetween is Interval also)
+        {
+            string from = options.Units.Text(also.Least, question.Unknown.Row.Dimension, 3), upTo = options.Units.Text(also.Greatest, question.Unknown.Row.Dimension, 3);
+            TextWrap.Write(to, "  ", $"any {question.Unknown.Name} from {from} to {upTo} at least meets the target too", 2);
+        }
+
+        to.WriteLine();
+    }
+
+    private static string UnitWord(in UnitReading unit) => unit.Dimension is Dimension.Ratio ? string.Empty : unit.Spelling;
 
     private static string Remark(DeviceAnswer answer, string key) => key switch
     {

@@ -40,6 +40,9 @@ internal sealed record DeviceAnswer : IStations
     /// <summary>The rating behind the answer, where sections and a back pressure were given; else null.</summary>
     internal Rating.NozzleRating? Rating { get; init; }
 
+    /// <summary>The figure that was found for a target; null where none was asked for.</summary>
+    internal Inverse.FoundFigure? Found { get; init; }
+
     /// <summary>The fluid that expands, where its phase is held; else null.</summary>
     internal Fluid? Expanding { get; init; }
 

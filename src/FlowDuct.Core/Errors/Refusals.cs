@@ -1,4 +1,5 @@
 using FlowDuct.Devices;
+using FlowDuct.Devices.Inverse;
 using FlowDuct.Fluids;
 using FlowDuct.Quantities;
 
@@ -140,6 +141,29 @@ internal static class Refusals
 
     internal static FlowDuctException BackMissing() => NotUnderstood(
         "--back", "nothing says what the nozzle discharges into", "give for example --back \"p=1 atm\"");
+
+    internal static FlowDuctException FindGiven(string name) => NotUnderstood(
+        "--find", $"{name} is given too", "leave it out of the case, or find another figure");
+
+    internal static FlowDuctException FindAnything(InverseQuestion question, double a, double b) => NoAnswer(
+        "--find",
+        $"{question.Target.Name} has the wanted value for any {question.Unknown.Name} from {Units.Text(a, question.Unknown.Row.Dimension, 3)} to {Units.Text(b, question.Unknown.Row.Dimension, 3)} at least",
+        "the target does not depend on it there; ask for another figure");
+
+    internal static FlowDuctException FindNowhere(InverseQuestion question, double a, double b) => NoAnswer(
+        "--find",
+        $"no {question.Unknown.Name} from {Units.Text(a, question.Unknown.Row.Dimension, 3)} to {Units.Text(b, question.Unknown.Row.Dimension, 3)} gives an answer that has {question.Target.Name}",
+        "check the rest of the case with a value of your own");
+
+    internal static FlowDuctException FindOutOfReach(InverseQuestion question, double least, double greatest) => NoAnswer(
+        "--target",
+        $"{question.Target.Name} reaches {Units.Text(least, question.Target.Row.Dimension, 4)} to {Units.Text(greatest, question.Target.Row.Dimension, 4)}, whatever {question.Unknown.Name} is",
+        "give a target between, or find another figure");
+
+    internal static FlowDuctException SeveralFound(IReadOnlyList<FoundFigure> found) => NoAnswer(
+        "--find",
+        $"several values of {found[0].Question.Unknown.Name} meet the target: {string.Join("; ", found.Select((one, i) => $"{i + 1}: {Units.Text(one.Value, one.Question.Unknown.Row.Dimension, 6)}"))}",
+        "choose with --branch 1, --branch 2 ...");
 
     internal static FlowDuctException ExpansionDoesNotFit(ExpansionModel model) => NotUnderstood(
         "--expansion",

@@ -10,6 +10,9 @@ internal static class FluxRoot
     // Of the flux: what the closure of the property calls leaves.
     private const double Closure = 1e-13;
 
+    // A slow stream is a small difference of large enthalpies.
+    private static double Rounding(double h0, double V) => 1e-9 + (1e-13 * Math.Max(Math.Abs(h0), 1e5) / (V * V));
+
     /// <summary>Finds the state between two pressures, Pa, of which the flux lies above the target at one and below it at the other.</summary>
     internal static bool TryFind(LossPath path, double target, double pMore, double pLess, double start, out FluidState state, out double V)
     {
@@ -25,7 +28,7 @@ internal static class FluxRoot
             if (Math.Abs(excess) <= Closure) return true;
             if (excess > 0) more = x;
             else less = x;
-            if (Math.Abs(more - less) <= 4e-16 * Math.Abs(x)) return Math.Abs(excess) < 1e-9;
+            if (Math.Abs(more - less) <= 4e-16 * Math.Abs(x)) return Math.Abs(excess) < Rounding(path.h0, V);
 
             // On an isentrope d ln G = p v (1/w^2 - 1/V^2) d ln p; a loss bends it little.
             double slope = outcome == Outcome.Ok && speed > 0 ? at.p * at.v * ((1 / (at.w * at.w)) - (1 / (speed * speed))) : 0;

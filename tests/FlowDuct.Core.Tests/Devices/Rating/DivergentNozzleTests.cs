@@ -79,6 +79,8 @@ public class DivergentNozzleTests
     public void Regimes_meet_without_a_step() => Cases().Each(
         (inlet, geometry, u) =>
         {
+            // Beyond these ratios the width of the limits themselves, a millionth of p0, moves the exit velocity by more than is compared.
+            if (geometry.ExitArea / geometry.ThroatArea is < 1.05 or > 6) return;
             if (DivergentLimits.Find(inlet, geometry, out DivergentLimits limits) != RatingOutcome.Ok || limits.Pressures.ShockAtExit is not double shocked) return;
             double band = 3e-6 * inlet.p0;
             foreach (double limit in (double[])[limits.Pressures.Subsonic!.Value, limits.Pressures.FullExpansion!.Value])
@@ -133,7 +135,7 @@ public class DivergentNozzleTests
         1200);
 
     private static Gen<(RatingInlet, NozzleGeometry, double)> Cases() =>
-        Gen.Select(s_inlets, Gen.Double[1.05, 6], Gen.OneOf(Gen.Const(1.0), Gen.Double[0.93, 0.999]), Gen.Double[0, 1])
+        Gen.Select(s_inlets, Gen.OneOf(Gen.Double[1.05, 6], Gen.Double[-3, 4].Select(x => 1 + Math.Pow(10, x))), Gen.OneOf(Gen.Const(1.0), Gen.Double[0.93, 0.999]), Gen.Double[0, 1])
             .Select((inlet, ratio, eta, u) => (inlet, new NozzleGeometry(1e-4, ratio * 1e-4, eta, null), u));
 
     private static RatingInlet FromPT(Fluid fluid, double p, double T)
