@@ -73,11 +73,15 @@ internal static class ValueParser
         throw context.WrongUnit(text, spelling);
     }
 
+    // x=1 means saturated vapour and an efficiency of 1 no loss: the end of a fraction is no reading that was rounded.
+    private static bool IsAnEnd(QuantityRow row, double si) =>
+        row.Dimension == Dimension.Ratio && (si == row.Limits.Greatest || (row.Limits.IncludesLeast && si == row.Limits.Least));
+
     private static GivenValue Finish(
         in ValueContext context, string text, PrintedNumber number, in UnitReading unit, double ambientPressure)
     {
         double si = UnitConverter.ToSi(number.Value, unit, ambientPressure);
-        double halfWidth = UnitConverter.IntervalToSi(number.HalfPlace, unit);
+        double halfWidth = IsAnEnd(context.Row, si) ? 0 : UnitConverter.IntervalToSi(number.HalfPlace, unit);
         GivenValue given = new(si, halfWidth, text, unit);
         RangeCheck.Require(context, given, ambientPressure);
         return given;

@@ -28,6 +28,16 @@ internal static class Cases
         return c;
     }
 
+    /// <summary>A nozzle by its sections: lists of inlet, throat, exit and the space beyond, empty where nothing is given.</summary>
+    internal static DeviceCase Rated(
+        Fluid fluid, string inlet, string throat, string exit, string back, params (CaseOption Option, string Value)[] options)
+    {
+        DeviceCase c = Nozzle(fluid, inlet, exit, options);
+        if (throat.Length > 0) Fill(ref c.Throat, Station.Throat, throat);
+        if (back.Length > 0) Fill(ref c.Back, StationLists.Back, back);
+        return c;
+    }
+
     internal static GivenSlots At(string list)
     {
         GivenSlots slots = default;
@@ -47,7 +57,9 @@ internal static class Cases
         return c;
     }
 
-    private static void Fill(ref GivenSlots slots, Station station, string list)
+    private static void Fill(ref GivenSlots slots, Station station, string list) => Fill(ref slots, station.ToList(), list);
+
+    private static void Fill(ref GivenSlots slots, StationLists station, string list)
     {
         foreach (StationItem item in StationListParser.Parse("--" + station.ToString().ToUpperInvariant(), station, list, Ambient))
             slots.Set((int)item.Slot, item.Value.Si, item.Value.HalfWidth);
