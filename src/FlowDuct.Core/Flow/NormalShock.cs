@@ -14,6 +14,9 @@ internal static class NormalShock
     // Of the momentum flux: what a step of the equation of state (edges of regions) leaves open is no solution.
     private const double Balance = 1e-11;
 
+    // Of v: what is left of a volume after two property calls.
+    private const double VolumeRounding = 2e-14;
+
     // Of s: the closure of the inverses. A shock weaker than this keeps its entropy to rounding.
     private const double EntropyRounding = 1e-11;
 
@@ -32,7 +35,7 @@ internal static class NormalShock
         if (!(top > 0)) return false;
         double atTop = excess.At(top);
         if (!(atTop > 0)) return false;
-        double rise = Rise(ref excess, top, atTop);
+        double rise = Rise(ref excess, top, atTop, VolumeRounding * upstream.v);
         if (!excess.TryState(rise, out downstream, out double error) || !(Math.Abs(error) <= Balance)) return false;
         V2 = V / upstream.v * downstream.v;
         return downstream.s >= upstream.s - EntropySlack(upstream, rise);
@@ -45,18 +48,18 @@ internal static class NormalShock
     }
 
     // The excess of a gas of constant heat capacity is a straight line, so the chord of the whole bracket comes close already.
-    private static double Rise(ref RayleighExcess excess, double top, double atTop)
+    private static double Rise(ref RayleighExcess excess, double top, double atTop, double enough)
     {
         double atZero = excess.AtZero;
-        if (!double.IsFinite(atTop)) return RootFinder.Find(ref excess, 0, top, atZero, atTop);
+        if (!double.IsFinite(atTop)) return RootFinder.Find(ref excess, 0, top, atZero, atTop, enough);
         double chord = top * atZero / (atZero - atTop), atChord = excess.At(chord);
         if (atChord == 0) return chord;
         (double a, double fa) = atChord > 0 ? (0, atZero) : (top, atTop);
         double second = chord - (atChord * (chord - a) / (atChord - fa)), beyond = second + (second - chord);
-        if (!(beyond > 0 && beyond < top)) return RootFinder.Find(ref excess, a, chord, fa, atChord);
+        if (!(beyond > 0 && beyond < top)) return RootFinder.Find(ref excess, a, chord, fa, atChord, enough);
         double atBeyond = excess.At(beyond);
         return Math.Sign(atBeyond) != Math.Sign(atChord)
-            ? RootFinder.Find(ref excess, beyond, chord, atBeyond, atChord)
-            : RootFinder.Find(ref excess, a, beyond, fa, atBeyond);
+            ? RootFinder.Find(ref excess, beyond, chord, atBeyond, atChord, enough)
+            : RootFinder.Find(ref excess, a, beyond, fa, atBeyond, enough);
     }
 }

@@ -18,9 +18,9 @@ internal static class RootFinder
         return Find(ref function, a, b, fa, fb);
     }
 
-    /// <summary>The same for a function in a struct: no allocation.</summary>
+    /// <summary>The same for a function in a struct: no allocation. A value of f as small as <paramref name="enough"/> is a root.</summary>
     /// <returns>The end of the final bracket at which f is smaller in size.</returns>
-    internal static double Find<TFunction>(ref TFunction f, double a, double b, double fa, double fb)
+    internal static double Find<TFunction>(ref TFunction f, double a, double b, double fa, double fb, double enough = 0)
         where TFunction : struct, IScalarFunction
     {
         if (fa == 0) return a;
@@ -35,7 +35,7 @@ internal static class RootFinder
             (a, fa) = (x, fx);
             best = Math.Abs(fa) < Math.Abs(fb) ? a : b;
             double least = RelativeTolerance * Math.Abs(best) / Math.Abs(b - a);
-            if (least > 0.5 || fx == 0 || a == b) break;
+            if (least > 0.5 || Math.Abs(fx) <= enough || a == b) break;
             t = Math.Clamp(Fraction(a, b, c, fa, fb, fc), least, 1 - least);
         }
 

@@ -6,6 +6,8 @@ namespace FlowDuct.Devices.Rating;
 /// <summary>The state at a pressure that carries a mass flux at a total enthalpy.</summary>
 internal static class SubsonicExit
 {
+    private const double Closure = 1e-15;
+
     /// <summary>Finds it: h + (G v)^2/2 = h0 has one root in h, since v rises with h at constant p.</summary>
     internal static bool TryFind(Fluid fluid, double h0, double p, double G, out FluidState state, out double V)
     {
@@ -15,7 +17,7 @@ internal static class SubsonicExit
         if (!(atTop > 0)) return false;
         double low = h0 - atTop, atLow = excess.At(low);
         if (!double.IsFinite(atLow)) return false;
-        double h = atLow < 0 ? RootFinder.Find(ref excess, low, h0, atLow, atTop) : low;
+        double h = atLow < 0 ? RootFinder.Find(ref excess, low, h0, atLow, atTop, Closure * Math.Max(Math.Abs(h0), 1e5)) : low;
         if (fluid.FromPH(p, h, default, out state) != Outcome.Ok) return false;
         V = G * state.v;
         return true;
