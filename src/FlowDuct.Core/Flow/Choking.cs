@@ -33,7 +33,12 @@ internal static class Choking
     // One phase from rest to throat: secant in ln p from the throat of a gas of constant isentropic exponent.
     private static bool TryQuick(Fluid fluid, double h0, double s, double p0, out FluidState throat)
     {
-        if (fluid.FromPS(p0, s, default, out throat) != Outcome.Ok) return false;
+        return fluid.FromPS(p0, s, default, out throat) == Outcome.Ok && Secant(fluid, h0, s, p0, ref throat);
+    }
+
+    // Starts with the exponent of a state of the phase in which the throat is looked for.
+    private static bool Secant(Fluid fluid, double h0, double s, double p0, ref FluidState throat)
+    {
         bool wet = throat.Phase == Phase.Wet, vapour = throat.Phase is Phase.Gas or Phase.SuperheatedVapour or Phase.Supercritical;
         double kappa = throat.kappa;
         if (!(wet || vapour) || !(kappa is > 1.01 and < 3)) return false;
@@ -70,6 +75,7 @@ internal static class Choking
             top = edge.p * WetSide;
             if (!(excess.At(top) > 0)) return fluid.FromPS(top, s, default, out _) == Outcome.Ok;
             atKink = false;
+            if (fluid.FromPS(top, s, default, out throat) == Outcome.Ok && Secant(fluid, h0, s, p0, ref throat)) return true;
         }
 
         double low = top;
