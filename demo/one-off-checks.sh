@@ -30,6 +30,27 @@ ask 0 'NZ-2203: water at 138 degC into an open bath: it flashes' \
 ask 0 'NZ-3302: what bore passes 0.52 kg/s at full receiver pressure, against a silencer at 0.6 of it?' \
     nozzle --fluid air --inlet 'p0=7.8 barg, T0=41 degC' --exit 'p/p0=0.6' --flow '0.52 kg/s'
 
+ask 0 'NZ-1014 as built: throat 9.5 mm, exit 31 mm, condenser at 0.12 bar' \
+    nozzle --fluid steam --inlet 'p0=11.2 barg, T0=212 degC' --throat 'd=9.5 mm' --exit 'd=31 mm' --back 'p=0.12 bar' \
+    --efficiency 92% --discharge-coefficient iso9300-toroidal --ambient 'p=0.973 bar, T=24 degC'
+
+ask 0 'NZ-1014 at start, the condenser still at ambient pressure: where does the shock stand?' \
+    nozzle --fluid steam --inlet 'p0=11.2 barg, T0=212 degC' --throat 'd=9.5 mm' --exit 'd=14 mm' --back 'p=6.5 bar' --divergent-angle '9 deg' --path 15 \
+    --ambient 'p=0.973 bar, T=24 degC'
+
+ask 0 'NZ-1014: up to which back pressure stays its shock beyond 1.6 throat areas?' \
+    nozzle --fluid steam --inlet 'p0=11.2 barg, T0=212 degC' --throat 'd=9.5 mm' --exit 'd=14 mm' --find back.p --target 'shock.area_ratio=1.6' \
+    --ambient 'p=0.973 bar, T=24 degC'
+
+ask 0 'NZ-2107: dry saturated steam through 14 mm, condensing late' \
+    nozzle --fluid steam --inlet 'p0=6.4 bar, x=1' --throat 'd=14 mm' --back 'p=2.1 bar' --expansion supersaturated
+
+ask 0 'NZ-2203: the most that the bath nozzle could pass if nothing flashed before its exit' \
+    nozzle --fluid water --inlet 'p=8.5 bar, T=138 degC' --throat 'd=6 mm' --back 'p=1.02 bar' --expansion single-phase
+
+ask 0 'NZ-3302: which coefficient does a measured 0.505 kg/s imply for a bore of 18.0 mm?' \
+    nozzle --fluid air --inlet 'p0=7.8 barg, T0=41 degC' --throat 'd=18.0 mm' --back 'p=1 bar' --flow '0.505 kg/s'
+
 ask 0 'DF-4110: recovery, efficiency and loss from a measured rise and velocity' \
     diffuser --fluid air --inlet 'p=1013 mbar, T=64 degC, V=47 m/s' --exit 'rise=6.9 mbar, V=19 m/s'
 

@@ -18,6 +18,10 @@ public class JsonSchemaTests
     [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --exit \"p=3 bar\"")]
     [InlineData("flowduct nozzle --fluid steam --inlet \"p=9 bar, T=230 degC\" --exit \"p=3.2 bar, T=135.7 degC\"")]
     [InlineData("flowduct nozzle --fluid steam --inlet \"p=9 bar, T=230 degC, V=25 m/s\" --exit \"p=3.2 bar, V=900 m/s\"")]
+    [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --throat \"d=18 mm\" --exit \"d=25 mm\" --back \"p=5 bar\" --path 9")]
+    [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --throat \"d=18 mm\" --exit \"d=25 mm\" --back \"p=1 bar\"")]
+    [InlineData("flowduct nozzle --fluid steam --inlet \"p0=9 bar, x=1\" --throat \"d=18 mm\" --back \"p=1 bar\" --expansion supersaturated")]
+    [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --throat \"d=18 mm\" --find back.p --target \"exit.V=200 m/s\"")]
     [InlineData("flowduct diffuser --fluid air --inlet \"p=14.2 psi, T=70 degF, V=540 ft/s\" --exit \"V=120 ft/s\" --recovery 0.72")]
     public void An_answer_keeps_the_schema(string line)
     {

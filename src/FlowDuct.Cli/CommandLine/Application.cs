@@ -1,6 +1,7 @@
 using FlowDuct.Cli.Rendering;
 using FlowDuct.Devices;
 using FlowDuct.Devices.Inverse;
+using FlowDuct.Devices.Rating;
 using FlowDuct.Errors;
 using FlowDuct.Findings;
 using FlowDuct.Fluids.Water.Verification;
@@ -77,11 +78,14 @@ internal static class Application
     {
         var binder = new CaseBinder(arguments);
         RenderOptions options = RenderBinder.Bind(arguments, binder, terminal);
-        bool json = RenderBinder.WantsJson(binder);
+        AnswerFormat format = RenderBinder.Format(binder);
         DeviceCase c = binder.Device(arguments.Command == CommandName.Nozzle ? DeviceKind.Nozzle : DeviceKind.Diffuser);
         DeviceAnswer answer = binder.Question() is InverseQuestion question ? Found(question, c, binder.RootNumber) : DeviceSolver.Solve(c);
-        if (json) JsonAnswer.Write(memory, answer, options);
-        else Text(memory, to => TextAnswer.Write(to, answer, options));
+        IReadOnlyList<PathPoint>? path = PathBinder.Read(arguments, answer);
+        if (format == AnswerFormat.Csv && path is null) throw Usage.Refuse("--format", "csv holds the states along a nozzle, and none are asked for", "add --path, for example --path 21");
+        if (format == AnswerFormat.Json) JsonAnswer.Write(memory, answer, path, options);
+        else if (format == AnswerFormat.Csv) Text(memory, to => PathTable.Csv(to, path!, answer.Expanding ?? answer.Fluid, options));
+        else Text(memory, to => TextAnswer.Write(to, answer, path, options));
         return answer.Passes(options.Strict) ? ExitStatus.Passed : ExitStatus.Failed;
     }
 

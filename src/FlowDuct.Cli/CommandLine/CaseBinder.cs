@@ -1,5 +1,6 @@
 using System.Globalization;
 using FlowDuct.Devices;
+using FlowDuct.Devices.Coefficients;
 using FlowDuct.Devices.Inverse;
 using FlowDuct.Errors;
 using FlowDuct.Fluids;
@@ -56,6 +57,7 @@ internal sealed class CaseBinder
             Fluid = fluid,
             Shape = Choice("--shape", NozzleShape.Auto, ("convergent", NozzleShape.Convergent), ("convergent-divergent", NozzleShape.ConvergentDivergent)),
             Branch = RootNumber is null ? Choice("--branch", Branch.Ask, ("subsonic", Branch.Subsonic), ("supersonic", Branch.Supersonic)) : Branch.Ask,
+            DischargeCorrelation = Correlation,
             Expansion = Choice(
                 "--expansion", ExpansionModel.Equilibrium, ("equilibrium", ExpansionModel.Equilibrium), ("supersaturated", ExpansionModel.Supersaturated),
                 ("single-phase", ExpansionModel.SinglePhase)),
@@ -72,6 +74,16 @@ internal sealed class CaseBinder
 
     /// <summary>The number of the answer chosen among several, counted from 1; null where --branch is a word or not given.</summary>
     internal int? RootNumber => _arguments.Has("--find") && int.TryParse(_arguments.Value("--branch"), NumberStyles.None, CultureInfo.InvariantCulture, out int number) ? number : null;
+
+    // A name stands where a number could.
+    private CriticalFlowCd? Correlation
+    {
+        get
+        {
+            if (_arguments.Value("--discharge-coefficient") is not string text || text.Length == 0 || !char.IsAsciiLetter(text[0])) return null;
+            return CriticalFlowCd.Find(text) ?? throw Usage.NotOneOf("--discharge-coefficient", text, ["a number", .. CriticalFlowCd.All.Select(row => row.Name)]);
+        }
+    }
 
     /// <summary>What is asked backwards; null where nothing is.</summary>
     internal InverseQuestion? Question()
@@ -130,6 +142,7 @@ internal sealed class CaseBinder
         {
             string name = "--" + row.Word;
             if (row.OptionSlot is not CaseOption option || _arguments.Value(name) is not string text) continue;
+            if (option == CaseOption.DischargeCoefficient && Correlation is not null) continue;
             GivenValue value = ValueParser.Parse(name, row, text, AmbientPressure);
             double size = option switch
             {

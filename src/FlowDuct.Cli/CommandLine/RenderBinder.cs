@@ -22,6 +22,10 @@ internal static class RenderBinder
     /// <summary>True for JSON, false for text.</summary>
     internal static bool WantsJson(CaseBinder binder) => binder.Choice("--format", false, ("text", false), ("json", true));
 
+    /// <summary>The format of a device's answer.</summary>
+    internal static AnswerFormat Format(CaseBinder binder) => binder.Choice(
+        "--format", AnswerFormat.Text, ("text", AnswerFormat.Text), ("json", AnswerFormat.Json), ("csv", AnswerFormat.Csv));
+
     private static bool Colour(CaseBinder binder, bool terminal)
     {
         bool? chosen = binder.Choice<bool?>("--color", null, ("auto", null), ("always", true), ("never", false));

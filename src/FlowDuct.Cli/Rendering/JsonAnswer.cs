@@ -1,6 +1,7 @@
 using System.Text.Json;
 using FlowDuct.Devices;
 using FlowDuct.Devices.Inverse;
+using FlowDuct.Devices.Rating;
 using FlowDuct.Findings;
 using FlowDuct.Quantities;
 
@@ -9,7 +10,7 @@ namespace FlowDuct.Cli.Rendering;
 /// <summary>The answer of a device as JSON: coherent SI whatever the display units, stable key order.</summary>
 internal static class JsonAnswer
 {
-    internal static void Write(Stream to, DeviceAnswer answer, RenderOptions options)
+    internal static void Write(Stream to, DeviceAnswer answer, IReadOnlyList<PathPoint>? path, RenderOptions options)
     {
         using var json = new Utf8JsonWriter(to, JsonNumbers.Options);
         json.WriteStartObject();
@@ -21,6 +22,7 @@ internal static class JsonAnswer
         JsonStation.Write(json, "throat", answer.Fluid, answer.Throat);
         JsonStation.Write(json, "exit", answer.Fluid, answer.Exit);
         json.WriteEndObject();
+        PathTable.Json(json, path, answer.Expanding ?? answer.Fluid);
         JsonPerformance.Write(json, answer.Performance);
         Ledger(json, answer.Ledger);
         Laws(json, answer.Audit);

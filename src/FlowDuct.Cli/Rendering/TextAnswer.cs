@@ -1,5 +1,6 @@
 using FlowDuct.Devices;
 using FlowDuct.Devices.Inverse;
+using FlowDuct.Devices.Rating;
 using FlowDuct.Findings;
 using FlowDuct.Fluids;
 using FlowDuct.Quantities;
@@ -15,7 +16,7 @@ internal static class TextAnswer
     private static readonly string[] s_static = ["p", "T", "x", "h", "s", "V", "M"];
     private static readonly string[] s_stagnation = ["p0", "T0", "rho", "w", "A", "d"];
 
-    internal static void Write(TextWriter to, DeviceAnswer answer, RenderOptions options)
+    internal static void Write(TextWriter to, DeviceAnswer answer, IReadOnlyList<PathPoint>? path, RenderOptions options)
     {
         to.WriteLine($"{(answer.Case.Device == DeviceKind.Nozzle ? "nozzle" : "diffuser")}, {answer.Fluid.Name}");
         to.WriteLine();
@@ -26,6 +27,7 @@ internal static class TextAnswer
         Device(to, answer, options);
         Energy(to, answer, options);
         Laws(to, answer, options);
+        if (path is not null) PathTable.Text(to, path, answer.Expanding ?? answer.Fluid, options);
         Findings(to, answer.Findings, options);
         Assumed(to, answer, options);
         to.WriteLine();
@@ -86,6 +88,7 @@ internal static class TextAnswer
         "isentropic_efficiency" when answer.EfficiencyImplied => "   implied by the figures",
         "isentropic_efficiency" when answer.TakenIdeal => "   assumed",
         "isentropic_efficiency" when answer.Case.Has(CaseOption.Efficiency) => "   given",
+        "discharge_coefficient" when answer.Case.DischargeCorrelation is not null => "   by correlation",
         "discharge_coefficient" when answer.Case.Has(CaseOption.DischargeCoefficient) => "   given",
         "discharge_coefficient" when answer.Case.Has(CaseOption.Flow) => "   implied by the flow",
         "recovery" when answer.Case.Has(CaseOption.Recovery) => "   given",

@@ -81,6 +81,9 @@ internal sealed record DeviceCase
 
     internal ExpansionModel Expansion { get; init; }
 
+    /// <summary>The correlation that gives the discharge coefficient; null where a number or none is given.</summary>
+    internal Coefficients.CriticalFlowCd? DischargeCorrelation { get; init; }
+
     internal RecoveryBasis RecoveryBasis { get; init; }
 
     /// <summary>Ambient pressure, Pa.</summary>

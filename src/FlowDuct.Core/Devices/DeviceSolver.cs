@@ -26,6 +26,7 @@ internal static class DeviceSolver
     {
         if (c.Has(CaseOption.Heat) && c.Has(CaseOption.HeatLoss)) throw Refusals.HeatTwice();
         if (Rating.NozzleGeometryReader.Asks(c)) return Rating.RatedNozzle.Solve(c);
+        if (c.DischargeCorrelation is not null) throw Refusals.CorrelationWithoutBack();
         if (c.Expansion != ExpansionModel.Equilibrium) throw Refusals.ExpansionWithoutSections();
         Inlet inlet = Inlet.Solve(c);
         if (c.Device == DeviceKind.Diffuser && inlet.V == 0) throw Refusals.DiffuserAtRest();

@@ -32,6 +32,9 @@ internal sealed record Performance
     /// <summary>Mass flow over isentropic flow of the throat.</summary>
     internal double? DischargeCoefficient { get; init; }
 
+    /// <summary>Reynolds number of the throat on its bore, with the viscosity of the stagnation state.</summary>
+    internal double? ReynoldsThroat { get; init; }
+
     internal Rating.BackPressureLimits Limits { get; init; }
 
     internal Rating.ShockAnswer? Shock { get; init; }

@@ -33,6 +33,7 @@ internal static class PerformanceFigures
         ("axial_force", p => p.AxialForce),
         ("heat_rate", p => p.HeatRate),
         ("lost_work", p => p.LostWork),
+        ("reynolds_throat", p => p.ReynoldsThroat),
         ("back_pressure_limits.subsonic", p => p.Limits.Subsonic),
         ("back_pressure_limits.shock_at_exit", p => p.Limits.ShockAtExit),
         ("back_pressure_limits.full_expansion", p => p.Limits.FullExpansion),

@@ -173,6 +173,18 @@ internal static class Refusals
     internal static FlowDuctException ExpansionWithoutSections() => NotUnderstood(
         "--expansion", "a held phase is solved for a nozzle with --back or --throat", "add --back, for example --back \"p=1 bar\"");
 
+    internal static FlowDuctException CorrelationWithoutSection() => NotUnderstood(
+        "--discharge-coefficient", "a correlation needs the bore of the throat", "add --throat, for example --throat \"d=18 mm\"");
+
+    internal static FlowDuctException CorrelationWithFlow() => NotUnderstood(
+        "--discharge-coefficient", "the flow is given too, which implies the coefficient", "leave --flow or the correlation out");
+
+    internal static FlowDuctException CorrelationWithoutBack() => NotUnderstood(
+        "--discharge-coefficient", "a correlation needs the flow of a rated throat", "add --throat and --back");
+
+    internal static FlowDuctException NoViscosity(Fluid fluid) => NoAnswer(
+        "--discharge-coefficient", $"there is no viscosity of {fluid.Name} here, which the Reynolds number needs", "give the coefficient as a number");
+
     internal static FlowDuctException LossWithSections() => NotUnderstood(
         "--loss-coefficient", "a nozzle given by its sections takes its loss as an efficiency", "give --efficiency or --velocity-coefficient");
 

@@ -33,6 +33,7 @@ internal static class FindingRules
         Choked.Check,
         RoundingLimited.Check,
         a => Extrapolated.Check(a.Fluid, a),
+        Extrapolated.OfCorrelation,
         SubAtmospheric.Check,
         InletAtRest.Check,
         AssumedAmbient.Check,

@@ -10,6 +10,7 @@ internal static class RatedNozzle
 {
     // Unit areas serve a nozzle without sections: the flow follows from nothing then, and stays unknown.
     private const double UnitArea = 1;
+    private const int CorrelationRounds = 6;
 
     internal static DeviceAnswer Solve(DeviceCase c)
     {
@@ -34,10 +35,31 @@ internal static class RatedNozzle
         double throatArea = throat ? NozzleGeometryReader.Area(geometry.Throat) : exitArea;
         var nozzle = new NozzleGeometry(throatArea, exitArea, efficiency, coefficient);
         var inlet = new RatingInlet(HeldFluid(c, rest), rest.h, rest.s, rest.p);
+        if (c.DischargeCorrelation is not null) return ByCorrelation(c, inlet, rest, nozzle, geometry, throat ? geometry.Throat : geometry.Exit);
         NozzleRating rating = One(inlet, nozzle, geometry);
         if (coefficient is not null || !c.Has(CaseOption.Flow) || c.FlowIsVolume || !(throat || exit) || rating.IsentropicFlow == 0) return rating;
         return One(inlet, nozzle with { DischargeCoefficient = c.Value(CaseOption.Flow) / rating.IsentropicFlow }, geometry);
     }
+
+    // The coefficient hangs on the flow through its Reynolds number, weakly: each round gains three digits.
+    private static NozzleRating ByCorrelation(
+        DeviceCase c, in RatingInlet inlet, in FluidState rest, NozzleGeometry nozzle, NozzleGeometryReader geometry, StationFigures narrow)
+    {
+        if (!narrow.Has(Figure.Section)) throw Refusals.CorrelationWithoutSection();
+        if (!c.Fluid.TryTransport(rest, out Transport transport)) throw Refusals.NoViscosity(c.Fluid);
+        double coefficient = c.DischargeCorrelation!.a;
+        NozzleRating rating = default;
+        for (int i = 0; i < CorrelationRounds; i++)
+        {
+            rating = One(inlet, nozzle with { DischargeCoefficient = coefficient }, geometry);
+            coefficient = c.DischargeCorrelation.At(Reynolds(rating.MassFlow, narrow, transport.mu));
+        }
+
+        return rating;
+    }
+
+    private static double Reynolds(double massFlow, StationFigures narrow, double mu) =>
+        4 * massFlow / narrow.Openings / (Math.PI * Math.Sqrt(4 * narrow[Figure.Section] / Math.PI) * mu);
 
     /// <summary>The fluid that expands: the one of the case, or it with the phase of the inlet held.</summary>
     internal static Fluid HeldFluid(DeviceCase c, in FluidState rest)
@@ -60,6 +82,7 @@ internal static class RatedNozzle
     private static void Refuse(DeviceCase c)
     {
         if (c.Has(CaseOption.Heat) || c.Has(CaseOption.HeatLoss)) throw Refusals.HeatWithChoking();
+        if (c.DischargeCorrelation is not null && c.Has(CaseOption.Flow)) throw Refusals.CorrelationWithFlow();
         if (c.Has(CaseOption.LossCoefficient)) throw Refusals.LossWithSections();
         if (c.Has(CaseOption.Efficiency) && c.Has(CaseOption.VelocityCoefficient)) throw Refusals.LossTwice("efficiency, velocity coefficient");
         foreach (GivenSlots slots in (GivenSlots[])[c.Inlet, c.Throat, c.Exit])
@@ -87,7 +110,14 @@ internal static class RatedNozzle
             Inlet = inlet.Station.Carrying(flow),
             Throat = divergent ? At(fluid, rating.Throat, rating.ThroatVelocity, geometry.Throat) : null,
             Exit = At(fluid, rating.Exit, rating.ExitVelocity, exitSection).Carrying(flow),
-            Performance = Figures(c, rating, sections) with { MassFlow = flow, CriticalPressureRatio = rating.CriticalPressure > 0 ? rating.CriticalPressure / inlet.Station.Stagnation!.Value.p : null },
+            Performance = Figures(c, rating, sections) with
+            {
+                ReynoldsThroat = sections && c.Fluid.TryTransport(inlet.Station.Stagnation!.Value, out Transport transport)
+                    ? Reynolds(rating.MassFlow, geometry.Throat.Has(Figure.Section) ? geometry.Throat : geometry.Exit, transport.mu)
+                    : null,
+                MassFlow = flow,
+                CriticalPressureRatio = rating.CriticalPressure > 0 ? rating.CriticalPressure / inlet.Station.Stagnation!.Value.p : null,
+            },
             Audit = new Audit(),
             InletTakenAtRest = inlet.TakenAtRest,
             TakenIdeal = !c.Has(CaseOption.Efficiency) && !c.Has(CaseOption.VelocityCoefficient),
