@@ -14,10 +14,12 @@ internal static class ThermalConductivity
     private const double ReferenceT = 1.5;
     private const double LeastY = 1.2e-7;
 
-    // At the critical point heat capacity and compressibility have no bound; their product with Z has.
+    // At the critical point heat capacity and compressibility have no bound, and conductivity has none either: the cap keeps arithmetic finite.
+    // No stable state of IF97 that is offered reaches it (cp is refused as a number long before).
     private const double Cap = 1e13;
 
     /// <summary>Conductivity, W/(m.K), of a state of one phase and its viscosity, Pa.s. R15-11, Eq. (15); check: Tables 7-9.</summary>
+    /// <remarks>For stable states: (dv/dp) at constant T below zero and cp above. Elsewhere the number has no meaning; who offers it asks first.</remarks>
     internal static double Of(in RegionState at, double mu)
     {
         double t = at.T / WaterConstants.Tc, delta = 1 / (at.v * WaterConstants.rhoc);
