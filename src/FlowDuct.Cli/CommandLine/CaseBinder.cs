@@ -26,7 +26,7 @@ internal sealed class CaseBinder
     {
         string name = _arguments.Value("--fluid")!;
         if (FluidCatalogue.Find(name) is Fluid fluid) return fluid;
-        string? near = Usage.Nearest(name, FluidCatalogue.Names.Select(row => row.Name));
+        string? near = Usage.Nearest(name, FluidCatalogue.Words);
         throw Usage.Refuse("--fluid", $"{Echo.Ascii(name)} is not a fluid of this version", near is null ? "flowduct fluids lists them" : $"did you mean {near}?");
     }
 

@@ -1,4 +1,5 @@
 using FlowDuct.Fluids.Gases;
+using FlowDuct.Fluids.Gases.Coefficients;
 
 namespace FlowDuct.Fluids;
 
@@ -12,13 +13,20 @@ public static class FluidCatalogue
         new("air", "dry air as an ideal gas", () => GasCatalogue.Air),
     ];
 
-    /// <summary>Every accepted name with a word about the fluid.</summary>
-    internal static IReadOnlyList<FluidName> Names => s_names;
+    /// <summary>Every accepted name with a word about the fluid; the gases follow in the order of their table.</summary>
+    internal static IReadOnlyList<FluidName> Names =>
+        [.. s_names, .. Nasa9Records.Words().Where(gas => gas.Name != "air").Select(OfGas)];
 
-    /// <summary>Finds a fluid by name; names are lower case with hyphens.</summary>
+    /// <summary>Every word that names a fluid, formulas among them.</summary>
+    internal static IEnumerable<string> Words => Names.Select(row => row.Name).Concat(Nasa9Records.Words().Select(gas => gas.Formula));
+
+    /// <summary>Finds a fluid by name (lower case with hyphens) or, for a gas, by its formula (case-sensitive).</summary>
     /// <param name="name">The name.</param>
     /// <returns>The fluid, or null where no fluid has that name.</returns>
-    public static Fluid? Find(string name) => Array.Find(s_names, row => row.Name == name)?.Fluid();
+    public static Fluid? Find(string name) => Array.Find(s_names, row => row.Name == name)?.Fluid() ?? GasCatalogue.Find(name);
+
+    private static FluidName OfGas((string Name, string Formula) gas) => new(
+        gas.Name, $"{gas.Formula}, as an ideal gas", () => GasCatalogue.Find(gas.Name)!);
 }
 
 /// <summary>A name of a fluid.</summary>
