@@ -1,6 +1,7 @@
 using FlowDuct.Devices;
 using FlowDuct.Errors;
 using FlowDuct.Fluids;
+using FlowDuct.Fluids.Gases;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Cli.CommandLine;
@@ -21,11 +22,12 @@ internal sealed class CaseBinder
 
     private double AmbientTemperature { get; set; } = 288.15;
 
-    /// <summary>The fluid by its name.</summary>
+    /// <summary>The fluid by its name or composition.</summary>
     internal Fluid Fluid()
     {
         string name = _arguments.Value("--fluid")!;
-        if (FluidCatalogue.Find(name) is Fluid fluid) return fluid;
+        FractionBasis basis = Choice("--fractions", FractionBasis.Mole, ("mole", FractionBasis.Mole), ("mass", FractionBasis.Mass));
+        if (FluidCatalogue.Find(name, basis) is Fluid fluid) return RefuseIdleFractions(fluid);
         string? near = Usage.Nearest(name, FluidCatalogue.Words);
         throw Usage.Refuse("--fluid", $"{Echo.Ascii(name)} is not a fluid of this version", near is null ? "flowduct fluids lists them" : $"did you mean {near}?");
     }
@@ -74,6 +76,10 @@ internal sealed class CaseBinder
 
         throw Usage.NotOneOf(option, typed, [.. choices.Select(choice => choice.Word)]);
     }
+
+    private Fluid RefuseIdleFractions(Fluid fluid) => !_arguments.Has("--fractions") || fluid is IdealGas { Mixture: not null }
+        ? fluid
+        : throw Usage.Refuse("--fractions", $"{fluid.Name} is no mixture and has no fractions", "leave it out, or give --fluid such as N2=0.72,CO2=0.13,H2O=0.15");
 
     private void ReadAmbient()
     {

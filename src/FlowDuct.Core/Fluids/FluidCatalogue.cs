@@ -1,3 +1,4 @@
+using FlowDuct.Errors;
 using FlowDuct.Fluids.Gases;
 using FlowDuct.Fluids.Gases.Coefficients;
 
@@ -20,10 +21,20 @@ public static class FluidCatalogue
     /// <summary>Every word that names a fluid, formulas among them.</summary>
     internal static IEnumerable<string> Words => Names.Select(row => row.Name).Concat(Nasa9Records.Words().Select(gas => gas.Formula));
 
-    /// <summary>Finds a fluid by name (lower case with hyphens) or, for a gas, by its formula (case-sensitive).</summary>
-    /// <param name="name">The name.</param>
+    /// <summary>
+    /// Finds a fluid by name (lower case with hyphens), a gas by its formula (case-sensitive) too, a mixture of gases by its
+    /// composition, such as "N2=0.72,CO2=0.13,H2O=0.15".
+    /// </summary>
+    /// <param name="name">The name or composition.</param>
+    /// <param name="basis">What the fractions of a composition count.</param>
     /// <returns>The fluid, or null where no fluid has that name.</returns>
-    public static Fluid? Find(string name) => Array.Find(s_names, row => row.Name == name)?.Fluid() ?? GasCatalogue.Find(name);
+    /// <exception cref="FlowDuctException">A composition that is not understood.</exception>
+    public static Fluid? Find(string name, FractionBasis basis = FractionBasis.Mole)
+    {
+        ArgumentNullException.ThrowIfNull(name);
+        return Array.Find(s_names, row => row.Name == name)?.Fluid()
+            ?? (GasMixtureParser.IsMixture(name) ? GasMixtureParser.Parse("--fluid", name, basis).Gas : GasCatalogue.Find(name));
+    }
 
     private static FluidName OfGas((string Name, string Formula) gas) => new(
         gas.Name, $"{gas.Formula}, as an ideal gas", () => GasCatalogue.Find(gas.Name)!);

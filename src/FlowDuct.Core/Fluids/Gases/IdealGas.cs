@@ -15,6 +15,7 @@ public sealed class IdealGas : Fluid
 
     private readonly Species species;
     private readonly CaloricCurve curve;
+    private readonly GasMixture? mixture;
 
     internal IdealGas(Species species)
     {
@@ -23,11 +24,14 @@ public sealed class IdealGas : Fluid
         curve = new CaloricCurve(species, MolarGasConstant);
     }
 
+    internal IdealGas(GasMixture mixture)
+        : this(MixedRecord.Of(mixture.Name, mixture.Components)) => this.mixture = mixture;
+
     /// <inheritdoc/>
     public override string Name => species.Name;
 
     /// <inheritdoc/>
-    public override string Formulation => $"NASA/TP-2002-211556 (2002), record {species.ReportRecord}, ideal gas";
+    public override string Formulation => mixture?.Formulation ?? $"NASA/TP-2002-211556 (2002), record {species.ReportRecord}, ideal gas";
 
     /// <inheritdoc/>
     public override string RangeText => IdealGasLimits.RangeText(curve);
@@ -40,6 +44,9 @@ public sealed class IdealGas : Fluid
 
     /// <summary>Molar mass, g/mol.</summary>
     internal double MolarMass => species.MolarMass;
+
+    /// <summary>The mixture that this is; null of a pure gas.</summary>
+    internal GasMixture? Mixture => mixture;
 
     /// <inheritdoc/>
     internal override double LeastPressure => IdealGasLimits.LeastPressure;
