@@ -24,6 +24,7 @@ Write("Region3VolumeTables.g.cs", Volume());
 Write("Region3VolumeKernels.g.cs", VolumeKernels());
 Write(Path.Combine("Verification", "CheckRows.g.cs"), CheckRows());
 Write(Path.Combine(gases, "Coefficients", "Nasa9Records.g.cs"), GasRecords());
+Write(Path.Combine(gases, "Coefficients", "TransportRecords.g.cs"), TransportRecords());
 return same ? 0 : 1;
 
 string FindRoot()
@@ -195,6 +196,39 @@ void Record(StringBuilder code, List<string> gas, List<string> heads, List<List<
     code.Append("        ],\n    };\n");
 
     string Number(string column, List<string> cells) => Literal(cells[heads.IndexOf(column)]);
+}
+
+// Gases stand in one table each; a method a table row set, as for the records.
+string TransportRecords()
+{
+    (List<string> dilute, List<List<string>> diluteRows) = GasCells("transport_dilute");
+    (List<string> nasa, List<List<string>> nasaRows) = GasCells("transport_nasa");
+    (List<string> handbook, List<List<string>> handbookRows) = GasCells("transport_eq102");
+    StringBuilder code = Head("Viscosity and conductivity of the gases that have a published low-pressure correlation")
+        .Replace("namespace FlowDuct.Fluids.Water;", "#nullable enable\nnamespace FlowDuct.Fluids.Gases.Coefficients;")
+        .Append("internal static class TransportRecords\n{\n    /// <summary>The correlation of a gas by its formula; null where there is none.</summary>\n")
+        .Append("    internal static PureTransport? Find(string formula) => formula switch\n    {\n");
+    foreach (List<string> gas in diluteRows)
+    {
+        code.Append($"        \"{gas[0]}\" => new DiluteTransport({Literal(gas[1])}, {Literal(gas[2])})\n        {{\n");
+        for (int i = 3; i < gas.Count; i++) code.Append($"            {Short(dilute[i])} = {Literal(gas[i])},\n");
+        code.Append("        },\n");
+    }
+
+    Fits("NasaTransport", nasa, nasaRows, ["A", "B", "C", "D"]);
+    Fits("HandbookTransport", handbook, handbookRows, ["C1", "C2", "C3", "C4"]);
+    return code.Append("        _ => null,\n    };\n}\n").ToString();
+
+    string Short(string head) => head switch { "M_g_per_mol" => "M", "epsilon_over_k_K" => "EpsilonOverK", "sigma_nm" => "Sigma", "T_reducing_K" => "Treducing", _ => head };
+
+    void Fits(string type, List<string> heads, List<List<string>> rows, string[] columns)
+    {
+        foreach (IGrouping<string, List<string>> gas in rows.GroupBy(cells => cells[0]))
+            code.Append($"        \"{gas.Key}\" => new {type}(\n            [{Rows(gas, "viscosity")}],\n            [{Rows(gas, "conductivity")}]),\n");
+
+        string Rows(IEnumerable<List<string>> gas, string property) => string.Join(", ", gas.Where(cells => cells[1] == property)
+            .Select(cells => $"new({string.Join(", ", ((string[])["T_low_K", "T_high_K", .. columns]).Select(column => Literal(cells[heads.IndexOf(column)])))})"));
+    }
 }
 
 int Count(string body) => body.Split('\n').Sum(line => line.Split(' ').Count(word => word is "*" or "+" or "+=" or "-" or "/"));

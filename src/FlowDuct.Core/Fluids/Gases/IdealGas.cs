@@ -16,12 +16,14 @@ public sealed class IdealGas : Fluid
     private readonly Species species;
     private readonly CaloricCurve curve;
     private readonly GasMixture? mixture;
+    private readonly Lazy<GasTransport?> transport;
 
     internal IdealGas(Species species)
     {
         this.species = species;
         R = MolarGasConstant / species.MolarMass * 1000;
         curve = new CaloricCurve(species, MolarGasConstant);
+        transport = new Lazy<GasTransport?>(() => GasTransport.Of(Components));
     }
 
     internal IdealGas(GasMixture mixture)
@@ -47,6 +49,9 @@ public sealed class IdealGas : Fluid
 
     /// <summary>The mixture that this is; null of a pure gas.</summary>
     internal GasMixture? Mixture => mixture;
+
+    /// <summary>The gases in it with their mole fractions; a pure gas is its own only component.</summary>
+    internal IReadOnlyList<GasComponent> Components => mixture?.Components ?? [new GasComponent(species, 1)];
 
     /// <inheritdoc/>
     internal override double LeastPressure => IdealGasLimits.LeastPressure;
@@ -130,6 +135,13 @@ public sealed class IdealGas : Fluid
         if (outcome == Outcome.Ok)
             state = State(p, T, curve.At(T));
         return outcome;
+    }
+
+    /// <summary>Viscosity and conductivity at low pressure, where the gas has a correlation and T lies inside it.</summary>
+    internal override bool TryTransport(in FluidState at, out Transport transport)
+    {
+        transport = default;
+        return this.transport.Value is GasTransport known && known.TryAt(at.T, out transport);
     }
 
     /// <inheritdoc/>
