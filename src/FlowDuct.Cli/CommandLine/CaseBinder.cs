@@ -22,6 +22,8 @@ internal sealed class CaseBinder
 
     private double AmbientTemperature { get; set; } = 288.15;
 
+    private AmbientAltitude? AmbientAltitude { get; set; }
+
     /// <summary>The fluid by its name or composition.</summary>
     internal Fluid Fluid()
     {
@@ -58,6 +60,7 @@ internal sealed class CaseBinder
             AmbientPressure = AmbientPressure,
             AmbientTemperature = AmbientTemperature,
             AmbientGiven = _arguments.Has("--ambient"),
+            AmbientAltitude = AmbientAltitude,
             UsesGauge = _usesGauge,
             FlowIsVolume = flowIsVolume,
         };
@@ -84,12 +87,25 @@ internal sealed class CaseBinder
     private void ReadAmbient()
     {
         if (_arguments.Value("--ambient") is not string list) return;
+        bool p = false, T = false;
+        double? altitude = null;
         foreach (StationItem item in StationListParser.Parse("--ambient", Station.Ambient, list, AmbientPressure))
         {
-            if (item.Slot == StationSymbol.Pressure) AmbientPressure = item.Value.Si;
-            else if (item.Slot == StationSymbol.Temperature) AmbientTemperature = item.Value.Si;
-            else throw Usage.Refuse("--ambient", $"{item.Row.Key} is not taken in this version", "give p and T, for example \"p=0.95 bar, T=20 degC\"");
+            if (item.Slot == StationSymbol.Pressure) (AmbientPressure, p) = (item.Value.Si, true);
+            else if (item.Slot == StationSymbol.Temperature) (AmbientTemperature, T) = (item.Value.Si, true);
+            else altitude = item.Value.Si;
         }
+
+        if (altitude is double z) StandAt(z, p, T);
+    }
+
+    // The altitude stands in for what is not typed beside it. The list has refused one outside the atmosphere.
+    private void StandAt(double z, bool pressureTyped, bool temperatureTyped)
+    {
+        if (!StandardAtmosphere.TryAtAltitude(z, out double p, out double T)) return;
+        if (!pressureTyped) AmbientPressure = p;
+        if (!temperatureTyped) AmbientTemperature = T;
+        AmbientAltitude = new AmbientAltitude(z, !pressureTyped, !temperatureTyped);
     }
 
     private void Fill(ref GivenSlots slots, string option, Station station)

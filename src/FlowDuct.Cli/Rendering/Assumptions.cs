@@ -13,9 +13,16 @@ internal static class Assumptions
         if (answer.Fluid.HasSaturation && answer.Exit.State.Phase == Fluids.Phase.Wet) yield return "wet states: one homogeneous mixture at equilibrium";
         foreach (string line in answer.Assumptions) yield return line;
         if (answer.Performance.Thrust is not null && answer.Exit.Mach >= 1) yield return "thrust: against the ambient pressure";
-        if (!answer.Case.AmbientGiven) yield return AmbientWords(answer.Case, text);
+        if (!answer.Case.AmbientGiven || answer.Case.AmbientAltitude is { GivesPressure: true } or { GivesTemperature: true }) yield return AmbientWords(answer.Case, text);
     }
 
     private static string AmbientWords(DeviceCase c, IQuantityText text) =>
-        $"ambient: {text.Text(c.AmbientPressure, Dimension.Pressure, 6)}, {text.Text(c.AmbientTemperature, Dimension.Temperature, 4)} (default)";
+        $"ambient: {text.Text(c.AmbientPressure, Dimension.Pressure, 6)}, {text.Text(c.AmbientTemperature, Dimension.Temperature, 4)} ({Origin(c.AmbientAltitude)})";
+
+    private static string Origin(AmbientAltitude? altitude)
+    {
+        if (altitude is null) return "default";
+        string which = altitude switch { { GivesTemperature: false } => "p of the ", { GivesPressure: false } => "T of the ", _ => string.Empty };
+        return $"{which}standard atmosphere at {NumberFormatter.Shortest(altitude.z, 6)} m";
+    }
 }
