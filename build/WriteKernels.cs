@@ -25,6 +25,7 @@ Write("Region3VolumeKernels.g.cs", VolumeKernels());
 Write(Path.Combine("Verification", "CheckRows.g.cs"), CheckRows());
 Write(Path.Combine(gases, "Coefficients", "Nasa9Records.g.cs"), GasRecords());
 Write(Path.Combine(gases, "Coefficients", "TransportRecords.g.cs"), TransportRecords());
+Write(Path.Combine(gases, "Coefficients", "CriticalRecords.g.cs"), CriticalRecords());
 return same ? 0 : 1;
 
 string FindRoot()
@@ -229,6 +230,20 @@ string TransportRecords()
         string Rows(IEnumerable<List<string>> gas, string property) => string.Join(", ", gas.Where(cells => cells[1] == property)
             .Select(cells => $"new({string.Join(", ", ((string[])["T_low_K", "T_high_K", .. columns]).Select(column => Literal(cells[heads.IndexOf(column)])))})"));
     }
+}
+
+string CriticalRecords()
+{
+    (List<string> heads, List<List<string>> rows) = GasCells("critical_constants");
+    StringBuilder code = Head("Critical constants of the gases: K, Pa, m3/mol")
+        .Replace("namespace FlowDuct.Fluids.Water;", "namespace FlowDuct.Fluids.Gases.Coefficients;")
+        .Append("internal static class CriticalRecords\n{\n    /// <summary>The constants of a gas by its formula; null where there are none.</summary>\n")
+        .Append("    internal static CriticalConstants? Find(string formula) => formula switch\n    {\n");
+    foreach (List<string> gas in rows)
+        code.Append($"        \"{gas[0]}\" => new({Cell(gas, "Tc_K", "")}, {Cell(gas, "pc_MPa", "e6")}, {Cell(gas, "Vc_cm3_per_mol", "e-6")}, {Cell(gas, "Zc", "")}, {Cell(gas, "acentric_factor", "")}),\n");
+    return code.Append("        _ => null,\n    };\n}\n").ToString();
+
+    string Cell(List<string> gas, string column, string power) => Literal(gas[heads.IndexOf(column)] + power);
 }
 
 int Count(string body) => body.Split('\n').Sum(line => line.Split(' ').Count(word => word is "*" or "+" or "+=" or "-" or "/"));

@@ -17,6 +17,7 @@ public sealed class IdealGas : Fluid
     private readonly CaloricCurve curve;
     private readonly GasMixture? mixture;
     private readonly Lazy<GasTransport?> transport;
+    private readonly Lazy<SecondVirial?> virial;
 
     internal IdealGas(Species species)
     {
@@ -24,6 +25,7 @@ public sealed class IdealGas : Fluid
         R = MolarGasConstant / species.MolarMass * 1000;
         curve = new CaloricCurve(species, MolarGasConstant);
         transport = new Lazy<GasTransport?>(() => GasTransport.Of(Components));
+        virial = new Lazy<SecondVirial?>(() => SecondVirial.Of(Components));
     }
 
     internal IdealGas(GasMixture mixture)
@@ -52,6 +54,9 @@ public sealed class IdealGas : Fluid
 
     /// <summary>The gases in it with their mole fractions; a pure gas is its own only component.</summary>
     internal IReadOnlyList<GasComponent> Components => mixture?.Components ?? [new GasComponent(species, 1)];
+
+    /// <summary>What tells how far the real gas is from this one; null where one of its gases has no critical constants.</summary>
+    internal SecondVirial? Virial => virial.Value;
 
     /// <inheritdoc/>
     internal override double LeastPressure => IdealGasLimits.LeastPressure;
