@@ -1,4 +1,4 @@
-// Writes the water kernels (*.g.cs) from the coefficient tables that stand beside them.
+// Writes the water kernels and the gas records (*.g.cs) from the coefficient tables that stand beside them.
 //   dotnet run build/WriteKernels.cs            writes the files
 //   dotnet run build/WriteKernels.cs --check    compares, writes nothing, ends with 1 where a file differs
 // Straight-line code with powers from a shared addition chain is seven times as fast as a loop over the rows, yet the
@@ -8,6 +8,7 @@ using System.Text;
 
 string root = FindRoot();
 string water = Path.Combine(root, "src", "FlowDuct.Core", "Fluids", "Water");
+string gases = Path.Combine(root, "src", "FlowDuct.Core", "Fluids", "Gases");
 bool check = args.Contains("--check");
 bool same = true;
 
@@ -22,6 +23,9 @@ Write("WaterTables.g.cs", Tables());
 Write("Region3VolumeTables.g.cs", Volume());
 Write("Region3VolumeKernels.g.cs", VolumeKernels());
 Write(Path.Combine("Verification", "CheckRows.g.cs"), CheckRows());
+Write(Path.Combine(gases, "Coefficients", "Nasa9Records.g.cs"), GasRecords());
+Write(Path.Combine(gases, "Coefficients", "TransportRecords.g.cs"), TransportRecords());
+Write(Path.Combine(gases, "Coefficients", "CriticalRecords.g.cs"), CriticalRecords());
 return same ? 0 : 1;
 
 string FindRoot()
@@ -49,6 +53,12 @@ void Write(string name, string text)
 {
     string[] lines = [.. File.ReadLines(Path.Combine(water, "Coefficients", table + ".csv")).Where(line => line.Length > 0 && line[0] != '#')];
     return (lines[0].Split(','), [.. lines.Skip(1).Select(line => line.Split(','))]);
+}
+
+(List<string> Heads, List<List<string>> Rows) GasCells(string table)
+{
+    string[] lines = [.. File.ReadLines(Path.Combine(gases, "Coefficients", table + ".csv")).Where(line => line.Length > 0 && line[0] != '#')];
+    return (Quoted(lines[0]), [.. lines.Skip(1).Select(Quoted)]);
 }
 
 List<Term> Read(string table) => Terms(Cells(table).Heads, Cells(table).Rows);
@@ -146,6 +156,92 @@ List<string> Quoted(string line)
 
     cells.Add(cell.ToString());
     return cells;
+}
+
+// One method a record, so that only the gases that are asked for are built; the words of all stand in one table.
+string GasRecords()
+{
+    (_, List<List<string>> names) = GasCells("gas_names");
+    (List<string> heads, List<List<string>> rows) = GasCells("nasa9");
+    StringBuilder code = Head("The records of NASA/TP-2002-211556 (2002) that have a name, with the printed numbers")
+        .Replace("namespace FlowDuct.Fluids.Water;", "#nullable enable\nnamespace FlowDuct.Fluids.Gases.Coefficients;")
+        .Append("internal static class Nasa9Records\n{\n");
+    code.Append("    /// <summary>Name and formula of every record, in the order of the table; made when asked for.</summary>\n");
+    code.Append("    internal static (string Name, string Formula)[] Words() =>\n    [\n");
+    foreach (List<string> gas in names) code.Append($"        (\"{gas[0]}\", \"{gas[1]}\"),\n");
+    code.Append("    ];\n\n    /// <summary>The record of a name or formula; null where there is none.</summary>\n");
+    code.Append("    internal static Species? Find(string word) => word switch\n    {\n");
+    foreach (List<string> gas in names) code.Append($"        \"{gas[0]}\" or \"{gas[1]}\" => {Method(gas[0])}(),\n");
+    code.Append("        _ => null,\n    };\n");
+    foreach (List<string> gas in names) Record(code, gas, heads, [.. rows.Where(cells => cells[0] == gas[2])]);
+    return code.Append("}\n").ToString();
+}
+
+string Method(string name) => string.Concat(name.Split('-').Select(part => char.ToUpperInvariant(part[0]) + part[1..]));
+
+void Record(StringBuilder code, List<string> gas, List<string> heads, List<List<string>> intervals)
+{
+    code.Append($"\n    /// <summary>The record \"{gas[2]}\".</summary>\n    internal static Species {Method(gas[0])}() => new()\n    {{\n");
+    code.Append($"        Name = \"{gas[0]}\",\n        Formula = \"{gas[1]}\",\n        ReportRecord = \"{gas[2]}\",\n");
+    code.Append($"        MolarMass = {Number("molar_mass_g_per_mol", intervals[0])},\n        HeatOfFormation298 = {Number("hf298_J_per_mol", intervals[0])},\n");
+    code.Append($"        EnthalpyAbove0KAt298 = {Number("h298_minus_h0_J_per_mol", intervals[0])},\n        ContinuedDownTo = {Literal(gas[3])},\n        Intervals =\n        [\n");
+    foreach (List<string> cells in intervals)
+    {
+        code.Append($"            new({Number("T_low_K", cells)}, {Number("T_high_K", cells)})\n            {{\n");
+        foreach (string a in new[] { "a1", "a2", "a3", "a4", "a5", "a6", "a7", "b1", "b2" }) code.Append($"                {a} = {Number(a, cells)},\n");
+        code.Append("            },\n");
+    }
+
+    code.Append("        ],\n    };\n");
+
+    string Number(string column, List<string> cells) => Literal(cells[heads.IndexOf(column)]);
+}
+
+// Gases stand in one table each; a method a table row set, as for the records.
+string TransportRecords()
+{
+    (List<string> dilute, List<List<string>> diluteRows) = GasCells("transport_dilute");
+    (List<string> nasa, List<List<string>> nasaRows) = GasCells("transport_nasa");
+    (List<string> handbook, List<List<string>> handbookRows) = GasCells("transport_eq102");
+    StringBuilder code = Head("Viscosity and conductivity of the gases that have a published low-pressure correlation")
+        .Replace("namespace FlowDuct.Fluids.Water;", "#nullable enable\nnamespace FlowDuct.Fluids.Gases.Coefficients;")
+        .Append("internal static class TransportRecords\n{\n    /// <summary>The correlation of a gas by its formula; null where there is none.</summary>\n")
+        .Append("    internal static PureTransport? Find(string formula) => formula switch\n    {\n");
+    foreach (List<string> gas in diluteRows)
+    {
+        code.Append($"        \"{gas[0]}\" => new DiluteTransport({Literal(gas[1])}, {Literal(gas[2])})\n        {{\n");
+        for (int i = 3; i < gas.Count; i++) code.Append($"            {Short(dilute[i])} = {Literal(gas[i])},\n");
+        code.Append("        },\n");
+    }
+
+    Fits("NasaTransport", nasa, nasaRows, ["A", "B", "C", "D"]);
+    Fits("HandbookTransport", handbook, handbookRows, ["C1", "C2", "C3", "C4"]);
+    return code.Append("        _ => null,\n    };\n}\n").ToString();
+
+    string Short(string head) => head switch { "M_g_per_mol" => "M", "epsilon_over_k_K" => "EpsilonOverK", "sigma_nm" => "Sigma", "T_reducing_K" => "Treducing", _ => head };
+
+    void Fits(string type, List<string> heads, List<List<string>> rows, string[] columns)
+    {
+        foreach (IGrouping<string, List<string>> gas in rows.GroupBy(cells => cells[0]))
+            code.Append($"        \"{gas.Key}\" => new {type}(\n            [{Rows(gas, "viscosity")}],\n            [{Rows(gas, "conductivity")}]),\n");
+
+        string Rows(IEnumerable<List<string>> gas, string property) => string.Join(", ", gas.Where(cells => cells[1] == property)
+            .Select(cells => $"new({string.Join(", ", ((string[])["T_low_K", "T_high_K", .. columns]).Select(column => Literal(cells[heads.IndexOf(column)])))})"));
+    }
+}
+
+string CriticalRecords()
+{
+    (List<string> heads, List<List<string>> rows) = GasCells("critical_constants");
+    StringBuilder code = Head("Critical constants of the gases: K, Pa, m3/mol")
+        .Replace("namespace FlowDuct.Fluids.Water;", "namespace FlowDuct.Fluids.Gases.Coefficients;")
+        .Append("internal static class CriticalRecords\n{\n    /// <summary>The constants of a gas by its formula; null where there are none.</summary>\n")
+        .Append("    internal static CriticalConstants? Find(string formula) => formula switch\n    {\n");
+    foreach (List<string> gas in rows)
+        code.Append($"        \"{gas[0]}\" => new({Cell(gas, "Tc_K", "")}, {Cell(gas, "pc_MPa", "e6")}, {Cell(gas, "Vc_cm3_per_mol", "e-6")}, {Cell(gas, "Zc", "")}, {Cell(gas, "acentric_factor", "")}),\n");
+    return code.Append("        _ => null,\n    };\n}\n").ToString();
+
+    string Cell(List<string> gas, string column, string power) => Literal(gas[heads.IndexOf(column)] + power);
 }
 
 int Count(string body) => body.Split('\n').Sum(line => line.Split(' ').Count(word => word is "*" or "+" or "+=" or "-" or "/"));

@@ -4,6 +4,7 @@ using FlowDuct.Devices.Coefficients;
 using FlowDuct.Devices.Inverse;
 using FlowDuct.Errors;
 using FlowDuct.Fluids;
+using FlowDuct.Fluids.Gases;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Cli.CommandLine;
@@ -24,12 +25,15 @@ internal sealed class CaseBinder
 
     private double AmbientTemperature { get; set; } = 288.15;
 
-    /// <summary>The fluid by its name.</summary>
+    private AmbientAltitude? AmbientAltitude { get; set; }
+
+    /// <summary>The fluid by its name or composition.</summary>
     internal Fluid Fluid()
     {
         string name = _arguments.Value("--fluid")!;
-        if (FluidCatalogue.Find(name) is Fluid fluid) return fluid;
-        string? near = Usage.Nearest(name, FluidCatalogue.Names.Select(row => row.Name));
+        FractionBasis basis = Choice("--fractions", FractionBasis.Mole, ("mole", FractionBasis.Mole), ("mass", FractionBasis.Mass));
+        if (FluidCatalogue.Find(name, basis) is Fluid fluid) return RefuseIdleFractions(fluid);
+        string? near = Usage.Nearest(name, FluidCatalogue.Words);
         throw Usage.Refuse("--fluid", $"{Echo.Ascii(name)} is not a fluid of this version", near is null ? "flowduct fluids lists them" : $"did you mean {near}?");
     }
 
@@ -65,6 +69,7 @@ internal sealed class CaseBinder
             AmbientPressure = AmbientPressure,
             AmbientTemperature = AmbientTemperature,
             AmbientGiven = _arguments.Has("--ambient"),
+            AmbientAltitude = AmbientAltitude,
             UsesGauge = _usesGauge,
             FlowIsVolume = flowIsVolume,
         };
@@ -112,15 +117,32 @@ internal sealed class CaseBinder
         throw Usage.NotOneOf(option, typed, [.. choices.Select(choice => choice.Word)]);
     }
 
+    private Fluid RefuseIdleFractions(Fluid fluid) => !_arguments.Has("--fractions") || fluid is IdealGas { Mixture: not null }
+        ? fluid
+        : throw Usage.Refuse("--fractions", $"{fluid.Name} is no mixture and has no fractions", "leave it out, or give --fluid such as N2=0.72,CO2=0.13,H2O=0.15");
+
     private void ReadAmbient()
     {
         if (_arguments.Value("--ambient") is not string list) return;
+        bool p = false, T = false;
+        double? altitude = null;
         foreach (StationItem item in StationListParser.Parse("--ambient", Station.Ambient, list, AmbientPressure))
         {
-            if (item.Slot == StationSymbol.Pressure) AmbientPressure = item.Value.Si;
-            else if (item.Slot == StationSymbol.Temperature) AmbientTemperature = item.Value.Si;
-            else throw Usage.Refuse("--ambient", $"{item.Row.Key} is not taken in this version", "give p and T, for example \"p=0.95 bar, T=20 degC\"");
+            if (item.Slot == StationSymbol.Pressure) (AmbientPressure, p) = (item.Value.Si, true);
+            else if (item.Slot == StationSymbol.Temperature) (AmbientTemperature, T) = (item.Value.Si, true);
+            else altitude = item.Value.Si;
         }
+
+        if (altitude is double z) StandAt(z, p, T);
+    }
+
+    // The altitude stands in for what is not typed beside it. The list has refused one outside the atmosphere.
+    private void StandAt(double z, bool pressureTyped, bool temperatureTyped)
+    {
+        if (!StandardAtmosphere.TryAtAltitude(z, out double p, out double T)) return;
+        if (!pressureTyped) AmbientPressure = p;
+        if (!temperatureTyped) AmbientTemperature = T;
+        AmbientAltitude = new AmbientAltitude(z, !pressureTyped, !temperatureTyped);
     }
 
     private void Fill(ref GivenSlots slots, string option, Station station) => Fill(ref slots, option, station.ToList());

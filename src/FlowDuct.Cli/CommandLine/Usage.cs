@@ -47,17 +47,5 @@ internal static class Usage
         Nearest(value, choices) is string near ? $"did you mean {near}?" : string.Empty);
 
     /// <summary>The word at the least distance, if it is near enough to be a slip.</summary>
-    internal static string? Nearest(string word, IEnumerable<string> words)
-    {
-        string? best = null;
-        int least = Math.Max(1, word.Length / 3) + 1;
-        foreach (string candidate in words)
-        {
-            int distance = Slips.Distance(word, candidate);
-            if (candidate.StartsWith(word, StringComparison.Ordinal) && word.Length > 3) distance = 1;
-            if (distance < least) (least, best) = (distance, candidate);
-        }
-
-        return best;
-    }
+    internal static string? Nearest(string word, IEnumerable<string> words) => Slips.NearestWord(word, words);
 }

@@ -15,9 +15,16 @@ internal static class Assumptions
             yield return $"discharge coefficient: {row.Description}, {Devices.Coefficients.CriticalFlowCd.Standing}, uncertainty {text.Text(row.Uncertainty, Dimension.Ratio, 2)}";
         foreach (string line in answer.Assumptions) yield return line;
         if (answer.Performance.Thrust is not null && answer.Exit.Mach >= 1) yield return answer.BackPressure is null ? "thrust: against the ambient pressure" : "thrust: against the back pressure";
-        if (!answer.Case.AmbientGiven) yield return AmbientWords(answer.Case, text);
+        if (!answer.Case.AmbientGiven || answer.Case.AmbientAltitude is { GivesPressure: true } or { GivesTemperature: true }) yield return AmbientWords(answer.Case, text);
     }
 
     private static string AmbientWords(DeviceCase c, IQuantityText text) =>
-        $"ambient: {text.Text(c.AmbientPressure, Dimension.Pressure, 6)}, {text.Text(c.AmbientTemperature, Dimension.Temperature, 4)} (default)";
+        $"ambient: {text.Text(c.AmbientPressure, Dimension.Pressure, 6)}, {text.Text(c.AmbientTemperature, Dimension.Temperature, 4)} ({Origin(c.AmbientAltitude)})";
+
+    private static string Origin(AmbientAltitude? altitude)
+    {
+        if (altitude is null) return "default";
+        string which = altitude switch { { GivesTemperature: false } => "p of the ", { GivesPressure: false } => "T of the ", _ => string.Empty };
+        return $"{which}standard atmosphere at {NumberFormatter.Shortest(altitude.z, 6)} m";
+    }
 }

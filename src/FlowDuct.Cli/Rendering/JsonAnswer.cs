@@ -45,6 +45,7 @@ internal static class JsonAnswer
         JsonHead.Given(json, "throat.", c.Throat);
         JsonHead.Given(json, "exit.", c.Exit);
         JsonHead.Given(json, "back.", c.Back);
+        if (c.AmbientAltitude is AmbientAltitude altitude) json.WriteNumber("ambient.altitude", altitude.z);
         foreach (QuantityRow row in QuantityCatalogue.Options)
         {
             if (row.OptionSlot is CaseOption option && c.Has(option)) json.WriteNumber(GivenKey(row, c), c.Value(option));
@@ -54,8 +55,8 @@ internal static class JsonAnswer
         json.WriteStartObject("assumed");
         if (answer.TakenIdeal) json.WriteNumber("efficiency", 1);
         if (answer.InletTakenAtRest) json.WriteNumber("inlet.V", 0);
-        if (!c.AmbientGiven) json.WriteNumber("ambient.p", c.AmbientPressure);
-        if (!c.AmbientGiven) json.WriteNumber("ambient.T", c.AmbientTemperature);
+        if (!c.AmbientGiven || c.AmbientAltitude is { GivesPressure: true }) json.WriteNumber("ambient.p", c.AmbientPressure);
+        if (!c.AmbientGiven || c.AmbientAltitude is { GivesTemperature: true }) json.WriteNumber("ambient.T", c.AmbientTemperature);
         json.WriteEndObject();
         Found(json, answer.Found);
         json.WriteStartArray("assumptions");

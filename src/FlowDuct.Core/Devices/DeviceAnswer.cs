@@ -62,4 +62,7 @@ internal sealed record DeviceAnswer : IStations
         StationAnswer?[] stations = [Inlet, Throat, Exit];
         return Array.Find(stations, at => at is not null && (at.State.Notices & notice) != 0);
     }
+
+    /// <inheritdoc/>
+    public IEnumerable<StationAnswer> Known => new[] { Inlet, Throat, Exit }.OfType<StationAnswer>().Where(at => at.HasState);
 }

@@ -95,6 +95,9 @@ internal sealed record DeviceCase
     /// <summary>True where the ambient state was typed, false where the default stands in for it.</summary>
     internal bool AmbientGiven { get; init; }
 
+    /// <summary>The altitude that the ambient state was given by; null where it was not.</summary>
+    internal AmbientAltitude? AmbientAltitude { get; init; }
+
     /// <summary>True where the flow is an actual volume flow at the inlet, m3/s; else it is a mass flow, kg/s.</summary>
     internal bool FlowIsVolume { get; init; }
 

@@ -14,6 +14,9 @@ internal sealed record StateAnswer(Fluid Fluid, GivenSlots Given, StationAnswer 
     /// <inheritdoc/>
     public StationAnswer? StationWith(Notices notice) => (At.State.Notices & notice) != 0 ? At : null;
 
+    /// <inheritdoc/>
+    public IEnumerable<StationAnswer> Known => [At];
+
     /// <summary>Saturation temperature at this pressure, K; null where there is none.</summary>
     internal double? SaturationTemperature => Fluid.TrySaturationTemperature(At.State.p, out double T) ? T : null;
 

@@ -25,6 +25,7 @@ internal static class FindingRules
         NearChoking.Check,
         ModelDoubtful.Check,
         a => NearCritical.Check(a.Fluid, a),
+        a => RealGas.Check(a.Fluid, a),
         IllConditioned.Check,
         Shock.Check,
         OverexpandedSeparation.Check,
@@ -45,7 +46,7 @@ internal static class FindingRules
         findings.All(f => f.Severity < (strict ? Severity.Caution : Severity.Error));
 
     /// <summary>The rules that speak of a state alone.</summary>
-    internal static readonly Func<Fluid, IStations, Finding?>[] OfStates = [Icing.Check, NearCritical.Check, Extrapolated.Check];
+    internal static readonly Func<Fluid, IStations, Finding?>[] OfStates = [Icing.Check, NearCritical.Check, RealGas.Check, Extrapolated.Check];
 
     /// <summary>The findings of a property answer, gravest first.</summary>
     internal static IReadOnlyList<Finding> Apply(StateAnswer answer) =>

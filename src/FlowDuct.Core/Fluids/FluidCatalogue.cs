@@ -1,4 +1,6 @@
+using FlowDuct.Errors;
 using FlowDuct.Fluids.Gases;
+using FlowDuct.Fluids.Gases.Coefficients;
 
 namespace FlowDuct.Fluids;
 
@@ -12,13 +14,30 @@ public static class FluidCatalogue
         new("air", "dry air as an ideal gas", () => GasCatalogue.Air),
     ];
 
-    /// <summary>Every accepted name with a word about the fluid.</summary>
-    internal static IReadOnlyList<FluidName> Names => s_names;
+    /// <summary>Every accepted name with a word about the fluid; the gases follow in the order of their table.</summary>
+    internal static IReadOnlyList<FluidName> Names =>
+        [.. s_names, .. Nasa9Records.Words().Where(gas => gas.Name != "air").Select(OfGas)];
 
-    /// <summary>Finds a fluid by name; names are lower case with hyphens.</summary>
-    /// <param name="name">The name.</param>
+    /// <summary>Every word that names a fluid, formulas among them.</summary>
+    internal static IEnumerable<string> Words => Names.Select(row => row.Name).Concat(Nasa9Records.Words().Select(gas => gas.Formula));
+
+    /// <summary>
+    /// Finds a fluid by name (lower case with hyphens), a gas by its formula (case-sensitive) too, a mixture of gases by its
+    /// composition, such as "N2=0.72,CO2=0.13,H2O=0.15".
+    /// </summary>
+    /// <param name="name">The name or composition.</param>
+    /// <param name="basis">What the fractions of a composition count.</param>
     /// <returns>The fluid, or null where no fluid has that name.</returns>
-    public static Fluid? Find(string name) => Array.Find(s_names, row => row.Name == name)?.Fluid();
+    /// <exception cref="FlowDuctException">A composition that is not understood.</exception>
+    public static Fluid? Find(string name, FractionBasis basis = FractionBasis.Mole)
+    {
+        ArgumentNullException.ThrowIfNull(name);
+        return Array.Find(s_names, row => row.Name == name)?.Fluid()
+            ?? (GasMixtureParser.IsMixture(name) ? GasMixtureParser.Parse("--fluid", name, basis).Gas : GasCatalogue.Find(name));
+    }
+
+    private static FluidName OfGas((string Name, string Formula) gas) => new(
+        gas.Name, $"{gas.Formula}, as an ideal gas", () => GasCatalogue.Find(gas.Name)!);
 }
 
 /// <summary>A name of a fluid.</summary>

@@ -1,3 +1,5 @@
+using FlowDuct.Fluids.Gases;
+
 namespace FlowDuct.Quantities;
 
 /// <content>Quantities of a section: flow, size, and pressures told relative to the inlet.</content>
@@ -166,10 +168,10 @@ internal static partial class QuantityCatalogue
             StationSlot = StationSymbol.Altitude,
             TakenBy = StationLists.Ambient,
             JsonKey = "altitude",
-            Limits = new QuantityLimits(-1000, 11_000, true),
+            Limits = new QuantityLimits(StandardAtmosphere.LeastAltitude, StandardAtmosphere.GreatestAltitude, true),
             OwnMetricUnit = "m",
             OwnUsUnit = "ft",
-            Help = "Height above mean sea level; gives the ambient pressure of the standard atmosphere (ISO 2533:1975, troposphere).",
+            Help = "Height above mean sea level; gives pressure and temperature of the standard atmosphere (ISO 2533:1975, above 32 km that of 1976).",
             Example = "altitude=600 m",
         },
     ];

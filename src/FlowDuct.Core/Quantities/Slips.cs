@@ -52,6 +52,21 @@ internal static class Slips
         return near;
     }
 
+    /// <summary>The word at the least distance, if it is near enough to be a slip; null otherwise.</summary>
+    public static string? NearestWord(string word, IEnumerable<string> words)
+    {
+        string? best = null;
+        int least = Math.Max(1, word.Length / 3) + 1;
+        foreach (string candidate in words)
+        {
+            int distance = Distance(word, candidate);
+            if (candidate.StartsWith(word, StringComparison.Ordinal) && word.Length > 3) distance = 1;
+            if (distance < least) (least, best) = (distance, candidate);
+        }
+
+        return best;
+    }
+
     /// <summary>Edit distance; letters that differ in case only count nothing.</summary>
     public static int Distance(string a, string b)
     {

@@ -15,19 +15,27 @@ public sealed class IdealGas : Fluid
 
     private readonly Species species;
     private readonly CaloricCurve curve;
+    private readonly GasMixture? mixture;
+    private readonly Lazy<GasTransport?> transport;
+    private readonly Lazy<SecondVirial?> virial;
 
     internal IdealGas(Species species)
     {
         this.species = species;
         R = MolarGasConstant / species.MolarMass * 1000;
         curve = new CaloricCurve(species, MolarGasConstant);
+        transport = new Lazy<GasTransport?>(() => GasTransport.Of(Components));
+        virial = new Lazy<SecondVirial?>(() => SecondVirial.Of(Components));
     }
+
+    internal IdealGas(GasMixture mixture)
+        : this(MixedRecord.Of(mixture.Name, mixture.Components)) => this.mixture = mixture;
 
     /// <inheritdoc/>
     public override string Name => species.Name;
 
     /// <inheritdoc/>
-    public override string Formulation => $"NASA/TP-2002-211556 (2002), record {species.ReportRecord}, ideal gas";
+    public override string Formulation => mixture?.Formulation ?? $"NASA/TP-2002-211556 (2002), record {species.ReportRecord}, ideal gas";
 
     /// <inheritdoc/>
     public override string RangeText => IdealGasLimits.RangeText(curve);
@@ -40,6 +48,15 @@ public sealed class IdealGas : Fluid
 
     /// <summary>Molar mass, g/mol.</summary>
     internal double MolarMass => species.MolarMass;
+
+    /// <summary>The mixture that this is; null of a pure gas.</summary>
+    internal GasMixture? Mixture => mixture;
+
+    /// <summary>The gases in it with their mole fractions; a pure gas is its own only component.</summary>
+    internal IReadOnlyList<GasComponent> Components => mixture?.Components ?? [new GasComponent(species, 1)];
+
+    /// <summary>What tells how far the real gas is from this one; null where one of its gases has no critical constants.</summary>
+    internal SecondVirial? Virial => virial.Value;
 
     /// <inheritdoc/>
     internal override double LeastPressure => IdealGasLimits.LeastPressure;
@@ -123,6 +140,13 @@ public sealed class IdealGas : Fluid
         if (outcome == Outcome.Ok)
             state = State(p, T, curve.At(T));
         return outcome;
+    }
+
+    /// <summary>Viscosity and conductivity at low pressure, where the gas has a correlation and T lies inside it.</summary>
+    internal override bool TryTransport(in FluidState at, out Transport transport)
+    {
+        transport = default;
+        return this.transport.Value is GasTransport known && known.TryAt(at.T, out transport);
     }
 
     /// <inheritdoc/>

@@ -8,6 +8,9 @@ internal sealed record Species
     /// <summary>The name used on the command line.</summary>
     internal required string Name { get; init; }
 
+    /// <summary>Formula or short name, the word that mixtures are written with; case tells CO from Co.</summary>
+    internal required string Formula { get; init; }
+
     /// <summary>The name of the record in the report.</summary>
     internal required string ReportRecord { get; init; }
 

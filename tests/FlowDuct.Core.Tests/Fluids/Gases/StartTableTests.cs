@@ -7,7 +7,7 @@ namespace FlowDuct.Core.Tests.Fluids.Gases;
 /// <summary>The start must be good enough for one Newton step: slower code would pass every other test.</summary>
 public class StartTableTests
 {
-    private static readonly CaloricCurve Curve = new(Nasa9Air.Record, IdealGas.MolarGasConstant);
+    private static readonly CaloricCurve Curve = new(Nasa9Records.Air(), IdealGas.MolarGasConstant);
 
     [Fact]
     public void Start_from_enthalpy_is_within_a_ten_thousandth_of_a_kelvin()
