@@ -23,6 +23,7 @@ internal static class FindingRules
         NearChoking.Check,
         ModelDoubtful.Check,
         a => NearCritical.Check(a.Fluid, a),
+        a => Condensing.Check(a.Fluid, a),
         a => RealGas.Check(a.Fluid, a),
         IllConditioned.Check,
         ReactionForce.Check,
@@ -40,7 +41,7 @@ internal static class FindingRules
         findings.All(f => f.Severity < (strict ? Severity.Caution : Severity.Error));
 
     /// <summary>The rules that speak of a state alone.</summary>
-    internal static readonly Func<Fluid, IStations, Finding?>[] OfStates = [Icing.Check, NearCritical.Check, RealGas.Check, Extrapolated.Check];
+    internal static readonly Func<Fluid, IStations, Finding?>[] OfStates = [Icing.Check, NearCritical.Check, Condensing.Check, RealGas.Check, Extrapolated.Check];
 
     /// <summary>The findings of a property answer, gravest first.</summary>
     internal static IReadOnlyList<Finding> Apply(StateAnswer answer) =>
