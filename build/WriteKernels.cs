@@ -167,8 +167,8 @@ string GasRecords()
         .Replace("namespace FlowDuct.Fluids.Water;", "#nullable enable\nnamespace FlowDuct.Fluids.Gases.Coefficients;")
         .Append("internal static class Nasa9Records\n{\n");
     code.Append("    /// <summary>Name and formula of every record, in the order of the table; made when asked for.</summary>\n");
-    code.Append("    internal static (string Name, string Formula)[] Words() =>\n    [\n");
-    foreach (List<string> gas in names) code.Append($"        (\"{gas[0]}\", \"{gas[1]}\"),\n");
+    code.Append("    internal static GasWord[] Words() =>\n    [\n");
+    foreach (List<string> gas in names) code.Append($"        new(\"{gas[0]}\", \"{gas[1]}\"),\n");
     code.Append("    ];\n\n    /// <summary>The record of a name or formula; null where there is none.</summary>\n");
     code.Append("    internal static Species? Find(string word) => word switch\n    {\n");
     foreach (List<string> gas in names) code.Append($"        \"{gas[0]}\" or \"{gas[1]}\" => {Method(gas[0])}(),\n");

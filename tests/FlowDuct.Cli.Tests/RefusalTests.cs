@@ -76,7 +76,7 @@ public class RefusalTests
     [InlineData(2, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --throat \"d=18 mm\" --back \"p=1 bar\" --path 2", "--path: 2 is not a whole number from 3 to 10000\n  write for example --path 21")]
     [InlineData(2, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --exit \"p=5 bar\" --path 9", "--path: the states along a nozzle need its sections and the back pressure\n  give --throat or --exit with A or d, and --back")]
     [InlineData(2, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --throat \"d=18 mm\" --back \"p=1 bar\" --format csv", "--format: csv holds the states along a nozzle, and none are asked for\n  add --path, for example --path 21")]
-    [InlineData(2, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --throat \"d=18 mm\" --back \"p=1 bar\" --wall nowhere.csv", "--wall: nowhere.csv could not be read: its folder does not exist\n  check the name")]
+    [InlineData(2, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --throat \"d=18 mm\" --back \"p=1 bar\" --wall nowhere.csv", "--wall: nowhere.csv could not be read: there is no such file\n  check the name")]
     [InlineData(2, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --throat \"d=18 mm\" --find back.p", "--find: nothing says what the figure has to reach\n  add --target, for example --target \"shock.area_ratio=1.5\"")]
     [InlineData(2, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --throat \"d=18 mm\" --target \"exit.V=200 m/s\"", "--target: a target needs the figure that may move\n  add --find, for example --find back.p")]
     [InlineData(2, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --throat \"d=18 mm\" --find bck.p --target \"exit.V=200 m/s\"", "--find: bck.p is no figure of a case\n  write for example inlet.p0, back.p, exit.d, throat.d, efficiency, flow")]
@@ -86,6 +86,10 @@ public class RefusalTests
     [InlineData(2, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --throat \"d=18 mm\" --back \"p=1 bar\" --find back.p --target \"exit.V=200 m/s\"", "--find: back.p is given too\n  leave it out of the case, or find another figure")]
     [InlineData(3, "flowduct nozzle --fluid air --inlet \"p=8 bar, T=313 K, d=10 mm\" --throat \"d=18 mm\" --back \"p=1 bar\"", "--inlet: the inlet section passes less than the throat: it would choke first\n  check the bores of inlet and throat")]
     [InlineData(3, "flowduct nozzle --fluid air --inlet \"p=8 bar, T=313 K, V=600 m/s\" --throat \"d=18 mm\" --back \"p=1 bar\"", "--inlet: the inlet is faster than sound: a nozzle given by its sections is rated from a subsonic inlet\n  give a slower inlet")]
+    [InlineData(3, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --throat \"d=18 mm\" --back \"dp=9 bar\"", "--back: the pressure would be -1 bar absolute, and no fluid has that\n  give a smaller pressure drop")]
+    [InlineData(3, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --exit \"dp=9 bar\"", "--exit: the pressure would be -1 bar absolute, and no fluid has that\n  give a smaller pressure drop")]
+    [InlineData(2, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --throat \"d=18 mm\" --exit \"d=25 mm, p=2 bar, dp=1 bar\"", "--exit: the back pressure is given more than once\n  keep one of p, dp, rise, p/p0, p/p1")]
+    [InlineData(3, "flowduct nozzle --fluid air --inlet \"p0=8 bar, T0=313 K\" --throat \"d=18 mm\" --exit \"d=25 mm\" --find back.p --target \"shock.area_ratio=1.5\" --branch 2", "--branch: there is no value 2 of back.p: one alone meets the target\n  leave it out")]
     public void A_wrong_input_is_met_by_its_message(int status, string line, string message)
     {
         CommandRun run = CommandRun.RunLine(line);

@@ -80,21 +80,13 @@ internal static class Application
         RenderOptions options = RenderBinder.Bind(arguments, binder, terminal);
         AnswerFormat format = RenderBinder.Format(binder);
         DeviceCase c = binder.Device(arguments.Command == CommandName.Nozzle ? DeviceKind.Nozzle : DeviceKind.Diffuser);
-        DeviceAnswer answer = binder.Question() is InverseQuestion question ? Found(question, c, binder.RootNumber) : DeviceSolver.Solve(c);
+        DeviceAnswer answer = binder.Question() is InverseQuestion question ? question.Answer(c, binder.RootNumber) : DeviceSolver.Solve(c);
         IReadOnlyList<PathPoint>? path = PathBinder.Read(arguments, answer);
         if (format == AnswerFormat.Csv && path is null) throw Usage.Refuse("--format", "csv holds the states along a nozzle, and none are asked for", "add --path, for example --path 21");
         if (format == AnswerFormat.Json) JsonAnswer.Write(memory, answer, path, options);
-        else if (format == AnswerFormat.Csv) Text(memory, to => PathTable.Csv(to, path!, answer.Expanding ?? answer.Fluid, options));
+        else if (format == AnswerFormat.Csv) Text(memory, to => PathTable.Csv(to, path!, answer.ExpandingFluid, options));
         else Text(memory, to => TextAnswer.Write(to, answer, path, options));
         return answer.Passes(options.Strict) ? ExitStatus.Passed : ExitStatus.Failed;
-    }
-
-    private static DeviceAnswer Found(InverseQuestion question, DeviceCase c, int? number)
-    {
-        IReadOnlyList<(DeviceAnswer Answer, FoundFigure Found)> roots = question.Solve(c);
-        int chosen = roots.Count == 1 ? 1 : number is int n && n >= 1 && n <= roots.Count ? n : throw Refusals.SeveralFound([.. roots.Select(root => root.Found)]);
-        DeviceAnswer answer = roots[chosen - 1].Answer with { Found = roots[chosen - 1].Found };
-        return answer with { Findings = FindingRules.Apply(answer) };
     }
 
     private static int Text(MemoryStream memory, Action<TextWriter> write)

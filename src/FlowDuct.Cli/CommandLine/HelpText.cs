@@ -17,7 +17,7 @@ internal static class HelpText
     private static void Root(TextWriter to)
     {
         Example(to, CommandTable.Of(CommandName.Nozzle).Example);
-        TextWrap.Write(to, string.Empty, "FlowDuct checks, rates and audits nozzles and diffusers in steam, water and air: exit state, velocity, quality, efficiency, and a verdict of mass, energy and entropy.", 0);
+        TextWrap.Write(to, string.Empty, "FlowDuct checks, rates and audits nozzles and diffusers in steam, water, air and other gases: exit state, velocity, quality, efficiency, and a verdict of mass, energy and entropy.", 0);
         to.WriteLine();
         to.WriteLine("commands");
         foreach (CommandRow row in CommandTable.All) Entry(to, row.Word, row.Purpose);

@@ -7,14 +7,14 @@ internal static class OptionTable
 {
     internal static readonly OptionRow[] All =
     [
-        new("--fluid", "NAME", "Fluid by name, or a mixture of gases by its fractions such as N2=0.72,CO2=0.13,H2O=0.15; flowduct fluids lists them.", "steam", CommandName.Answering, IsRequired: true),
+        new("--fluid", "NAME", "Fluid by name, or a mixture of gases such as N2=0.72,CO2=0.13,H2O=0.15; flowduct fluids lists them.", "steam", CommandName.Answering, IsRequired: true),
         new("--fractions", "BASIS", "What the fractions of a mixture count: mole (the default) or mass.", "mass", CommandName.Answering),
         new("--at", "LIST", "Two independent properties, each with its unit.", "\"p=7 bar, superheat=20 K\"", CommandName.State, IsRequired: true),
         new("--inlet", "LIST", "State and velocity at the inlet.", "\"p=9 bar, T=230 degC, V=25 m/s\"", CommandName.Devices, IsRequired: true),
         new("--throat", "LIST", "Section of the throat.", "\"d=18 mm\"", CommandName.Nozzle),
         new("--exit", "LIST", "What is known of the exit plane.", "\"p=3.2 bar\"", CommandName.Devices),
         new("--back", "LIST", "Pressure of the space that the exit discharges into.", "\"p=1 atm\"", CommandName.Nozzle),
-        new("--ambient", "LIST", "Pressure and temperature of the surroundings; 1 atm, 15 degC if not given.", "\"p=0.98 bar\"", CommandName.Answering),
+        new("--ambient", "LIST", "Pressure and temperature of the surroundings, or their altitude; 1 atm, 15 degC if not given.", "\"p=0.98 bar\"", CommandName.Answering),
         Of(CaseOption.Flow, "FLOW", CommandName.Devices),
         Of(CaseOption.Efficiency, "RATIO", CommandName.Devices),
         Of(CaseOption.VelocityCoefficient, "RATIO", CommandName.Nozzle),

@@ -13,10 +13,10 @@ internal static class OutputFile
         Replace(Followed(path), bytes);
     }
 
-    /// <summary>Why a file could not be written, in words: the texts of the runtime are left out of the native binary.</summary>
+    /// <summary>Why a file could not be written or read, in words: the texts of the runtime are left out of the native binary.</summary>
     internal static string Reason(Exception failure) => failure switch
     {
-        DirectoryNotFoundException or FileNotFoundException => "its folder does not exist",
+        DirectoryNotFoundException => "its folder does not exist",
         UnauthorizedAccessException => "it is a folder, or permission is denied",
         PathTooLongException => "the path is too long",
         IOException => failure.Message,

@@ -1,12 +1,12 @@
 using FlowDuct.Devices;
 using FlowDuct.Devices.Rating;
-using FlowDuct.Quantities;
 
 namespace FlowDuct.Cli.CommandLine;
 
 /// <summary>Reads which sections of a nozzle are wanted, and solves them.</summary>
 internal static class PathBinder
 {
+    private const int LeastSections = 3;
     private const int MostSections = 10_000;
 
     /// <summary>The states along the nozzle; null where none are asked for.</summary>
@@ -18,14 +18,7 @@ internal static class PathBinder
         string place = count is null ? "--wall" : "--path";
         if (answer.Rating is null || answer.Exit.Area is null)
             throw Usage.Refuse(place, "the states along a nozzle need its sections and the back pressure", "give --throat or --exit with A or d, and --back");
-        IReadOnlyList<PathSection> sections = count is null ? WallFile.Read(wall!, answer) : NozzlePath.Sections(answer, Count(count));
+        IReadOnlyList<PathSection> sections = count is null ? WallFile.Read(wall!, answer) : NozzlePath.Sections(answer, WholeNumber.Read("--path", count, LeastSections, MostSections, 21));
         return NozzlePath.Solve(answer, sections);
-    }
-
-    private static int Count(string text)
-    {
-        bool read = NumberParser.TryParse(text, out PrintedNumber number, out _);
-        bool whole = read && number.Value == Math.Floor(number.Value) && number.Value is >= 3 and <= MostSections;
-        return whole ? (int)number.Value : throw Usage.Refuse("--path", $"{Echo.Ascii(text)} is not a whole number from 3 to {MostSections}", "write for example --path 21");
     }
 }

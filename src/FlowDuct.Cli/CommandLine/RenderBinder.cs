@@ -33,13 +33,8 @@ internal static class RenderBinder
         return chosen ?? (terminal && !forbidden);
     }
 
-    private static int? Digits(Arguments arguments)
-    {
-        if (arguments.Value("--digits") is not string text) return null;
-        bool read = NumberParser.TryParse(text, out PrintedNumber number, out _);
-        bool whole = read && number.Value == Math.Floor(number.Value) && number.Value is >= 1 and <= MostDigits;
-        return whole ? (int)number.Value : throw Usage.Refuse("--digits", $"{Echo.Ascii(text)} is not a whole number from 1 to {MostDigits}", "write for example --digits 7");
-    }
+    private static int? Digits(Arguments arguments) =>
+        arguments.Value("--digits") is string text ? WholeNumber.Read("--digits", text, 1, MostDigits, 7) : null;
 
     // "T=degF, p=inH2O(g)": a symbol and a unit of its dimension.
     private static Dictionary<Dimension, UnitReading>? ShowIn(Arguments arguments)

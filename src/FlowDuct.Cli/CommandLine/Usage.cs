@@ -16,7 +16,7 @@ internal static class Usage
 
     internal static FlowDuctException BeforeCommand(string word) => Nearest(word, ["--help", "--version"]) is string near && near != word
         ? Refuse(string.Empty, $"{Echo.Ascii(word)} is not an option", $"did you mean {near}?")
-        : Refuse(string.Empty, $"{Echo.Ascii(word)} comes before a command", "begin with one of state, nozzle, diffuser, fluids, units");
+        : Refuse(string.Empty, $"{Echo.Ascii(word)} comes before a command", "begin with one of " + CommandTable.WordsOf(CommandName.All));
 
     internal static FlowDuctException UnknownOption(string word, CommandName command)
     {

@@ -16,27 +16,14 @@ internal static class WallFile
         for (int i = 1; i < lines.Length; i++)
         {
             string[] cells = lines[i].Split(',', StringSplitOptions.TrimEntries);
-            if (cells.Length != 2) throw Refuse(file, i, $"{cells.Length} cells instead of 2", "write position, diameter");
+            if (cells.Length != 2) throw Refuse(file, i, $"cells: {cells.Length} instead of 2", "write position, diameter");
             rows.Add((Number(file, i, cells[0], position), Number(file, i, cells[1], diameter)));
+            if (rows[^1].Diameter <= 0) throw Refuse(file, i, "the diameter is not above zero", "write the bore of the nozzle there");
             if (i > 1 && rows[^1].Position <= rows[^2].Position) throw Refuse(file, i, "the position does not rise", "list the sections from inlet to exit");
         }
 
-        return Sections(file, rows, answer);
+        return WallSections.Of(Echo.Ascii(file), rows, answer);
     }
-
-    // The narrowest section is the throat of the case; the wall has to be the nozzle that was rated.
-    private static IReadOnlyList<PathSection> Sections(string file, List<(double Position, double Diameter)> rows, DeviceAnswer answer)
-    {
-        (_, double throat, double exit) = NozzlePath.Areas(answer);
-        double openings = (answer.Throat ?? answer.Exit).Openings;
-        double narrowest = rows.Min(row => Area(row.Diameter, openings)), last = Area(rows[^1].Diameter, openings);
-        if (Math.Abs(narrowest - throat) > 0.01 * throat || Math.Abs(last - exit) > 0.01 * exit)
-            throw Usage.Refuse("--wall", $"{Echo.Ascii(file)}: its throat or exit bore differs from the case by more than half a per cent", "give the bores of the wall as --throat and --exit");
-        int at = rows.FindIndex(row => Area(row.Diameter, openings) == narrowest);
-        return [.. rows.Select((row, i) => new PathSection(row.Position, Math.Max(Area(row.Diameter, openings), throat), i > at))];
-    }
-
-    private static double Area(double diameter, double openings) => Math.PI * diameter * diameter / 4 * openings;
 
     private static string[] Lines(string file)
     {
@@ -47,9 +34,11 @@ internal static class WallFile
         }
         catch (Exception failure) when (failure is IOException or UnauthorizedAccessException or NotSupportedException or ArgumentException)
         {
-            throw Usage.Refuse("--wall", $"{Echo.Ascii(file)} could not be read: {OutputFile.Reason(failure)}", "check the name");
+            throw Usage.Refuse("--wall", $"{Echo.Ascii(file)} could not be read: {Reason(failure)}", "check the name");
         }
     }
+
+    private static string Reason(Exception failure) => failure is FileNotFoundException ? "there is no such file" : OutputFile.Reason(failure);
 
     private static UnitReading Unit(string file, string[] heads, string name)
     {

@@ -22,7 +22,7 @@ internal static class JsonAnswer
         JsonStation.Write(json, "throat", answer.Fluid, answer.Throat);
         JsonStation.Write(json, "exit", answer.Fluid, answer.Exit);
         json.WriteEndObject();
-        PathTable.Json(json, path, answer.Expanding ?? answer.Fluid);
+        PathTable.Json(json, path, answer.ExpandingFluid);
         JsonPerformance.Write(json, answer.Performance);
         Ledger(json, answer.Ledger);
         Laws(json, answer.Audit);

@@ -27,7 +27,7 @@ internal static class TextAnswer
         Device(to, answer, options);
         Energy(to, answer, options);
         Laws(to, answer, options);
-        if (path is not null) PathTable.Text(to, path, answer.Expanding ?? answer.Fluid, options);
+        if (path is not null) PathTable.Text(to, path, answer.ExpandingFluid, options);
         Findings(to, answer.Findings, options);
         Assumed(to, answer, options);
         to.WriteLine();

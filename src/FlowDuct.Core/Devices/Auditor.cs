@@ -1,4 +1,3 @@
-using FlowDuct.Findings;
 using FlowDuct.Flow;
 using FlowDuct.Fluids;
 using FlowDuct.Quantities;
@@ -10,6 +9,9 @@ internal static class Auditor
 {
     // Closure of the property inverses: a difference below this is no entropy at all.
     internal const double EntropyFloor = 1e-6;
+
+    // Of a flow: flux and section agree to the closure of the property inverses.
+    private const double FlowClosure = 1e-9;
 
     internal static Audit Judge(DeviceAnswer a)
     {
@@ -35,13 +37,13 @@ internal static class Auditor
     // A given flow beside sections: against the flow that they pass, or, where it implies the coefficient, against the isentropic flow.
     private static Audit JudgeRatedMass(DeviceAnswer a, Audit audit)
     {
-        if (!a.Case.Has(CaseOption.Flow) || Surplus(a) is not double surplus) return audit;
+        if (a.Case.GivenMassFlow(a.Inlet.State.rho) is not double flow || Surplus(a) is not double surplus) return audit;
+        double gap = Implied(a) ? surplus : Math.Abs(surplus);
+        if (gap <= FlowClosure) return audit;
         double rounding = Rounding.Effect(a.Case, Surplus, surplus);
-        bool agrees = Implied(a) ? surplus <= 1e-9 : Math.Abs(surplus) <= 1e-9, explained = (Implied(a) ? surplus : Math.Abs(surplus)) <= rounding;
-        double flow = a.Case.Value(CaseOption.Flow) * (a.Case.FlowIsVolume ? a.Inlet.State.rho : 1);
-        return agrees ? audit : audit with
+        return audit with
         {
-            Mass = explained ? Verdict.WithinRounding : AboveEquilibriumFlow.Explains(a) ? Verdict.Holds : Verdict.Broken,
+            Mass = gap <= rounding ? Verdict.WithinRounding : Rating.FrozenFlow.Allows(a, flow) ? Verdict.Holds : Verdict.Broken,
             MassFlowFound = flow / (1 + surplus),
             MassFlowRounding = rounding * flow,
         };
@@ -52,7 +54,7 @@ internal static class Auditor
     private static double? Surplus(DeviceAnswer a)
     {
         if (a.Rating is not Rating.NozzleRating rating || a.Performance.DischargeCoefficient is null) return null;
-        double flow = a.Case.Value(CaseOption.Flow) * (a.Case.FlowIsVolume ? a.Inlet.State.rho : 1);
+        double? flow = a.Case.GivenMassFlow(a.Inlet.State.rho);
         return (flow / (Implied(a) ? rating.IsentropicFlow : rating.MassFlow)) - 1;
     }
 
@@ -63,7 +65,7 @@ internal static class Auditor
         if (!slots.Has((int)StationSymbol.Area) && !slots.Has((int)StationSymbol.Diameter)) return audit;
         if (Carried(inlet ? a.Inlet : a.Exit) is not double carried) return audit;
         double gap = Math.Abs(carried - flow);
-        if (gap <= 1e-9 * flow) return audit;
+        if (gap <= FlowClosure * flow) return audit;
         double rounding = Rounding.Effect(a.Case, Gap, carried - flow);
         return audit with
         {

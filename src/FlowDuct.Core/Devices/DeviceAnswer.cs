@@ -43,8 +43,8 @@ internal sealed record DeviceAnswer : IStations
     /// <summary>The figure that was found for a target; null where none was asked for.</summary>
     internal Inverse.FoundFigure? Found { get; init; }
 
-    /// <summary>The fluid that expands, where its phase is held; else null.</summary>
-    internal Fluid? Expanding { get; init; }
+    /// <summary>The fluid along the device: the one of the case, or it with the phase of the inlet held.</summary>
+    internal Fluid ExpandingFluid { get => field ?? Case.Fluid; init; }
 
     /// <summary>The back pressure that the rating used, Pa; null where none was given.</summary>
     internal double? BackPressure { get; init; }

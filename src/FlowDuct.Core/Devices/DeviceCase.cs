@@ -122,6 +122,15 @@ internal sealed record DeviceCase
 
     internal double ValueOr(CaseOption option, double otherwise) => Has(option) ? Value(option) : otherwise;
 
+    /// <summary>The efficiency, given as itself or as the square of a velocity coefficient; null where neither is.</summary>
+    internal double? GivenEfficiency =>
+        Has(CaseOption.VelocityCoefficient) ? Value(CaseOption.VelocityCoefficient) * Value(CaseOption.VelocityCoefficient)
+        : Has(CaseOption.Efficiency) ? Value(CaseOption.Efficiency)
+        : null;
+
+    /// <summary>The flow as a mass flow at an inlet of this density, kg/m3; null where none is given.</summary>
+    internal double? GivenMassFlow(double rho) => Has(CaseOption.Flow) ? Value(CaseOption.Flow) * (FlowIsVolume ? rho : 1) : null;
+
     /// <summary>Heat added per mass, J/kg: heat minus heat loss.</summary>
     internal double Heat => ValueOr(CaseOption.Heat, 0) - ValueOr(CaseOption.HeatLoss, 0);
 }

@@ -11,26 +11,10 @@ internal static class ExitFigures
         StationFigures given = StationFigures.Read(c.Exit, Station.Exit);
         if (given.Has(Figure.T0)) throw Refusals.FixedByEnergy("T0");
         if (given.Has(Figure.H0)) throw Refusals.FixedByEnergy("h0");
-        AddRelativePressures(c, inlet, given);
+        foreach (double p in RelativePressures.Read("--exit", c.Exit, inlet.State.p, inlet.Station.Stagnation!.Value.p)) given.Add(Figure.P, p, Station.Exit);
         AddRecovery(c, inlet, given);
         AddLoss(c, given);
         return given;
-    }
-
-    private static void AddRelativePressures(DeviceCase c, Inlet inlet, StationFigures given)
-    {
-        double p1 = inlet.State.p, p01 = inlet.Station.Stagnation!.Value.p;
-        Add(StationSymbol.PressureDrop, dp => p1 - dp);
-        Add(StationSymbol.PressureRise, rise => p1 + rise);
-        Add(StationSymbol.PressureOverInletStagnation, ratio => ratio * p01);
-        Add(StationSymbol.PressureOverInlet, ratio => ratio * p1);
-
-        void Add(StationSymbol symbol, Func<double, double> toPressure)
-        {
-            if (!c.Exit.Has((int)symbol)) return;
-            double p = toPressure(c.Exit.Value((int)symbol));
-            given.Add(Figure.P, p > 0 ? p : throw Refusals.NoPressureLeft(p), Station.Exit);
-        }
     }
 
     private static void AddRecovery(DeviceCase c, Inlet inlet, StationFigures given)
@@ -43,7 +27,7 @@ internal static class ExitFigures
             ? inlet.Station.Stagnation!.Value.p - p1
             : inlet.State.rho * inlet.V * inlet.V / 2;
         double p2 = p1 + (c.Value(CaseOption.Recovery) * head);
-        given.Add(Figure.P, p2 > 0 ? p2 : throw Refusals.NoPressureLeft(p2), Station.Exit);
+        given.Add(Figure.P, RelativePressures.AboveZero("--recovery", p2), Station.Exit);
     }
 
     private static void AddLoss(DeviceCase c, StationFigures given)
@@ -53,13 +37,7 @@ internal static class ExitFigures
         if ((efficiency ? 1 : 0) + (coefficient ? 1 : 0) + (loss ? 1 : 0) > 1)
             throw Refusals.LossTwice("efficiency, velocity coefficient, loss coefficient");
         if (efficiency && c.Heat != 0) throw Refusals.EfficiencyWithHeat();
-        if (efficiency) given.Add(Figure.Efficiency, c.Value(CaseOption.Efficiency), Station.Exit);
-        if (coefficient)
-        {
-            double phi = c.Value(CaseOption.VelocityCoefficient);
-            given.Add(Figure.Efficiency, phi * phi, Station.Exit);
-        }
-
+        if (c.GivenEfficiency is double eta) given.Add(Figure.Efficiency, eta, Station.Exit);
         if (loss) given.Add(Figure.Loss, c.Value(CaseOption.LossCoefficient), Station.Exit);
     }
 }

@@ -59,7 +59,7 @@ internal sealed record Inlet(StationAnswer Station, StationFigures Given, double
 
     private static double? Flow(DeviceCase c, StationAnswer station)
     {
-        if (c.Has(CaseOption.Flow)) return c.Value(CaseOption.Flow) * (c.FlowIsVolume ? station.State.rho : 1);
+        if (c.GivenMassFlow(station.State.rho) is double given) return given;
         return station.Area is double A && station.Velocity > 0 ? station.Flux * A * station.Openings : null;
     }
 

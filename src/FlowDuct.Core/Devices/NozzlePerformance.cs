@@ -8,7 +8,7 @@ internal static class NozzlePerformance
     internal static Performance Add(DeviceAnswer a, Performance performance)
     {
         double total = Auditor.TotalEnthalpyAtExit(a), p2 = a.Exit.State.p, p01 = a.Inlet.Stagnation!.Value.p;
-        if ((a.Expanding ?? a.Fluid).FromPS(p2, a.Inlet.State.s, default, out FluidState ideal) != Outcome.Ok) return performance;
+        if (a.ExpandingFluid.FromPS(p2, a.Inlet.State.s, default, out FluidState ideal) != Outcome.Ok) return performance;
         double drop = total - ideal.h;
         double Vs = Flow.Energy.Velocity(total, ideal.h);
         double? efficiency = drop > DeviceSolver.EnergyFloor(total) && a.Exit.Velocity is double V ? V * V / 2 / drop : null;

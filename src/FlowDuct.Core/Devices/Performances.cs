@@ -22,10 +22,10 @@ internal static class Performances
             StagnationPressureRatio = p02 / p01,
             AreaRatio = Sections(exit, inlet) ?? Quotient(inlet.Flux, exit.Flux),
             ThroatAreaRatio = a.Throat is null ? null : Sections(exit, a.Throat) ?? Quotient(a.Throat.Flux, exit.Flux),
-            Jet = a.Rating is Rating.NozzleRating rating ? Rating.JetAnswer.Of(a.Expanding ?? a.Fluid, rating, a.BackPressure!.Value) : null,
+            Jet = a.Rating is Rating.NozzleRating rating ? Rating.JetAnswer.Of(a.ExpandingFluid, rating, a.BackPressure!.Value) : null,
             ConvergentLength = Length(a, CaseOption.ConvergentAngle, inlet, a.Throat ?? exit),
             DivergentLength = a.Throat is null ? null : Length(a, CaseOption.DivergentAngle, exit, a.Throat),
-            Metastable = a.Expanding is null ? null : Rating.MetastableAnswer.Of(a),
+            Metastable = Rating.MetastableAnswer.Of(a),
             Thrust = Thrust(a, flow),
             AxialForce = AxialForce(a, flow),
         };

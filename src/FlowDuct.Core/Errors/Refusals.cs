@@ -109,8 +109,8 @@ internal static class Refusals
         $"V={Units.Text(V, Dimension.Velocity)} needs more energy than the fluid can give (at most {Units.Text(Vmost, Dimension.Velocity)} inside the formulation)",
         "give a lower exit velocity, or more enthalpy at the inlet");
 
-    internal static FlowDuctException NoPressureLeft(double p) => NoAnswer(
-        "--exit", $"the exit pressure would be {Units.Text(p, Dimension.PressureDifference)} absolute, and no fluid has that", "give a smaller pressure drop");
+    internal static FlowDuctException NoPressureLeft(string place, double p) => NoAnswer(
+        place, $"the pressure would be {Units.Text(p, Dimension.PressureDifference)} absolute, and no fluid has that", "give a smaller pressure drop");
 
     internal static FlowDuctException SeveralExits(IEnumerable<string> roots) => NoAnswer(
         "--exit", $"several exit states have these figures: {string.Join("; ", roots)}", "choose with --branch subsonic or --branch supersonic");
@@ -134,7 +134,7 @@ internal static class Refusals
     internal static FlowDuctException ThroatFollows() => NotUnderstood(
         "--throat", "the throat pressure follows from inlet, sections and back pressure", "give A or d (and n) of the throat only");
 
-    internal static FlowDuctException BackTwice() => NotUnderstood("--back", "the back pressure is given more than once", "keep one of p, dp, rise, p/p0, p/p1");
+    internal static FlowDuctException BackTwice(string place) => NotUnderstood(place, "the back pressure is given more than once", "keep one of p, dp, rise, p/p0, p/p1");
 
     internal static FlowDuctException ExitAndBack() => NotUnderstood(
         "--exit", "with sections the exit pressure follows from the back pressure; both are given", "leave p of the exit out");
@@ -160,10 +160,17 @@ internal static class Refusals
         $"{question.Target.Name} reaches {Units.Text(least, question.Target.Row.Dimension, 4)} to {Units.Text(greatest, question.Target.Row.Dimension, 4)}, whatever {question.Unknown.Name} is",
         "give a target between, or find another figure");
 
-    internal static FlowDuctException SeveralFound(IReadOnlyList<FoundFigure> found) => NoAnswer(
-        "--find",
-        $"several values of {found[0].Question.Unknown.Name} meet the target: {string.Join("; ", found.Select((one, i) => $"{i + 1}: {Units.Text(one.Value, one.Question.Unknown.Row.Dimension, 6)}"))}",
-        "choose with --branch 1, --branch 2 ...");
+    internal static FlowDuctException NotChosen(int? number, IReadOnlyList<FoundFigure> found) => found.Count == 1
+        ? NoAnswer("--branch", $"there is no value {number} of {found[0].Question.Unknown.Name}: one alone meets the target", "leave it out")
+        : NoAnswer(
+            "--find",
+            $"several values of {found[0].Question.Unknown.Name} meet the target: {string.Join("; ", found.Select((one, i) => $"{i + 1}: {Units.Text(one.Value, one.Question.Unknown.Row.Dimension, 6)}"))}",
+            "choose with --branch 1, --branch 2 ...");
+
+    internal static FlowDuctException WallIsAnother(string file, string bore, double ofWall, double ofCase) => NotUnderstood(
+        "--wall",
+        $"{file}: its {bore} is {Units.Text(ofWall, Dimension.Length)} wide, that of the case {Units.Text(ofCase, Dimension.Length)}",
+        "give the bores of the wall as --throat and --exit");
 
     internal static FlowDuctException ExpansionDoesNotFit(ExpansionModel model) => NotUnderstood(
         "--expansion",

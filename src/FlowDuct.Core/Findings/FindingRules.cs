@@ -25,6 +25,7 @@ internal static class FindingRules
         NearChoking.Check,
         ModelDoubtful.Check,
         a => NearCritical.Check(a.Fluid, a),
+        a => Condensation.Check(a.Fluid, a),
         a => RealGas.Check(a.Fluid, a),
         IllConditioned.Check,
         Shock.Check,
@@ -34,7 +35,7 @@ internal static class FindingRules
         Choked.Check,
         RoundingLimited.Check,
         a => Extrapolated.Check(a.Fluid, a),
-        Extrapolated.OfCorrelation,
+        ExtrapolatedCorrelation.Check,
         SubAtmospheric.Check,
         InletAtRest.Check,
         AssumedAmbient.Check,
@@ -46,7 +47,7 @@ internal static class FindingRules
         findings.All(f => f.Severity < (strict ? Severity.Caution : Severity.Error));
 
     /// <summary>The rules that speak of a state alone.</summary>
-    internal static readonly Func<Fluid, IStations, Finding?>[] OfStates = [Icing.Check, NearCritical.Check, RealGas.Check, Extrapolated.Check];
+    internal static readonly Func<Fluid, IStations, Finding?>[] OfStates = [Icing.Check, NearCritical.Check, Condensation.Check, RealGas.Check, Extrapolated.Check];
 
     /// <summary>The findings of a property answer, gravest first.</summary>
     internal static IReadOnlyList<Finding> Apply(StateAnswer answer) =>

@@ -1,5 +1,6 @@
 using FlowDuct.Devices;
 using FlowDuct.Fluids;
+using FlowDuct.Fluids.Water;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Findings;
@@ -7,20 +8,17 @@ namespace FlowDuct.Findings;
 /// <summary>Water where ice is stable, or so thin that what condenses from it is ice.</summary>
 internal static class Icing
 {
-    // IAPWS R7-97(2012), Eq. (9): triple point of water.
-    private const double TriplePressure = 611.657;
-
     internal static Finding? Check(Fluid fluid, IStations stations)
     {
         if (stations.StationWith(Notices.Ice) is StationAnswer frozen)
         {
-            return new Finding("icing", Severity.Caution, frozen.State.T, 273.16, "IAPWS R14-08(2011)", text =>
+            return new Finding("icing", Severity.Caution, frozen.State.T, WaterConstants.Tt, "IAPWS R14-08(2011)", text =>
                 $"at {text.Text(frozen.State.T, Dimension.Temperature, 5)} and this pressure ice is the stable phase; the answer is water that does not freeze");
         }
 
         return stations.StationWith(Notices.BelowTriplePoint) is StationAnswer thin
-            ? new Finding("icing", Severity.Note, thin.State.p, TriplePressure, "IAPWS R7-97(2012)", text =>
-                $"{text.Text(thin.State.p, Dimension.Pressure, 4)} lies below the triple-point pressure {text.Text(TriplePressure, Dimension.Pressure, 4)}: what condenses at it is ice")
+            ? new Finding("icing", Severity.Note, thin.State.p, IceLine.TriplePressure, "IAPWS R7-97(2012)", text =>
+                $"{text.Text(thin.State.p, Dimension.Pressure, 4)} lies below the triple-point pressure {text.Text(IceLine.TriplePressure, Dimension.Pressure, 4)}: what condenses at it is ice")
             : null;
     }
 }

@@ -19,16 +19,26 @@ internal static class RealGas
     {
         if (fluid is not IdealGas { Virial: SecondVirial virial } gas) return null;
         double M = gas.MolarMass / 1000;
-        (FluidState at, RealGasEstimate estimate) = Worst(virial, M, stations);
+        RealGasEstimate estimate = Worst(virial, M, stations, out FluidState at);
         double? flux = FluxDeviation(virial, M, gas, stations);
         double worst = Math.Max(estimate.Worst, Math.Abs(flux ?? 0));
         return worst <= Limit && !estimate.SeriesFails ? null : new Finding("real-gas", Severity.Caution, worst, Limit, Standing, text =>
             $"{gas.Name} is taken as an ideal gas; at {text.Text(at.p, Dimension.Pressure, 4)}, {text.Text(at.T, Dimension.Temperature, 4)} {Words(estimate, flux)}");
     }
 
-    private static (FluidState At, RealGasEstimate Estimate) Worst(SecondVirial virial, double M, IStations stations) => stations.Known
-        .Select(station => (station.State, Estimate: RealGasEstimate.Of(virial, M, station.State)))
-        .OrderByDescending(pair => pair.Estimate.SeriesFails).ThenByDescending(pair => pair.Estimate.Worst).First();
+    // A state beyond the estimate is worse than any within it.
+    private static RealGasEstimate Worst(SecondVirial virial, double M, IStations stations, out FluidState at)
+    {
+        (RealGasEstimate worst, at) = (default, default);
+        foreach (StationAnswer station in stations.Known)
+        {
+            RealGasEstimate estimate = RealGasEstimate.Of(virial, M, station.State);
+            bool first = at.Phase == Phase.None, worse = estimate.SeriesFails == worst.SeriesFails ? estimate.Worst > worst.Worst : estimate.SeriesFails;
+            if (first || worse) (worst, at) = (estimate, station.State);
+        }
+
+        return worst;
+    }
 
     // Of a nozzle that has a critical pressure, whether it chokes or not.
     private static double? FluxDeviation(SecondVirial virial, double M, IdealGas gas, IStations stations) =>

@@ -80,21 +80,8 @@ internal static class Choking
 
         double low = top;
         while (excess.At(low) > 0) low *= 0.85;
-        if (fluid.FromPS(low, s, default, out throat) != Outcome.Ok) low = LastInside(fluid, s, low, Math.Min(top, low / 0.85));
+        if (fluid.FromPS(low, s, default, out throat) != Outcome.Ok) low = RangeEdge.Find(p => fluid.FromPS(p, s, default, out _) == Outcome.Ok, Math.Min(top, low / 0.85), low);
         return excess.At(low) <= 0 && Solve(fluid, s, excess, low, top, out throat);
-    }
-
-    // The range of the fluid ends on the way: the lowest pressure that still has a state.
-    private static double LastInside(Fluid fluid, double s, double outside, double inside)
-    {
-        for (int i = 0; i < 50 && inside - outside > 1e-13 * inside; i++)
-        {
-            double middle = (outside + inside) / 2;
-            if (fluid.FromPS(middle, s, default, out _) == Outcome.Ok) inside = middle;
-            else outside = middle;
-        }
-
-        return inside;
     }
 
     private static double SonicExcess(in FluidState at, double h0) => (at.w * at.w) - (2 * (h0 - at.h));

@@ -36,7 +36,7 @@ public static class FluidCatalogue
             ?? (GasMixtureParser.IsMixture(name) ? GasMixtureParser.Parse("--fluid", name, basis).Gas : GasCatalogue.Find(name));
     }
 
-    private static FluidName OfGas((string Name, string Formula) gas) => new(
+    private static FluidName OfGas(GasWord gas) => new(
         gas.Name, $"{gas.Formula}, as an ideal gas", () => GasCatalogue.Find(gas.Name)!);
 }
 

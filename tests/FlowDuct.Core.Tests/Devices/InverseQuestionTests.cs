@@ -50,6 +50,17 @@ public class InverseQuestionTests
     }
 
     [Fact]
+    public void A_number_chooses_among_roots_and_one_beyond_them_is_refused()
+    {
+        DeviceCase open = Cases.Nozzle(WaterFluid.Instance, "p0=9 bar, T0=500 K", "", (CaseOption.Flow, "1 kg/s"));
+        var question = new InverseQuestion(CaseSlot.Find("exit.p")!, ResultName.Find("exit.A")!, 1e-3);
+        Assert.True(question.Answer(open, 1).Exit.Mach > 1);
+        Assert.True(question.Answer(open, 2).Exit.Mach < 1);
+        foreach (int? number in (int?[])[null, 0, 3])
+            Assert.Equal(RefusalKind.NoAnswer, Assert.Throws<FlowDuctException>(() => question.Answer(open, number)).Refusal.Kind);
+    }
+
+    [Fact]
     public void A_target_out_of_reach_is_refused_with_what_is_reached()
     {
         DeviceCase open = Cases.Rated(GasCatalogue.Air, Inlet, "d=18 mm", "", "");

@@ -1,4 +1,5 @@
 using FlowDuct.Errors;
+using FlowDuct.Findings;
 using FlowDuct.Flow;
 
 namespace FlowDuct.Devices.Inverse;
@@ -14,6 +15,17 @@ internal sealed record InverseQuestion(CaseSlot Unknown, ResultName Target, doub
 
     // Beside the root by this part the target is read again for the sensitivity.
     private const double Nudge = 1e-5;
+
+    /// <summary>The answer at the only root, or at the one of several that a number, from 1, chooses.</summary>
+    internal DeviceAnswer Answer(DeviceCase c, int? number)
+    {
+        IReadOnlyList<(DeviceAnswer Answer, FoundFigure Found)> roots = Solve(c);
+        int chosen = number ?? (roots.Count == 1 ? 1 : 0);
+        if (chosen < 1 || chosen > roots.Count) throw Refusals.NotChosen(number, [.. roots.Select(root => root.Found)]);
+        (DeviceAnswer answer, FoundFigure found) = roots[chosen - 1];
+        answer = answer with { Found = found };
+        return answer with { Findings = FindingRules.Apply(answer) };
+    }
 
     /// <summary>The answers at all roots, with the value found and its sensitivity, in rising order of the unknown.</summary>
     internal IReadOnlyList<(DeviceAnswer Answer, FoundFigure Found)> Solve(DeviceCase c)

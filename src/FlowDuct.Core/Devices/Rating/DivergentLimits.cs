@@ -6,6 +6,10 @@ namespace FlowDuct.Devices.Rating;
 /// <summary>The choked throat of a divergent nozzle and the three back pressures that part its regimes.</summary>
 internal readonly record struct DivergentLimits
 {
+    // Starts of a search only: pressure falls by this to each side of the root, and with the flux about as in an expanding gas.
+    private const double Step = 0.6;
+    private const double StartExponent = 1.3;
+
     internal FluidState Throat { get; init; }
 
     internal double ThroatVelocity { get; init; }
@@ -62,13 +66,13 @@ internal readonly record struct DivergentLimits
         double low = throat.p;
         do
         {
-            low *= 0.6;
+            low *= Step;
             if (path.At(low, default, out _, out _) == Outcome.Ok) continue;
-            low = LowestInside(path, low, low / 0.6);
+            low = RangeEdge.Find(p => path.At(p, default, out _, out _) == Outcome.Ok, low / Step, low);
             if (FluxAt(path, low) > target) return RatingOutcome.OutsideRange;
         }
         while (FluxAt(path, low) > target);
-        double start = Math.Max(low, throat.p * Math.Pow(target / limits.Flux, 1.3));
+        double start = Math.Max(low, throat.p * Math.Pow(target / limits.Flux, StartExponent));
         if (!FluxRoot.TryFind(path, target, throat.p, low, start, out FluidState exit, out double V)) return RatingOutcome.NotConverged;
         limits = limits with { Exit = exit, ExitVelocity = V, DivergenceEfficiency = OfDivergence(path, throat, exit) };
         if (!(limits.DivergenceEfficiency > 0)) return RatingOutcome.TooGreatALoss;
@@ -89,17 +93,4 @@ internal readonly record struct DivergentLimits
     }
 
     private static double FluxAt(LossPath path, double p) => path.At(p, default, out FluidState at, out double V) == Outcome.Ok ? V / at.v : 0;
-
-    // The range ends between two pressures: the lowest that still has a state.
-    private static double LowestInside(LossPath path, double outside, double inside)
-    {
-        for (int i = 0; i < 60; i++)
-        {
-            double middle = Math.Sqrt(outside * inside);
-            if (path.At(middle, default, out _, out _) == Outcome.Ok) inside = middle;
-            else outside = middle;
-        }
-
-        return inside;
-    }
 }

@@ -18,6 +18,9 @@ internal static class FrozenFlow
         return outcome == RatingOutcome.Ok ? frozen.MassFlow : null;
     }
 
+    /// <summary>True where a flow, kg/s, stays under the frozen bound.</summary>
+    internal static bool Allows(DeviceAnswer a, double flow) => Of(a) is double most && flow <= most;
+
     private static double ThroatArea(DeviceAnswer a)
     {
         StationAnswer narrow = a.Throat ?? a.Exit;

@@ -45,27 +45,12 @@ internal sealed record NozzleGeometryReader(StationFigures Throat, StationFigure
     // What is given of the space beyond; without it a pressure of the exit stands for it.
     private static double BackPressure(DeviceCase c, StationFigures exit, double p1, double p01)
     {
-        StationFigures back = StationFigures.Read(c.Back, Station.Exit);
-        List<double> found = [];
-        if (back.Has(Figure.P)) found.Add(back[Figure.P]);
-        Add(c.Back, StationSymbol.PressureDrop, dp => p1 - dp);
-        Add(c.Back, StationSymbol.PressureRise, rise => p1 + rise);
-        Add(c.Back, StationSymbol.PressureOverInletStagnation, ratio => ratio * p01);
-        Add(c.Back, StationSymbol.PressureOverInlet, ratio => ratio * p1);
-        if (found.Count > 1) throw Refusals.BackTwice();
-        if (found.Count == 1 && exit.Has(Figure.P)) throw Refusals.ExitAndBack();
-        if (found.Count == 0 && exit.Has(Figure.P)) found.Add(exit[Figure.P]);
-        Add(c.Exit, StationSymbol.PressureDrop, dp => p1 - dp);
-        Add(c.Exit, StationSymbol.PressureRise, rise => p1 + rise);
-        Add(c.Exit, StationSymbol.PressureOverInletStagnation, ratio => ratio * p01);
-        Add(c.Exit, StationSymbol.PressureOverInlet, ratio => ratio * p1);
-        if (found.Count > 1) throw Refusals.BackTwice();
-        if (found.Count == 0) throw Refusals.BackMissing();
-        return found[0] > 0 ? found[0] : throw Refusals.NoPressureLeft(found[0]);
+        List<double> back = Pressures("--back", c.Back, StationFigures.Read(c.Back, Station.Exit)), plane = Pressures("--exit", c.Exit, exit);
+        if (back.Count > 1 || plane.Count > 1) throw Refusals.BackTwice(back.Count > 1 ? "--back" : "--exit");
+        if (back.Count == 1 && plane.Count == 1) throw Refusals.ExitAndBack();
+        return back.Count + plane.Count == 1 ? back.Concat(plane).Single() : throw Refusals.BackMissing();
 
-        void Add(in GivenSlots slots, StationSymbol symbol, Func<double, double> toPressure)
-        {
-            if (slots.Has((int)symbol)) found.Add(toPressure(slots.Value((int)symbol)));
-        }
+        List<double> Pressures(string place, GivenSlots slots, StationFigures read) =>
+            [.. read.Has(Figure.P) ? [read[Figure.P]] : Array.Empty<double>(), .. RelativePressures.Read(place, slots, p1, p01)];
     }
 }

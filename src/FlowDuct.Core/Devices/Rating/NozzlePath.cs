@@ -85,12 +85,12 @@ internal static class NozzlePath
         internal Along(DeviceAnswer a)
         {
             _rating = a.Rating!.Value;
-            Fluid = a.Expanding ?? a.Fluid;
+            Fluid = a.ExpandingFluid;
             FluidState rest = a.Inlet.Stagnation!.Value;
             (_h0, _s, _p0) = (rest.h, rest.s, rest.p);
             (_, _throatArea, _exitArea) = Areas(a);
             _coefficient = a.Performance.DischargeCoefficient ?? 1;
-            _efficiency = a.Case.Has(CaseOption.VelocityCoefficient) ? Math.Pow(a.Case.Value(CaseOption.VelocityCoefficient), 2) : a.Case.ValueOr(CaseOption.Efficiency, 1);
+            _efficiency = a.Case.GivenEfficiency ?? 1;
             var geometry = new NozzleGeometry(_throatArea, _exitArea, _efficiency, _coefficient);
             RatingOutcome outcome = DivergentLimits.Find(new RatingInlet(Fluid, _h0, _s, _p0), geometry, out DivergentLimits limits);
             _limits = a.Throat is not null && outcome == RatingOutcome.Ok ? limits : null;

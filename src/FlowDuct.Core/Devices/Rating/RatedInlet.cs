@@ -11,6 +11,10 @@ internal static class RatedInlet
     // Just below the speed of sound: an inlet wider than the throat is slower.
     private const double Fastest = 0.999999;
 
+    // An inlet hardly wider than the throat carries more than it in a narrow band below sonic only: searched downwards in thin steps.
+    private const double Slower = 0.999;
+    private const double Slowest = 0.5;
+
     internal static Inlet Solve(DeviceCase c)
     {
         StationFigures given = StationFigures.Read(c.Inlet, Station.Inlet);
@@ -24,15 +28,16 @@ internal static class RatedInlet
     {
         Inlet slow = Inlet.SolveAt(c, given, new VelocityDatum(VelocityKind.Velocity, 1e-3));
         double area = given[Figure.Section] * given.Openings, low = 1e-3, high = slow.State.w * Fastest;
-        if (Excess(low) > 0) throw Refusals.InletSectionTooWide();
-        while (Excess(high) < 0)
+        double atLow = Excess(low), atHigh = Excess(high);
+        if (atLow > 0) throw Refusals.InletSectionTooWide();
+        while (atHigh < 0)
         {
-            if (high < 1) throw Refusals.InletSectionTooNarrow();
-            high *= 0.999;
-            if (high < 0.5 * slow.State.w) throw Refusals.InletSectionTooNarrow();
+            high *= Slower;
+            if (high < Slowest * slow.State.w) throw Refusals.InletSectionTooNarrow();
+            atHigh = Excess(high);
         }
 
-        double V = RootFinder.Find(Excess, low, high, Excess(low), Excess(high));
+        double V = RootFinder.Find(Excess, low, high, atLow, atHigh);
         return Inlet.SolveAt(c, given, new VelocityDatum(VelocityKind.Velocity, V));
 
         double Excess(double V)

@@ -26,14 +26,11 @@ internal static class RatedNozzle
     /// <summary>The rating at an inlet; a flow given without a coefficient implies the coefficient.</summary>
     internal static NozzleRating Rate(DeviceCase c, in FluidState rest, NozzleGeometryReader geometry)
     {
-        double efficiency = c.Has(CaseOption.VelocityCoefficient)
-            ? c.Value(CaseOption.VelocityCoefficient) * c.Value(CaseOption.VelocityCoefficient)
-            : c.ValueOr(CaseOption.Efficiency, 1);
         double? coefficient = c.Has(CaseOption.DischargeCoefficient) ? c.Value(CaseOption.DischargeCoefficient) : null;
         bool throat = geometry.Throat.Has(Figure.Section), exit = geometry.Exit.Has(Figure.Section);
         double exitArea = exit ? NozzleGeometryReader.Area(geometry.Exit) : throat ? NozzleGeometryReader.Area(geometry.Throat) : UnitArea;
         double throatArea = throat ? NozzleGeometryReader.Area(geometry.Throat) : exitArea;
-        var nozzle = new NozzleGeometry(throatArea, exitArea, efficiency, coefficient);
+        var nozzle = new NozzleGeometry(throatArea, exitArea, c.GivenEfficiency ?? 1, coefficient);
         var inlet = new RatingInlet(HeldFluid(c, rest), rest.h, rest.s, rest.p);
         if (c.DischargeCorrelation is not null) return ByCorrelation(c, inlet, rest, nozzle, geometry, throat ? geometry.Throat : geometry.Exit);
         NozzleRating rating = One(inlet, nozzle, geometry);
@@ -120,12 +117,12 @@ internal static class RatedNozzle
             },
             Audit = new Audit(),
             InletTakenAtRest = inlet.TakenAtRest,
-            TakenIdeal = !c.Has(CaseOption.Efficiency) && !c.Has(CaseOption.VelocityCoefficient),
+            TakenIdeal = c.GivenEfficiency is null,
             EfficiencyImplied = rating.Regime is Regime.ShockInDivergence or Regime.ShockAtExit or Regime.ChokedSubsonicExit,
             Assumptions = assumptions,
             Rating = rating,
             BackPressure = geometry.Back,
-            Expanding = fluid,
+            ExpandingFluid = fluid,
         };
         double V1 = inlet.V, V2 = rating.ExitVelocity;
         return answer with { Ledger = new Ledger(inlet.State.h, V1 * V1 / 2, 0, 0, rating.Exit.h, V2 * V2 / 2, 0) };

@@ -1,4 +1,3 @@
-using System.Collections.Concurrent;
 using FlowDuct.Fluids.Gases.Coefficients;
 
 namespace FlowDuct.Fluids.Gases;
@@ -26,8 +25,16 @@ public static class GasCatalogue
     // A class of its own, so that water and air never make the dictionary.
     private static class Built
     {
-        private static readonly ConcurrentDictionary<string, IdealGas> s_gases = new(StringComparer.Ordinal);
+        private static readonly Dictionary<string, IdealGas> s_gases = [];
 
-        internal static IdealGas Of(Species species) => s_gases.GetOrAdd(species.Name, _ => new IdealGas(species));
+        internal static IdealGas Of(Species species)
+        {
+            lock (s_gases)
+            {
+                if (!s_gases.TryGetValue(species.Name, out IdealGas? gas))
+                    s_gases.Add(species.Name, gas = new IdealGas(species));
+                return gas;
+            }
+        }
     }
 }

@@ -21,49 +21,35 @@ internal static class QuickInverse<TKind>
     internal static bool TrySolve(double p, double y, out FluidState state)
     {
         state = default;
-        if (y > TKind.LeastOfRegion2) return TryVapour(p, y, ref state);
-        return y < TKind.MostOfRegion1 && p > SaturationLine.pAtLeastT && TryLiquid(p, y, ref state);
+        if (y > TKind.LeastOfRegion2) return TryRegion(vapour: true, p, y, TKind.GuessRegion2(p, y), ColdEdge(p), WaterConstants.T25, ref state);
+        return y < TKind.MostOfRegion1 && p > SaturationLine.pAtLeastT
+            && TryRegion(vapour: false, p, y, TKind.GuessRegion1(p, y), WaterConstants.TLeast, HotEdge(p), ref state);
     }
 
-    private static bool TryVapour(double p, double y, ref FluidState state)
+    private static bool TryRegion(bool vapour, double p, double y, double T, double cold, double hot, ref FluidState state)
     {
-        double T = TKind.GuessRegion2(p, y), edge = ColdEdge(p);
-        if (!(T > edge + Clear && T < WaterConstants.T25 - Clear)) return false;
-        Region2.Caloric(p, T, out double h, out double s, out double cp);
+        (cold, hot) = (cold + Clear, hot - Clear);
+        if (!(T > cold && T < hot)) return false;
+        double h, s, cp;
+        if (vapour) Region2.Caloric(p, T, out h, out s, out cp);
+        else Region1.Caloric(p, T, out h, out s, out cp);
         double step = (y - TKind.Pick(h, s)) / TKind.Slope(cp, T);
         for (int i = 0; i < MostSteps && Math.Abs(step) < MostStep; i++)
         {
             T += step;
-            RegionState at = Region2.State(p, T);
+            RegionState at = vapour ? Region2.State(p, T) : Region1.State(p, T);
             step = (y - TKind.Of(at)) / TKind.ByT(at);
             if (Math.Abs(step) > Last) continue;
-            Phase phase = p > WaterConstants.pc && T > WaterConstants.Tc ? Phase.Supercritical : Phase.SuperheatedVapour;
-            state = Moved(at, step, phase);
-            return T > edge + Clear && T < WaterConstants.T25 - Clear;
+            state = Moved(at, step, vapour ? VapourPhase(p, T) : Phase.Liquid);
+            return T > cold && T < hot;
         }
 
         return false;
     }
 
-    private static bool TryLiquid(double p, double y, ref FluidState state)
-    {
-        double T = TKind.GuessRegion1(p, y);
-        double edge = p < SaturationLine.pAtT13 ? SaturationLine.Temperature(p) : WaterConstants.T13;
-        if (!(T < edge - Clear && T > WaterConstants.TLeast + Clear)) return false;
-        Region1.Caloric(p, T, out double h, out double s, out double cp);
-        double step = (y - TKind.Pick(h, s)) / TKind.Slope(cp, T);
-        for (int i = 0; i < MostSteps && Math.Abs(step) < MostStep; i++)
-        {
-            T += step;
-            RegionState at = Region1.State(p, T);
-            step = (y - TKind.Of(at)) / TKind.ByT(at);
-            if (Math.Abs(step) > Last) continue;
-            state = Moved(at, step, Phase.Liquid);
-            return T < edge - Clear && T > WaterConstants.TLeast + Clear;
-        }
+    private static Phase VapourPhase(double p, double T) => p > WaterConstants.pc && T > WaterConstants.Tc ? Phase.Supercritical : Phase.SuperheatedVapour;
 
-        return false;
-    }
+    private static double HotEdge(double p) => p < SaturationLine.pAtT13 ? SaturationLine.Temperature(p) : WaterConstants.T13;
 
     private static double ColdEdge(double p)
     {

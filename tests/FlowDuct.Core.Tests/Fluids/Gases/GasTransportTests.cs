@@ -121,6 +121,19 @@ public class GasTransportTests
     }
 
     [Fact]
+    public void Factors_of_a_pair_obey_their_symmetry()
+    {
+        // phi_21 = phi_12 (mu_2/mu_1)(M_1/M_2), a relation that the rule was built to have (from memory). A conductivity of 1 and 0
+        // lets phi_12 be seen: lambda = x_1/(x_1 + x_2 phi_12).
+        (Species light, Species heavy) = (Nasa9Records.Hydrogen(), Nasa9Records.CarbonDioxide());
+        WilkeFactors factors = new([new(light, 0.4), new(heavy, 0.6)]);
+        factors.Mix([9e-6, 15e-6], [1, 0], out _, out double first);
+        factors.Mix([9e-6, 15e-6], [0, 1], out _, out double second);
+        double phi12 = ((0.4 / first) - 0.4) / 0.6, phi21 = ((0.6 / second) - 0.6) / 0.4;
+        Assert.Equal(phi12 * (15.0 / 9) * (light.MolarMass / heavy.MolarMass), phi21, 1e-13);
+    }
+
+    [Fact]
     public void The_order_of_the_gases_is_no_matter()
     {
         TryAt("N2=0.72,CO2=0.13,H2O=0.15", 700, out Transport one);

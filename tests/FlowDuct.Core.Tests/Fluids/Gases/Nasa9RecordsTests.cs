@@ -40,7 +40,7 @@ public class Nasa9RecordsTests
         Assert.Equal(71, Rows.Count);
         Assert.Equal(30, Names.Count);
         Assert.Equal(Rows.Select(row => row["record"]).Distinct().Order(), Names.Select(row => row["record"]).Order());
-        Assert.Equal(Names.Select(row => (row["name"], row["formula"])), Nasa9Records.Words());
+        Assert.Equal(Names.Select(row => new GasWord(row["name"], row["formula"])), Nasa9Records.Words());
         Assert.Equal(60, Names.SelectMany(row => new[] { row["name"], row["formula"] }).Distinct().Count());
     }
 

@@ -4,4 +4,4 @@ namespace FlowDuct.Fluids.Gases;
 /// <param name="Species">The gas.</param>
 /// <param name="Fraction">Its mole or mass fraction, 0 to 1.</param>
 /// <param name="HalfPlace">Half of the last printed place of the fraction; 0 where it is exact.</param>
-internal readonly record struct GasFraction(Species Species, double Fraction, double HalfPlace = 0);
+internal sealed record GasFraction(Species Species, double Fraction, double HalfPlace = 0);

@@ -31,14 +31,21 @@ internal static class MixedRecord
     {
         double Tlow = components.Max(gas => gas.Species.Intervals[0].Tlow);
         double Thigh = components.Min(gas => gas.Species.Intervals[^1].Thigh);
-        SortedSet<double> ends = [];
+        List<double> ends = [];
         foreach (Nasa9Interval interval in components.SelectMany(gas => gas.Species.Intervals))
         {
-            ends.Add(Math.Clamp(interval.Tlow, Tlow, Thigh));
-            ends.Add(Math.Clamp(interval.Thigh, Tlow, Thigh));
+            AddOnce(ends, Math.Clamp(interval.Tlow, Tlow, Thigh));
+            AddOnce(ends, Math.Clamp(interval.Thigh, Tlow, Thigh));
         }
 
+        ends.Sort();
         return [.. ends];
+    }
+
+    private static void AddOnce(List<double> ends, double T)
+    {
+        if (!ends.Contains(T))
+            ends.Add(T);
     }
 
     private static Nasa9Interval Mixed(IReadOnlyList<GasComponent> components, double mixing, double Tlow, double Thigh)

@@ -36,7 +36,7 @@ internal static class MixingEntropy
     private static string FormulaInAir(int i) => i switch { 0 => "N2", 1 => "O2", 2 => "Ar", _ => "CO2" };
 
     private static double FractionOf(IReadOnlyList<GasComponent> components, string formula) =>
-        components.FirstOrDefault(gas => gas.Species.Formula == formula) is { Species: not null } found ? found.x : 0;
+        components.FirstOrDefault(gas => gas.Species.Formula == formula)?.x ?? 0;
 
     private static double XLnX(double x) => x * Math.Log(x);
 }

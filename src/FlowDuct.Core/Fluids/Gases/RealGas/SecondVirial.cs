@@ -5,9 +5,9 @@ namespace FlowDuct.Fluids.Gases;
 /// <summary>Second virial coefficient of a gas or mixture: B = sum sum x_i x_j B_ij.</summary>
 internal sealed class SecondVirial
 {
-    private readonly (CriticalConstants Pair, double Weight)[] pairs;
+    private readonly VirialPair[] pairs;
 
-    private SecondVirial((CriticalConstants Pair, double Weight)[] pairs, double Tc, double pc) => (this.pairs, this.Tc, this.pc) = (pairs, Tc, pc);
+    private SecondVirial(VirialPair[] pairs, double Tc, double pc) => (this.pairs, this.Tc, this.pc) = (pairs, Tc, pc);
 
     // Kay's rule (common practice): the mole-weighted critical point, to tell where the series fails.
     private double Tc { get; }
@@ -17,24 +17,26 @@ internal sealed class SecondVirial
     /// <summary>The coefficient of a mixture; null where one of its gases has no critical constants.</summary>
     internal static SecondVirial? Of(IReadOnlyList<GasComponent> components)
     {
-        List<(CriticalConstants Gas, double x)> gases = [];
-        foreach (GasComponent gas in components)
+        CriticalConstants[] gases = new CriticalConstants[components.Count];
+        (double Tc, double pc) = (0, 0);
+        for (int i = 0; i < gases.Length; i++)
         {
-            if (CriticalRecords.Find(gas.Species.Formula) is not CriticalConstants known) return null;
-            gases.Add((known, gas.x));
+            if (CriticalRecords.Find(components[i].Species.Formula) is not CriticalConstants known) return null;
+            gases[i] = known;
+            (Tc, pc) = (Tc + (components[i].x * known.Tc), pc + (components[i].x * known.pc));
         }
 
-        return new SecondVirial([.. Pairs(gases)], gases.Sum(gas => gas.x * gas.Gas.Tc), gases.Sum(gas => gas.x * gas.Gas.pc));
+        return new SecondVirial([.. Pairs(components, gases)], Tc, pc);
     }
 
     /// <summary>The coefficient at T, K.</summary>
     internal Virial At(double T)
     {
         (double B, double dB, double d2B) = (0, 0, 0);
-        foreach ((CriticalConstants pair, double weight) in pairs)
+        foreach (VirialPair pair in pairs)
         {
-            Virial of = Tsonopoulos.At(pair, T);
-            (B, dB, d2B) = (B + (weight * of.B), dB + (weight * of.dB), d2B + (weight * of.d2B));
+            Virial of = Tsonopoulos.At(pair.Gas, T);
+            (B, dB, d2B) = (B + (pair.Weight * of.B), dB + (pair.Weight * of.dB), d2B + (pair.Weight * of.d2B));
         }
 
         return new Virial(B, dB, d2B);
@@ -46,13 +48,13 @@ internal sealed class SecondVirial
     /// </summary>
     internal bool FailsAt(double p, double T) => p / pc > 0.5 * T / Tc;
 
-    private static IEnumerable<(CriticalConstants Pair, double Weight)> Pairs(List<(CriticalConstants Gas, double x)> gases)
+    private static IEnumerable<VirialPair> Pairs(IReadOnlyList<GasComponent> components, CriticalConstants[] gases)
     {
-        for (int i = 0; i < gases.Count; i++)
+        for (int i = 0; i < gases.Length; i++)
         {
-            yield return (gases[i].Gas, gases[i].x * gases[i].x);
+            yield return new(gases[i], components[i].x * components[i].x);
             for (int j = 0; j < i; j++)
-                yield return (CriticalConstants.OfPair(gases[i].Gas, gases[j].Gas), 2 * gases[i].x * gases[j].x);
+                yield return new(CriticalConstants.OfPair(gases[i], gases[j]), 2 * components[i].x * components[j].x);
         }
     }
 }
