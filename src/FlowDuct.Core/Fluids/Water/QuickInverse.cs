@@ -21,33 +21,30 @@ internal static class QuickInverse<TKind>
     internal static bool TrySolve(double p, double y, out FluidState state)
     {
         state = default;
-        if (y > TKind.LeastOfRegion2) return TryRegion(vapour: true, p, y, TKind.GuessRegion2(p, y), ColdEdge(p), WaterConstants.T25, ref state);
+        if (y > TKind.LeastOfRegion2) return TryRegion<VapourRegion>(p, y, TKind.GuessRegion2(p, y), ColdEdge(p), WaterConstants.T25, ref state);
         return y < TKind.MostOfRegion1 && p > SaturationLine.pAtLeastT
-            && TryRegion(vapour: false, p, y, TKind.GuessRegion1(p, y), WaterConstants.TLeast, HotEdge(p), ref state);
+            && TryRegion<LiquidRegion>(p, y, TKind.GuessRegion1(p, y), WaterConstants.TLeast, HotEdge(p), ref state);
     }
 
-    private static bool TryRegion(bool vapour, double p, double y, double T, double cold, double hot, ref FluidState state)
+    private static bool TryRegion<TRegion>(double p, double y, double T, double cold, double hot, ref FluidState state)
+        where TRegion : struct, IOnePhaseRegion
     {
         (cold, hot) = (cold + Clear, hot - Clear);
         if (!(T > cold && T < hot)) return false;
-        double h, s, cp;
-        if (vapour) Region2.Caloric(p, T, out h, out s, out cp);
-        else Region1.Caloric(p, T, out h, out s, out cp);
+        TRegion.Caloric(p, T, out double h, out double s, out double cp);
         double step = (y - TKind.Pick(h, s)) / TKind.Slope(cp, T);
         for (int i = 0; i < MostSteps && Math.Abs(step) < MostStep; i++)
         {
             T += step;
-            RegionState at = vapour ? Region2.State(p, T) : Region1.State(p, T);
+            RegionState at = TRegion.State(p, T);
             step = (y - TKind.Of(at)) / TKind.ByT(at);
             if (Math.Abs(step) > Last) continue;
-            state = Moved(at, step, vapour ? VapourPhase(p, T) : Phase.Liquid);
+            state = Moved(at, step, TRegion.PhaseAt(p, T));
             return T > cold && T < hot;
         }
 
         return false;
     }
-
-    private static Phase VapourPhase(double p, double T) => p > WaterConstants.pc && T > WaterConstants.Tc ? Phase.Supercritical : Phase.SuperheatedVapour;
 
     private static double HotEdge(double p) => p < SaturationLine.pAtT13 ? SaturationLine.Temperature(p) : WaterConstants.T13;
 
