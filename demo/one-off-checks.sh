@@ -51,6 +51,10 @@ ask 0 'NZ-2203: the most that the bath nozzle could pass if nothing flashed befo
 ask 0 'NZ-3302: which coefficient does a measured 0.505 kg/s imply for a bore of 18.0 mm?' \
     nozzle --fluid air --inlet 'p0=7.8 barg, T0=41 degC' --throat 'd=18.0 mm' --back 'p=1 bar' --flow '0.505 kg/s'
 
+ask 0 'FE-3310: 64.0 mm long-radius nozzle in a 102.3 mm line of compressed air, 18.4 kPa between its taps' \
+    nozzle --fluid air --inlet 'p=6.85 barg, T=38 degC, d=102.3 mm' --throat 'd=64.0 mm' --back 'dp=18.4 kPa' \
+    --discharge-coefficient iso5167-long-radius --ambient 'p=0.973 bar, T=24 degC'
+
 ask 0 'DF-4110: recovery, efficiency and loss from a measured rise and velocity' \
     diffuser --fluid air --inlet 'p=1013 mbar, T=64 degC, V=47 m/s' --exit 'rise=6.9 mbar, V=19 m/s'
 

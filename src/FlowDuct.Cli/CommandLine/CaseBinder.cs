@@ -81,12 +81,12 @@ internal sealed class CaseBinder
     internal int? RootNumber => _arguments.Has("--find") && int.TryParse(_arguments.Value("--branch"), NumberStyles.None, CultureInfo.InvariantCulture, out int number) ? number : null;
 
     // A name stands where a number could.
-    private CriticalFlowCd? Correlation
+    private DischargeCorrelation? Correlation
     {
         get
         {
             if (_arguments.Value("--discharge-coefficient") is not string text || text.Length == 0 || !char.IsAsciiLetter(text[0])) return null;
-            return CriticalFlowCd.Find(text) ?? throw Usage.NotOneOf("--discharge-coefficient", text, ["a number", .. CriticalFlowCd.All.Select(row => row.Name)]);
+            return DischargeCorrelation.Find(text) ?? throw Usage.NotOneOf("--discharge-coefficient", text, ["a number", .. DischargeCorrelation.All.Select(row => row.Name)]);
         }
     }
 

@@ -1,4 +1,5 @@
 using FlowDuct.Devices;
+using FlowDuct.Devices.Coefficients;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Cli.Rendering;
@@ -11,8 +12,8 @@ internal static class Assumptions
         yield return $"properties: {answer.Fluid.Formulation}";
         yield return answer.Case.Heat == 0 ? "steady, one-dimensional, adiabatic, no work" : "steady, one-dimensional, no work";
         if (answer.Fluid.HasSaturation && answer.Exit.State.Phase == Fluids.Phase.Wet) yield return "wet states: one homogeneous mixture at equilibrium";
-        if (answer.Case.DischargeCorrelation is Devices.Coefficients.CriticalFlowCd row)
-            yield return $"discharge coefficient: {row.Description}, {Devices.Coefficients.CriticalFlowCd.Standing}, uncertainty {text.Text(row.Uncertainty, Dimension.Ratio, 2)}";
+        if (answer.Case.DischargeCorrelation is DischargeCorrelation row && ThroatFlow.Of(answer) is ThroatFlow throat)
+            yield return $"discharge coefficient: {row.Description}, {row.Standing}, uncertainty {text.Text(row.UncertaintyAt(throat), Dimension.Ratio, 2)}";
         foreach (string line in answer.Assumptions) yield return line;
         if (answer.Performance.Thrust is not null && answer.Exit.Mach >= 1) yield return answer.BackPressure is null ? "thrust: against the ambient pressure" : "thrust: against the back pressure";
         if (!answer.Case.AmbientGiven || answer.Case.AmbientAltitude is { GivesPressure: true } or { GivesTemperature: true }) yield return AmbientWords(answer.Case, text);

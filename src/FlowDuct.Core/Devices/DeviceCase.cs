@@ -82,7 +82,7 @@ internal sealed record DeviceCase
     internal ExpansionModel Expansion { get; init; }
 
     /// <summary>The correlation that gives the discharge coefficient; null where a number or none is given.</summary>
-    internal Coefficients.CriticalFlowCd? DischargeCorrelation { get; init; }
+    internal Coefficients.DischargeCorrelation? DischargeCorrelation { get; init; }
 
     internal RecoveryBasis RecoveryBasis { get; init; }
 

@@ -183,6 +183,11 @@ internal static class Refusals
     internal static FlowDuctException CorrelationWithoutSection() => NotUnderstood(
         "--discharge-coefficient", "a correlation needs the bore of the throat", "add --throat, for example --throat \"d=18 mm\"");
 
+    internal static FlowDuctException CorrelationWithoutPipe() => NotUnderstood(
+        "--discharge-coefficient",
+        "an equation of ISO 5167 needs the static pressure and the bore of the pipe, and the throat alone with the pressure of its tap",
+        "give for example --inlet \"p=6 bar, T=40 degC, d=100 mm\" --throat \"d=60 mm\" --back \"dp=25 kPa\"");
+
     internal static FlowDuctException CorrelationWithFlow() => NotUnderstood(
         "--discharge-coefficient", "the flow is given too, which implies the coefficient", "leave --flow or the correlation out");
 

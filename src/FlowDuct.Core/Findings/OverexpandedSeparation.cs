@@ -1,4 +1,5 @@
 using FlowDuct.Devices;
+using FlowDuct.Devices.Coefficients;
 using FlowDuct.Devices.Rating;
 using FlowDuct.Quantities;
 
@@ -7,16 +8,23 @@ namespace FlowDuct.Findings;
 /// <summary>The exit plane lies so far below the back pressure that the flow may leave the wall inside.</summary>
 internal static class OverexpandedSeparation
 {
-    // Fits to rocket-type nozzles put separation at a wall pressure of 0.25 to 0.5 of the ambient pressure: a warning band for a plant nozzle.
-    private const double Warning = 0.5;
-
     internal static Finding? Check(DeviceAnswer a)
     {
-        if (a.Performance is not { Regime: "overexpanded", Jet: JetAnswer jet }) return null;
-        bool near = jet.PressureRatio < Warning;
+        if (a.Performance.Jet is not JetAnswer jet || Separation.Of(a) is not Separation separation) return null;
+        bool near = separation.AreaRatio is not null;
         string disk = jet.RegularReflection == false ? "; the shocks cannot cross regularly, a Mach disk stands in the jet" : string.Empty;
         return new Finding(
-            "overexpanded-separation", near ? Severity.Caution : Severity.Note, jet.PressureRatio, Warning, "from memory: fits to rocket nozzles, 0.25 to 0.5", text =>
-                $"the exit plane holds {text.Text(jet.PressureRatio, Dimension.Ratio, 4)} of the back pressure{(near ? ": the flow may separate from the wall inside" : string.Empty)}{disk}");
+            "overexpanded-separation", near ? Severity.Caution : Severity.Note, jet.PressureRatio, separation.Band.Greatest, SeparationCriteria.Standing, text =>
+                $"the exit plane holds {Short(text, jet.PressureRatio)} of the back pressure{Where(text, separation)}{disk}");
     }
+
+    private static string Where(IQuantityText text, in Separation separation)
+    {
+        string band = $"{Short(text, separation.Band.Least)} to {Short(text, separation.Band.Greatest)}";
+        return separation.AreaRatio is double ratio
+            ? $": the flow may leave the wall inside, from {Short(text, ratio)} throat areas on (fits: at {band})"
+            : $" (fits put separation at {band})";
+    }
+
+    private static string Short(IQuantityText text, double ratio) => text.Text(ratio, Dimension.Ratio, 3);
 }

@@ -152,7 +152,7 @@ internal static partial class QuantityCatalogue
             JsonKey = "discharge_coefficient",
             Limits = new QuantityLimits(0, 1.2, false),
             AnsweredAs = ["discharge_coefficient"],
-            Help = "Mass flow over the isentropic flow of the throat; a number, or iso9300-toroidal, iso9300-toroidal-accurate, iso9300-cylindrical.",
+            Help = "Mass flow over the isentropic flow of the throat; a number, or an equation by name: iso9300- with toroidal, toroidal-accurate, cylindrical; iso5167- with isa1932, long-radius, venturi-nozzle, venturi-cast, venturi-machined, venturi-welded.",
             Example = "0.985",
         },
         new()

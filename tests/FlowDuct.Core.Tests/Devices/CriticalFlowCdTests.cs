@@ -24,7 +24,7 @@ public class CriticalFlowCdTests
         int rows = 0;
         foreach (IReadOnlyDictionary<string, string> row in ReferenceTable.Read("flow/critical_nozzle_cd_check.csv"))
         {
-            CriticalFlowCd correlation = CriticalFlowCd.Find(s_names[row["id"]])!;
+            CriticalFlowCd correlation = (CriticalFlowCd)DischargeCorrelation.Find(s_names[row["id"]])!;
             double Re = double.Parse(row["Re"], CultureInfo.InvariantCulture);
             Assert.True(Printed.Parse(row["Cd"]).Agrees(correlation.At(Re)), $"{row["id"]} at {Re}");
             Assert.False(Printed.Parse(row["Cd"]).Agrees(correlation.At(Re * 1.01)));
@@ -40,16 +40,19 @@ public class CriticalFlowCdTests
     [InlineData("iso9300-cylindrical", 3.5e5, 1.1e7)]
     public void Each_holds_inside_its_range_only(string name, double least, double greatest)
     {
-        CriticalFlowCd correlation = CriticalFlowCd.Find(name)!;
-        Assert.True(correlation.Holds(least) && correlation.Holds(greatest));
-        Assert.False(correlation.Holds(least * 0.999) || correlation.Holds(greatest * 1.001));
+        CriticalFlowCd correlation = (CriticalFlowCd)DischargeCorrelation.Find(name)!;
+        Assert.Null(At(least) ?? At(greatest));
+        Assert.Equal(least, At(least * 0.999)!.Value.Limit);
+        Assert.Equal(greatest, At(greatest * 1.001)!.Value.Limit);
+
+        Crossing? At(double Re) => correlation.CrossedBy(new ThroatFlow(Re, 0, 0, 0.1, true));
     }
 
     // The coefficient belongs to the Reynolds number of the flow that it gives.
     [Fact]
     public void A_named_coefficient_closes_on_its_own_flow()
     {
-        CriticalFlowCd row = CriticalFlowCd.Find("iso9300-toroidal")!;
+        CriticalFlowCd row = (CriticalFlowCd)DischargeCorrelation.Find("iso9300-toroidal")!;
         DeviceAnswer a = DeviceSolver.Solve(Cases.Rated(WaterFluid.Instance, "p0=9 bar, T0=230 degC", "d=18 mm", "", "p=1 bar") with { DischargeCorrelation = row });
         Assert.Equal(row.At(a.Performance.ReynoldsThroat!.Value), a.Performance.DischargeCoefficient!.Value, 1e-10);
         Assert.DoesNotContain(a.Findings, f => f.Code == "extrapolated");

@@ -23,6 +23,15 @@ internal sealed record NozzleGeometryReader(StationFigures Throat, StationFigure
         return new NozzleGeometryReader(throat, exit, back, shape, words);
     }
 
+    /// <summary>The narrowest section: the throat, or the exit of a nozzle given by it.</summary>
+    internal StationFigures Narrow => Throat.Has(Figure.Section) ? Throat : Exit;
+
+    /// <summary>Reynolds number of a mass flow, kg/s, of all openings on the bore of one, with the viscosity, Pa.s.</summary>
+    internal double Reynolds(double massFlow, double mu) => 4 * massFlow / Narrow.Openings / (Math.PI * Bore(Narrow) * mu);
+
+    /// <summary>The bore of a section, m; of one that is not round, that of the same area.</summary>
+    internal static double Bore(StationFigures at) => Math.Sqrt(4 * at[Figure.Section] / Math.PI);
+
     /// <summary>The area of all openings of a section together, m2.</summary>
     internal static double Area(StationFigures at) => at[Figure.Section] * at.Openings;
 

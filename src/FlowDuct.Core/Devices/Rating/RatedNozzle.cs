@@ -1,3 +1,4 @@
+using FlowDuct.Devices.Coefficients;
 using FlowDuct.Errors;
 using FlowDuct.Flow;
 using FlowDuct.Fluids;
@@ -10,53 +11,52 @@ internal static class RatedNozzle
 {
     // Unit areas serve a nozzle without sections: the flow follows from nothing then, and stays unknown.
     private const double UnitArea = 1;
-    private const int CorrelationRounds = 6;
 
     internal static DeviceAnswer Solve(DeviceCase c)
     {
         Refuse(c);
-        Inlet inlet = RatedInlet.Solve(c);
+        ApproachedInlet approached = RatedInlet.Solve(c);
+        Inlet inlet = approached.Inlet;
         if (inlet.V > inlet.State.w) throw Refusals.SupersonicInlet();
         FluidState rest = inlet.Station.Stagnation ?? throw Refusals.NoSuchInlet(inlet.Given.Given);
         NozzleGeometryReader geometry = NozzleGeometryReader.Read(c, inlet.State.p, rest.p);
-        NozzleRating rating = Rate(c, rest, geometry);
-        return Assemble(c, inlet, geometry, rating);
+        NozzleRating rating = Rate(c, rest, geometry, approached.MassFlow);
+        if (approached.ReferenceFlow is double reference) rating = rating with { IsentropicFlow = reference };
+        return Assemble(c, inlet, geometry, rating, approached.ReferenceFlow is not null);
     }
 
-    /// <summary>The rating at an inlet; a flow given without a coefficient implies the coefficient.</summary>
-    internal static NozzleRating Rate(DeviceCase c, in FluidState rest, NozzleGeometryReader geometry)
+    /// <summary>The rating at an inlet; a flow that is known already, kg/s, implies the coefficient.</summary>
+    internal static NozzleRating Rate(DeviceCase c, in FluidState rest, NozzleGeometryReader geometry, double? massFlow)
     {
         double? coefficient = c.Has(CaseOption.DischargeCoefficient) ? c.Value(CaseOption.DischargeCoefficient) : null;
         bool throat = geometry.Throat.Has(Figure.Section), exit = geometry.Exit.Has(Figure.Section);
         double exitArea = exit ? NozzleGeometryReader.Area(geometry.Exit) : throat ? NozzleGeometryReader.Area(geometry.Throat) : UnitArea;
         double throatArea = throat ? NozzleGeometryReader.Area(geometry.Throat) : exitArea;
-        var nozzle = new NozzleGeometry(throatArea, exitArea, c.GivenEfficiency ?? 1, coefficient);
+        var nozzle = new NozzleGeometry(throatArea, exitArea, c.GivenEfficiency ?? 1, massFlow is null ? coefficient : null);
         var inlet = new RatingInlet(HeldFluid(c, rest), rest.h, rest.s, rest.p);
-        if (c.DischargeCorrelation is not null) return ByCorrelation(c, inlet, rest, nozzle, geometry, throat ? geometry.Throat : geometry.Exit);
+        if (massFlow is null && c.DischargeCorrelation is CriticalFlowCd) return ByCorrelation(c, inlet, rest, nozzle, geometry);
         NozzleRating rating = One(inlet, nozzle, geometry);
-        if (coefficient is not null || !c.Has(CaseOption.Flow) || c.FlowIsVolume || !(throat || exit) || rating.IsentropicFlow == 0) return rating;
-        return One(inlet, nozzle with { DischargeCoefficient = c.Value(CaseOption.Flow) / rating.IsentropicFlow }, geometry);
+        if (massFlow is not double flow || !(throat || exit) || rating.IsentropicFlow == 0) return rating;
+        return One(inlet, nozzle with { DischargeCoefficient = flow / rating.IsentropicFlow }, geometry);
     }
 
-    // The coefficient hangs on the flow through its Reynolds number, weakly: each round gains three digits.
-    private static NozzleRating ByCorrelation(
-        DeviceCase c, in RatingInlet inlet, in FluidState rest, NozzleGeometry nozzle, NozzleGeometryReader geometry, StationFigures narrow)
+    private static NozzleRating ByCorrelation(DeviceCase c, in RatingInlet inlet, in FluidState rest, NozzleGeometry nozzle, NozzleGeometryReader geometry)
     {
-        if (!narrow.Has(Figure.Section)) throw Refusals.CorrelationWithoutSection();
-        if (!c.Fluid.TryTransport(rest, out Transport transport)) throw Refusals.NoViscosity(c.Fluid);
-        double coefficient = c.DischargeCorrelation!.a;
+        if (!geometry.Narrow.Has(Figure.Section)) throw Refusals.CorrelationWithoutSection();
+        double mu = Viscosity(c, rest), coefficient = 1;
         NozzleRating rating = default;
-        for (int i = 0; i < CorrelationRounds; i++)
+        for (int i = 0; i < DischargeCorrelation.Rounds; i++)
         {
             rating = One(inlet, nozzle with { DischargeCoefficient = coefficient }, geometry);
-            coefficient = c.DischargeCorrelation.At(Reynolds(rating.MassFlow, narrow, transport.mu));
+            coefficient = c.DischargeCorrelation!.At(new ThroatFlow(geometry.Reynolds(rating.MassFlow, mu), 0, 0, 1, rating.Choked));
         }
 
         return rating;
     }
 
-    private static double Reynolds(double massFlow, StationFigures narrow, double mu) =>
-        4 * massFlow / narrow.Openings / (Math.PI * Math.Sqrt(4 * narrow[Figure.Section] / Math.PI) * mu);
+    /// <summary>The viscosity that a correlation needs, Pa.s.</summary>
+    internal static double Viscosity(DeviceCase c, in FluidState rest) =>
+        c.Fluid.TryTransport(rest, out Transport transport) ? transport.mu : throw Refusals.NoViscosity(c.Fluid);
 
     /// <summary>The fluid that expands: the one of the case, or it with the phase of the inlet held.</summary>
     internal static Fluid HeldFluid(DeviceCase c, in FluidState rest)
@@ -88,7 +88,7 @@ internal static class RatedNozzle
         }
     }
 
-    private static DeviceAnswer Assemble(DeviceCase c, Inlet inlet, NozzleGeometryReader geometry, in NozzleRating rating)
+    private static DeviceAnswer Assemble(DeviceCase c, Inlet inlet, NozzleGeometryReader geometry, in NozzleRating rating, bool ownApproach)
     {
         bool sections = geometry.Throat.Has(Figure.Section) || geometry.Exit.Has(Figure.Section);
         double? flow = sections ? rating.MassFlow : inlet.MassFlow;
@@ -100,7 +100,7 @@ internal static class RatedNozzle
         if (geometry.ShapeWords.Length > 0) assumptions.Add(geometry.ShapeWords);
         if (rating.AtKink && rating.Choked) assumptions.Add("the flux is greatest where the flow meets saturation, not where M = 1");
         if (c.Back.Mask == 0) assumptions.Add("back pressure: the given exit pressure");
-        if (sections) assumptions.Add(CoefficientWords(inlet));
+        if (sections) assumptions.Add(CoefficientWords(inlet, ownApproach));
         var answer = new DeviceAnswer
         {
             Case = c,
@@ -110,7 +110,7 @@ internal static class RatedNozzle
             Performance = Figures(c, rating, sections) with
             {
                 ReynoldsThroat = sections && c.Fluid.TryTransport(inlet.Station.Stagnation!.Value, out Transport transport)
-                    ? Reynolds(rating.MassFlow, geometry.Throat.Has(Figure.Section) ? geometry.Throat : geometry.Exit, transport.mu)
+                    ? geometry.Reynolds(rating.MassFlow, transport.mu)
                     : null,
                 MassFlow = flow,
                 CriticalPressureRatio = rating.CriticalPressure > 0 ? rating.CriticalPressure / inlet.Station.Stagnation!.Value.p : null,
@@ -128,9 +128,9 @@ internal static class RatedNozzle
         return answer with { Ledger = new Ledger(inlet.State.h, V1 * V1 / 2, 0, 0, rating.Exit.h, V2 * V2 / 2, 0) };
     }
 
-    private static string CoefficientWords(Inlet inlet) => inlet.V > 0
-        ? "discharge coefficient: on the isentropic flow with the approach velocity"
-        : "discharge coefficient: on the isentropic flow from rest";
+    private static string CoefficientWords(Inlet inlet, bool ownApproach) => ownApproach
+        ? "discharge coefficient: on the isentropic flow between the same pressures, with the approach velocity of that flow"
+        : inlet.V > 0 ? "discharge coefficient: on the isentropic flow from the stagnation state of the inlet" : "discharge coefficient: on the isentropic flow from rest";
 
     private static StationAnswer At(Fluid fluid, in FluidState state, double V, StationFigures section) => StationAnswer.From(fluid, state, V) with
     {
