@@ -45,6 +45,10 @@ ask 0 'NZ-1014: up to which back pressure stays its shock beyond 1.6 throat area
 ask 0 'NZ-2107: dry saturated steam through 14 mm, condensing late' \
     nozzle --fluid steam --inlet 'p0=6.4 bar, x=1' --throat 'd=14 mm' --back 'p=2.1 bar' --expansion supersaturated
 
+ask 0 'NZ-1014: the same nozzle with condensation at 3.2 % equilibrium moisture' \
+    nozzle --fluid steam --inlet 'p0=11.2 barg, T0=212 degC' --throat 'd=9.5 mm' --exit 'd=31 mm' --back 'p=0.12 bar' \
+    --expansion supersaturated --onset 3.2% --ambient 'p=0.973 bar, T=24 degC'
+
 ask 0 'NZ-2203: the most that the bath nozzle could pass if nothing flashed before its exit' \
     nozzle --fluid water --inlet 'p=8.5 bar, T=138 degC' --throat 'd=6 mm' --back 'p=1.02 bar' --expansion single-phase
 

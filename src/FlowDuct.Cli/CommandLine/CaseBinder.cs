@@ -54,7 +54,7 @@ internal sealed class CaseBinder
         if (_arguments.Has("--exit")) Fill(ref exit, "--exit", Station.Exit);
         if (_arguments.Has("--throat")) Fill(ref throat, "--throat", Station.Throat);
         if (_arguments.Has("--back")) Fill(ref back, "--back", StationLists.Back);
-        (GivenSlots options, bool flowIsVolume) = Options(fluid);
+        (GivenSlots options, bool flowIsVolume, bool onsetIsDifference) = Options(fluid);
         var c = new DeviceCase
         {
             Device = kind,
@@ -72,6 +72,7 @@ internal sealed class CaseBinder
             AmbientAltitude = AmbientAltitude,
             UsesGauge = _usesGauge,
             FlowIsVolume = flowIsVolume,
+            OnsetIsDifference = onsetIsDifference,
         };
         (c.Inlet, c.Exit, c.Options, c.Throat, c.Back) = (inlet, exit, options, throat, back);
         return c;
@@ -156,10 +157,10 @@ internal sealed class CaseBinder
         }
     }
 
-    private (GivenSlots Options, bool FlowIsVolume) Options(Fluid fluid)
+    private (GivenSlots Options, bool FlowIsVolume, bool OnsetIsDifference) Options(Fluid fluid)
     {
         GivenSlots slots = default;
-        bool volume = false;
+        bool volume = false, difference = false;
         foreach (QuantityRow row in QuantityCatalogue.Options)
         {
             string name = "--" + row.Word;
@@ -173,11 +174,12 @@ internal sealed class CaseBinder
                 _ => 1,
             };
             volume |= option == CaseOption.Flow && value.Unit.Dimension == Dimension.VolumeFlow;
+            difference |= option == CaseOption.Onset && value.Unit.Dimension == Dimension.TemperatureDifference;
             slots.Set((int)option, value.Si * size, value.HalfWidth * size);
         }
 
         RefuseRecoveryAboveOne(slots);
-        return (slots, volume);
+        return (slots, volume, difference);
     }
 
     // On the stagnation head a recovery of one stops the flow; on the dynamic head compressibility adds a little.

@@ -21,6 +21,7 @@ internal static class OptionTable
         Of(CaseOption.DischargeCoefficient, "RATIO", CommandName.Nozzle),
         Of(CaseOption.ConvergentAngle, "ANGLE", CommandName.Nozzle),
         Of(CaseOption.DivergentAngle, "ANGLE", CommandName.Nozzle),
+        Of(CaseOption.Onset, "PART", CommandName.Nozzle),
         Of(CaseOption.Recovery, "RATIO", CommandName.Diffuser),
         new("--recovery-basis", "HEAD", "Head of the recovery: stagnation (p0,1 - p1, the default) or dynamic (rho V^2/2).", "dynamic", CommandName.Diffuser),
         Of(CaseOption.LossCoefficient, "RATIO", CommandName.Devices),

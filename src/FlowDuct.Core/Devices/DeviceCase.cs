@@ -101,6 +101,9 @@ internal sealed record DeviceCase
     /// <summary>True where the flow is an actual volume flow at the inlet, m3/s; else it is a mass flow, kg/s.</summary>
     internal bool FlowIsVolume { get; init; }
 
+    /// <summary>True where the onset of the other phase is a temperature difference, K; else it is its mass fraction at equilibrium.</summary>
+    internal bool OnsetIsDifference { get; init; }
+
     /// <summary>True where a gauge or vacuum reading made use of the ambient pressure.</summary>
     internal bool UsesGauge { get; init; }
 
@@ -130,6 +133,10 @@ internal sealed record DeviceCase
 
     /// <summary>The flow as a mass flow at an inlet of this density, kg/m3; null where none is given.</summary>
     internal double? GivenMassFlow(double rho) => Has(CaseOption.Flow) ? Value(CaseOption.Flow) * (FlowIsVolume ? rho : 1) : null;
+
+    /// <summary>Where a held phase gives way.</summary>
+    internal Onset Onset => !Has(CaseOption.Onset) ? Onset.AtTheEnd
+        : OnsetIsDifference ? Onset.AtDifference(Value(CaseOption.Onset)) : Onset.AtFraction(Value(CaseOption.Onset));
 
     /// <summary>Heat added per mass, J/kg: heat minus heat loss.</summary>
     internal double Heat => ValueOr(CaseOption.Heat, 0) - ValueOr(CaseOption.HeatLoss, 0);

@@ -28,6 +28,7 @@ internal static class DeviceSolver
         if (Rating.NozzleGeometryReader.Asks(c)) return Rating.RatedNozzle.Solve(c);
         if (c.DischargeCorrelation is not null) throw Refusals.CorrelationWithoutBack();
         if (c.Expansion != ExpansionModel.Equilibrium) throw Refusals.ExpansionWithoutSections();
+        if (c.Has(CaseOption.Onset)) throw Refusals.OnsetWithoutHeldPhase();
         Inlet inlet = Inlet.Solve(c);
         if (c.Device == DeviceKind.Diffuser && inlet.V == 0) throw Refusals.DiffuserAtRest();
         if (inlet.Station.Stagnation is null) throw Refusals.NoSuchInlet(inlet.Given.Given);

@@ -51,6 +51,8 @@ internal static class PerformanceFigures
         ("metastable.equilibrium_flow", p => p.Metastable?.EquilibriumFlow),
         ("metastable.reverted_moisture", p => p.Metastable?.RevertedMoisture),
         ("metastable.flux_change", p => p.Metastable?.FluxChange),
+        ("metastable.onset_pressure", p => p.Metastable?.OnsetPressure),
+        ("metastable.onset_area_ratio", p => p.Metastable?.OnsetAreaRatio),
     ];
 
     /// <summary>The number of a key, or null where it cannot be known.</summary>

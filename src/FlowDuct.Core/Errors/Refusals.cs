@@ -177,6 +177,13 @@ internal static class Refusals
         model == ExpansionModel.SinglePhase ? "single-phase keeps a liquid from flashing, and this inlet is none of water" : "supersaturated keeps a vapour from condensing, and this inlet is none of water",
         "leave it out for equilibrium");
 
+    internal static FlowDuctException OnsetWithoutHeldPhase() => NotUnderstood(
+        "--onset", "at equilibrium no phase is held that could give way", "add --expansion supersaturated or --expansion single-phase");
+
+    internal static FlowDuctException OnsetBeyondEquation(double moisture, double most) => NotUnderstood(
+        "--onset", $"a moisture of {Units.Text(moisture, Dimension.Ratio)} is beyond the end of the equation for supersaturated vapour, {Units.Text(most, Dimension.Ratio)} (IAPWS R7-97(2012), Eq. (18))",
+        "give a smaller one, or leave it out to hold the vapour to that end");
+
     internal static FlowDuctException ExpansionWithoutSections() => NotUnderstood(
         "--expansion", "a held phase is solved for a nozzle with --back or --throat", "add --back, for example --back \"p=1 bar\"");
 
@@ -220,6 +227,8 @@ internal static class Refusals
             "give a back pressure below it"),
         Devices.Rating.RatingOutcome.TooGreatALoss => NoAnswer(
             "--efficiency", "so great a loss leaves no flow from this throat through this exit", "give a higher efficiency or a larger exit"),
+        Devices.Rating.RatingOutcome.InsideReversion => NoAnswer(
+            "--exit", "the exit plane lies where the held phase gives way: its section is too wide for the stream before that and too narrow for the one behind", "give another exit section, or another --onset"),
         Devices.Rating.RatingOutcome.NoThroat or Devices.Rating.RatingOutcome.OutsideRange => NoAnswer(
             "--inlet", "the expansion leaves the range of the fluid before it is solved", $"valid range: {fluid.RangeText}"),
         _ => throw new InvalidOperationException($"a bracketed search of the rating did not close ({outcome})"),

@@ -16,9 +16,7 @@ internal static class ModelDoubtful
         bool wet = inlet.Phase == Phase.Wet;
         if (a.Performance.Metastable is Devices.Rating.MetastableAnswer held)
         {
-            string what = a.Exit.State.Phase == Phase.Liquid ? "the liquid is kept from flashing" : "the vapour is kept from condensing";
-            return new Finding("model-doubtful", Severity.Caution, held.Undercooling, null, "assumption", _ =>
-                $"{what}: where it gives way is not predicted, and the truth lies between this and equilibrium");
+            return new Finding("model-doubtful", Severity.Caution, held.Undercooling, null, "assumption", _ => HeldWords(a, held));
         }
 
         if (a.Case.Device == DeviceKind.Diffuser && (wet || a.Exit.State.Phase == Phase.Wet))
@@ -37,5 +35,16 @@ internal static class ModelDoubtful
             ? new Finding("model-doubtful", Severity.Caution, inlet.x, LeastEntryQuality, "common practice", _ =>
                 "so wet a stream is taken as one homogeneous fluid at equilibrium: the phases slip and lag")
             : null;
+    }
+
+    private static string HeldWords(DeviceAnswer a, in Devices.Rating.MetastableAnswer held)
+    {
+        string what = held.IsLiquid ? "the liquid is kept from flashing" : "the vapour is kept from condensing";
+        bool chosen = a.Case.Has(Quantities.CaseOption.Onset);
+        string end = chosen ? "to the onset given" : "to the end of its equation";
+        if (held.FlowIsLeast) return $"{what} {end}, which is met in the throat: the flow is at least this";
+        return held.OnsetPressure is null
+            ? $"{what}: where it gives way is not predicted, and the truth lies between this and equilibrium"
+            : $"{what} {end}, and returns to equilibrium there at once: where it does is {(chosen ? "your" : "no")} prediction";
     }
 }

@@ -66,23 +66,31 @@ internal static class Choking
     {
         atKink = false;
         var excess = new Excess(fluid, h0, s);
-        double top = p0;
-        if (fluid.TrySaturationOnIsentrope(s, out FluidState edge) && edge.p < p0)
-        {
-            if (SonicExcess(edge, h0) <= 0) return Solve(fluid, s, excess, edge.p, p0, out throat);
-            throat = edge;
-            atKink = true;
-            top = edge.p * WetSide;
-            if (!(excess.At(top) > 0)) return fluid.FromPS(top, s, default, out _) == Outcome.Ok;
-            atKink = false;
-            if (fluid.FromPS(top, s, default, out throat) == Outcome.Ok && Secant(fluid, h0, s, p0, ref throat)) return true;
-        }
+        if (!fluid.TrySaturationOnIsentrope(s, out FluidState edge) || !(edge.p < p0)) return Below(fluid, h0, s, p0, p0, excess, out throat);
+        if (SonicExcess(edge, h0) <= 0) return Solve(fluid, s, excess, edge.p, p0, out throat);
+        throat = edge;
+        atKink = true;
+        double top = edge.p * WetSide;
+        if (!(excess.At(top) > 0)) return fluid.FromPS(top, s, default, out _) == Outcome.Ok;
 
+        // Still slower than sound behind the line: the flux grows on, but where it fell by a step there it may not make up for that.
+        if (!Below(fluid, h0, s, p0, top, excess, out FluidState wet)) return false;
+        atKink = Flux(wet, h0) < Flux(edge, h0);
+        if (!atKink) throat = wet;
+        return true;
+    }
+
+    // A throat below a pressure at which the flow is slower than sound.
+    private static bool Below(Fluid fluid, double h0, double s, double p0, double top, Excess excess, out FluidState throat)
+    {
+        if (top < p0 && fluid.FromPS(top, s, default, out throat) == Outcome.Ok && Secant(fluid, h0, s, p0, ref throat)) return true;
         double low = top;
         while (excess.At(low) > 0) low *= 0.85;
         if (fluid.FromPS(low, s, default, out throat) != Outcome.Ok) low = RangeEdge.Find(p => fluid.FromPS(p, s, default, out _) == Outcome.Ok, Math.Min(top, low / 0.85), low);
         return excess.At(low) <= 0 && Solve(fluid, s, excess, low, top, out throat);
     }
+
+    private static double Flux(in FluidState at, double h0) => Energy.Velocity(h0, at.h) / at.v;
 
     private static double SonicExcess(in FluidState at, double h0) => (at.w * at.w) - (2 * (h0 - at.h));
 
@@ -99,6 +107,6 @@ internal static class Choking
 
     private readonly struct FluxExcess(Fluid fluid, double h0, double s, double G) : IScalarFunction
     {
-        public double At(double p) => fluid.FromPS(p, s, default, out FluidState at) == Outcome.Ok ? (Energy.Velocity(h0, at.h) / at.v) - G : -G;
+        public double At(double p) => fluid.FromPS(p, s, default, out FluidState at) == Outcome.Ok ? Flux(at, h0) - G : -G;
     }
 }

@@ -71,14 +71,17 @@ public abstract class Fluid
     }
 
     /// <summary>
-    /// The same fluid with the phase of a state held: vapour that does not condense, liquid that does not flash. False where it has one phase
+    /// The same fluid with the phase of a state held up to its onset: vapour that does not condense, liquid that does not flash. False where it has one phase
     /// only, or the state is wet already.
     /// </summary>
-    internal virtual bool TryHeld(in FluidState at, [NotNullWhen(true)] out Fluid? held)
+    internal virtual bool TryHeld(in FluidState at, in Onset onset, [NotNullWhen(true)] out Fluid? held)
     {
         held = null;
         return false;
     }
+
+    /// <summary>The fluid in equilibrium, as behind a shock; itself where no phase is held.</summary>
+    internal virtual Fluid Relaxed => this;
 
     /// <summary>Viscosity and thermal conductivity of a state of one phase; false where no formulation holds.</summary>
     internal virtual bool TryTransport(in FluidState at, out Transport transport)

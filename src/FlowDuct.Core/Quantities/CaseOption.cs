@@ -38,4 +38,7 @@ internal enum CaseOption
 
     /// <summary>Included angle of the divergent part, rad (nozzle).</summary>
     DivergentAngle,
+
+    /// <summary>Onset of the other phase where one is held: its equilibrium mass fraction, or a temperature difference, K (nozzle).</summary>
+    Onset,
 }

@@ -183,5 +183,20 @@ internal static partial class QuantityCatalogue
             Help = "Included angle of the divergent part; gives its length where both bores are known (nozzle).",
             Example = "10 deg",
         },
+        new()
+        {
+            Key = "onset",
+            Symbol = "onset",
+            Word = "onset",
+            Name = "onset of the other phase",
+            Dimension = Dimension.Ratio,
+            AlsoGivenAs = [Dimension.TemperatureDifference],
+            Kind = QuantityKind.Option,
+            OptionSlot = CaseOption.Onset,
+            JsonKey = "onset",
+            Limits = QuantityLimits.Positive,
+            Help = "Where a held phase gives way (--expansion): equilibrium moisture of a vapour or quality of a liquid, or its undercooling or superheat in K.",
+            Example = "3.5%",
+        },
     ];
 }

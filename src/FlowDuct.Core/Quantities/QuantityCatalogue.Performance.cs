@@ -90,16 +90,20 @@ internal static partial class QuantityCatalogue
     /// <summary>A phase that is held past saturation.</summary>
     private static QuantityRow[] MetastableRows() =>
     [
-        Result("metastable.undercooling", "dTu", "undercooling in the exit", Dimension.TemperatureDifference,
-            "Saturation temperature at the exit pressure minus exit temperature."),
-        Result("metastable.supersaturation_ratio", "p/psat", "supersaturation ratio in the exit", Dimension.Ratio,
-            "Exit pressure over saturation pressure at the exit temperature."),
+        Result("metastable.undercooling", "dTu", "greatest undercooling", Dimension.TemperatureDifference,
+            "Saturation temperature minus temperature of the held phase, in the exit or where it gives way before; negative is superheat of a liquid."),
+        Result("metastable.supersaturation_ratio", "p/psat", "supersaturation ratio", Dimension.Ratio,
+            "Pressure over saturation pressure at the temperature of the held phase there."),
         Result("metastable.equilibrium_flow", "qm_eq", "mass flow at equilibrium", Dimension.MassFlow,
             "Flow of the same nozzle with both phases in equilibrium."),
         Result("metastable.reverted_moisture", "y_rev", "moisture after reversion", Dimension.Ratio,
             "Moisture after the return to equilibrium at constant pressure, velocity and enthalpy."),
         Result("metastable.flux_change", "G/G", "mass flux after reversion", Dimension.Ratio,
             "Mass flux behind the return to equilibrium over that before it: the duct would have to widen by its inverse."),
+        Result("metastable.onset_pressure", "p_on", "pressure at the onset", Dimension.Pressure,
+            "Where the held phase gives way inside the nozzle."),
+        Result("metastable.onset_area_ratio", "A_on/At", "section at the onset", Dimension.Ratio,
+            "Section where the held phase gives way over the throat."),
     ];
 
     private static QuantityRow Result(

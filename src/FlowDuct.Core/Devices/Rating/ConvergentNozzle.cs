@@ -76,7 +76,17 @@ internal static class ConvergentNozzle
         while (atLow > 0 && double.IsFinite(atLow)) atLow = excess.At(low *= 0.9);
         if (!double.IsFinite(atLow)) return false;
         double p = atHigh > 0 ? RootFinder.Find(ref excess, low, high, atLow, atHigh) : high;
-        return path.At(p, ideal, out sonic, out V) == Outcome.Ok;
+        return path.At(p, ideal, out sonic, out V) == Outcome.Ok && (ReferenceEquals(path.Fluid, path.Fluid.Relaxed) || NearSideOfReversion(path, p0, ref sonic, ref V));
+    }
+
+    // Where a held phase gives way before M = 1 is met the flux is greatest on the near side of that step.
+    private static bool NearSideOfReversion(LossPath path, double p0, ref FluidState sonic, ref double V)
+    {
+        if (sonic.Phase != Phase.Wet) return true;
+        double edge = RangeEdge.Find(p => path.At(p, default, out FluidState at, out _) == Outcome.Ok && at.Phase != Phase.Wet, p0, sonic.p);
+        if (path.At(edge, default, out FluidState near, out double nearV) != Outcome.Ok) return false;
+        if (nearV / near.v > V / sonic.v) (sonic, V) = (near, nearV);
+        return true;
     }
 
     private readonly struct SonicExcess(LossPath path) : IScalarFunction

@@ -73,11 +73,11 @@ internal readonly record struct DivergentLimits
         }
         while (FluxAt(path, low) > target);
         double start = Math.Max(low, throat.p * Math.Pow(target / limits.Flux, StartExponent));
-        if (!FluxRoot.TryFind(path, target, throat.p, low, start, out FluidState exit, out double V)) return RatingOutcome.NotConverged;
+        if (!FluxRoot.TryFind(path, target, throat.p, low, start, out FluidState exit, out double V)) return Unsolved(inlet.Fluid);
         limits = limits with { Exit = exit, ExitVelocity = V, DivergenceEfficiency = OfDivergence(path, throat, exit) };
         if (!(limits.DivergenceEfficiency > 0)) return RatingOutcome.TooGreatALoss;
         limits = limits with { Pressures = limits.Pressures with { FullExpansion = exit.p } };
-        if (!NormalShock.TryFind(inlet.Fluid, exit, V, out FluidState behind, out double V2)) return RatingOutcome.OutsideRange;
+        if (!NormalShock.TryFind(inlet.Fluid.Relaxed, exit, V, out FluidState behind, out double V2)) return RatingOutcome.OutsideRange;
         limits = limits with
         {
             Behind = new ShockAnswer(exit, V, behind, V2, limits.Flux / target),
@@ -85,6 +85,9 @@ internal readonly record struct DivergentLimits
         };
         return RatingOutcome.Ok;
     }
+
+    // Where a held phase gives way the flux falls by a step, and an exit may lie inside it.
+    private static RatingOutcome Unsolved(Fluid fluid) => ReferenceEquals(fluid, fluid.Relaxed) ? RatingOutcome.NotConverged : RatingOutcome.InsideReversion;
 
     private static double OfDivergence(LossPath path, in FluidState throat, in FluidState exit)
     {

@@ -38,7 +38,7 @@ internal static class DivergentNozzle
             Limits = limits.Pressures,
         };
         if (back > limits.Pressures.Subsonic + band) return Subsonic(inlet, geometry, limits, back, all, out rating);
-        if (back >= limits.Pressures.Subsonic - band) return BackFixesExit(inlet, geometry, back, all with { Regime = Regime.ChokedSubsonicExit }, out rating);
+        if (back >= limits.Pressures.Subsonic - band) return BackFixesExit(inlet.Fluid, inlet, geometry, back, all with { Regime = Regime.ChokedSubsonicExit }, out rating);
         if (limits.Pressures.ShockAtExit is not double shocked) return limits.Hidden;
         if (back > shocked + band) return WithShock(inlet, geometry, limits, back, all, out rating);
         Regime regime = back >= shocked - band ? Regime.ShockAtExit
@@ -78,9 +78,9 @@ internal static class DivergentNozzle
     }
 
     // A subsonic exit at the back pressure that carries the flow of the choked throat: mass and energy alone fix it.
-    private static RatingOutcome BackFixesExit(in RatingInlet inlet, in NozzleGeometry geometry, double back, in NozzleRating all, out NozzleRating rating)
+    private static RatingOutcome BackFixesExit(Fluid fluid, in RatingInlet inlet, in NozzleGeometry geometry, double back, in NozzleRating all, out NozzleRating rating)
     {
-        bool found = SubsonicExit.TryFind(inlet.Fluid, inlet.h0, back, all.MassFlow / geometry.ExitArea, out FluidState exit, out double V);
+        bool found = SubsonicExit.TryFind(fluid, inlet.h0, back, all.MassFlow / geometry.ExitArea, out FluidState exit, out double V);
         rating = all with { Exit = exit, ExitVelocity = V };
         return found ? RatingOutcome.Ok : RatingOutcome.NotConverged;
     }
@@ -88,7 +88,7 @@ internal static class DivergentNozzle
     private static RatingOutcome WithShock(
         in RatingInlet inlet, in NozzleGeometry geometry, in DivergentLimits limits, double back, in NozzleRating all, out NozzleRating rating)
     {
-        RatingOutcome outcome = BackFixesExit(inlet, geometry, back, all with { Regime = Regime.ShockInDivergence }, out rating);
+        RatingOutcome outcome = BackFixesExit(inlet.Fluid.Relaxed, inlet, geometry, back, all with { Regime = Regime.ShockInDivergence }, out rating);
         if (outcome != RatingOutcome.Ok) return outcome;
         if (!ShockPosition.TryFind(inlet, geometry, limits, rating.Exit, rating.ExitVelocity, out ShockAnswer shock)) return RatingOutcome.NotConverged;
         rating = rating with { Shock = shock };

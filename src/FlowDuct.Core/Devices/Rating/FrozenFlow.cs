@@ -12,10 +12,10 @@ internal static class FrozenFlow
         if (!a.Fluid.HasSaturation || a.Rating is not NozzleRating rating || a.Inlet.Stagnation is not FluidState rest) return null;
         double area = ThroatArea(a), back = a.BackPressure!.Value;
         bool crosses = rating.AtKink || rating.Exit.Phase == Phase.Wet || rating.Throat.Phase == Phase.Wet;
-        if (!crosses || !a.Fluid.TryHeld(rest, out Fluid? held)) return null;
+        if (!crosses || !a.Fluid.TryHeld(rest, Onset.AtTheEnd, out Fluid? held)) return null;
         var inlet = new RatingInlet(held, rest.h, rest.s, rest.p);
         RatingOutcome outcome = ConvergentNozzle.Rate(inlet, new NozzleGeometry(area, area, 1, null), back, out NozzleRating frozen);
-        return outcome == RatingOutcome.Ok ? frozen.MassFlow : null;
+        return outcome == RatingOutcome.Ok && !frozen.AtKink ? frozen.MassFlow : null;
     }
 
     /// <summary>True where a flow, kg/s, stays under the frozen bound.</summary>

@@ -152,9 +152,10 @@ internal static class NozzlePath
             }
 
             (state, V) = (default, 0);
-            if (Fluid.FromHS(_h0, s, default, out FluidState rest) != Outcome.Ok) return false;
-            double low = Choking.TryFind(Fluid, _h0, s, rest.p, out FluidState critical, out _) ? critical.p : Math.Max(least, _rating.Exit.p);
-            return FluxRoot.TryFind(new LossPath(Fluid, _h0, _h0, s, efficiency), flux, low, rest.p, (low + rest.p) / 2, out state, out V);
+            Fluid fluid = _shockPassed ? Fluid.Relaxed : Fluid;
+            if (fluid.FromHS(_h0, s, default, out FluidState rest) != Outcome.Ok) return false;
+            double low = Choking.TryFind(fluid, _h0, s, rest.p, out FluidState critical, out _) ? critical.p : Math.Max(least, _rating.Exit.p);
+            return FluxRoot.TryFind(new LossPath(fluid, _h0, _h0, s, efficiency), flux, low, rest.p, (low + rest.p) / 2, out state, out V);
         }
 
         private bool Fast(double flux, out FluidState state, out double V)

@@ -63,7 +63,7 @@ internal static class RatedNozzle
     {
         if (c.Expansion == ExpansionModel.Equilibrium) return c.Fluid;
         bool liquid = rest.Phase is Phase.Liquid or Phase.SaturatedLiquid;
-        if (liquid != (c.Expansion == ExpansionModel.SinglePhase) || !c.Fluid.TryHeld(rest, out Fluid? held)) throw Refusals.ExpansionDoesNotFit(c.Expansion);
+        if (liquid != (c.Expansion == ExpansionModel.SinglePhase) || !c.Fluid.TryHeld(rest, c.Onset, out Fluid? held)) throw Refusals.ExpansionDoesNotFit(c.Expansion);
         return held;
     }
 
@@ -82,10 +82,18 @@ internal static class RatedNozzle
         if (c.DischargeCorrelation is not null && c.Has(CaseOption.Flow)) throw Refusals.CorrelationWithFlow();
         if (c.Has(CaseOption.LossCoefficient)) throw Refusals.LossWithSections();
         if (c.Has(CaseOption.Efficiency) && c.Has(CaseOption.VelocityCoefficient)) throw Refusals.LossTwice("efficiency, velocity coefficient");
+        if (c.Has(CaseOption.Onset)) RefuseOnset(c);
         foreach (GivenSlots slots in (GivenSlots[])[c.Inlet, c.Throat, c.Exit])
         {
             if (slots.Has((int)StationSymbol.Elevation) && slots.Value((int)StationSymbol.Elevation) != 0) throw Refusals.ElevationWithThroat();
         }
+    }
+
+    private static void RefuseOnset(DeviceCase c)
+    {
+        if (c.Expansion == ExpansionModel.Equilibrium) throw Refusals.OnsetWithoutHeldPhase();
+        const double most = Fluids.Water.SupersaturatedWater.MostMoisture;
+        if (c.Expansion == ExpansionModel.Supersaturated && c.Onset.Fraction is < double.PositiveInfinity and > most) throw Refusals.OnsetBeyondEquation(c.Onset.Fraction, most);
     }
 
     private static DeviceAnswer Assemble(DeviceCase c, Inlet inlet, NozzleGeometryReader geometry, in NozzleRating rating, bool ownApproach)
@@ -98,7 +106,7 @@ internal static class RatedNozzle
         List<string> assumptions = [];
         if (!ReferenceEquals(fluid, c.Fluid)) assumptions.Add("expansion: " + fluid.Formulation);
         if (geometry.ShapeWords.Length > 0) assumptions.Add(geometry.ShapeWords);
-        if (rating.AtKink && rating.Choked) assumptions.Add("the flux is greatest where the flow meets saturation, not where M = 1");
+        if (rating.AtKink && rating.Choked && ReferenceEquals(fluid, c.Fluid)) assumptions.Add("the flux is greatest where the flow meets saturation, not where M = 1");
         if (c.Back.Mask == 0) assumptions.Add("back pressure: the given exit pressure");
         if (sections) assumptions.Add(CoefficientWords(inlet, ownApproach));
         var answer = new DeviceAnswer
@@ -132,7 +140,9 @@ internal static class RatedNozzle
         ? "discharge coefficient: on the isentropic flow between the same pressures, with the approach velocity of that flow"
         : inlet.V > 0 ? "discharge coefficient: on the isentropic flow from the stagnation state of the inlet" : "discharge coefficient: on the isentropic flow from rest";
 
-    private static StationAnswer At(Fluid fluid, in FluidState state, double V, StationFigures section) => StationAnswer.From(fluid, state, V) with
+    // A state in equilibrium is slowed down in equilibrium.
+    private static StationAnswer At(Fluid fluid, in FluidState state, double V, StationFigures section) => StationAnswer.From(
+        (state.Notices & Notices.Metastable) == 0 ? fluid.Relaxed : fluid, state, V) with
     {
         Openings = section.Openings,
         Area = section.Has(Figure.Section) ? section[Figure.Section] : null,

@@ -38,7 +38,7 @@ internal static class ShockPosition
 
         internal double Of(in ShockAnswer shock)
         {
-            if (inlet.Fluid.FromPS(back, shock.Downstream.s, shock.Downstream, out FluidState ideal) != Outcome.Ok) return double.NegativeInfinity;
+            if (inlet.Fluid.Relaxed.FromPS(back, shock.Downstream.s, shock.Downstream, out FluidState ideal) != Outcome.Ok) return double.NegativeInfinity;
             double share = (shock.AreaRatio - 1) / ((geometry.ExitArea / geometry.ThroatArea) - 1);
             double efficiency = 1 - ((1 - geometry.Efficiency) * Math.Clamp(1 - share, 0, 1));
             return (efficiency * (inlet.h0 - ideal.h)) - (exitVelocity * exitVelocity / 2);
@@ -49,7 +49,7 @@ internal static class ShockPosition
             shock = default;
             if (_path.At(p, limits.Throat, out FluidState before, out double V) != Outcome.Ok) return false;
             double area = _throatFlux * before.v / V;
-            if (!NormalShock.TryFind(inlet.Fluid, before, V, out FluidState behind, out double V2)) (behind, V2) = (before, V);
+            if (!NormalShock.TryFind(inlet.Fluid.Relaxed, before, V, out FluidState behind, out double V2)) (behind, V2) = (before, V);
             shock = new ShockAnswer(before, V, behind, V2, area);
             return true;
         }

@@ -3,12 +3,13 @@ namespace FlowDuct.Fluids.Water;
 /// <summary>Liquid that does not flash: IAPWS R7-97(2012), Eq. (7), below its saturation pressure, which the release calls usable close to it.</summary>
 internal sealed class UnflashedWater : HeldPhase
 {
-    private UnflashedWater()
+    internal UnflashedWater(Onset onset)
+        : base(onset)
     {
     }
 
-    /// <summary>The one instance; it holds no state.</summary>
-    internal static UnflashedWater Instance { get; } = new();
+    /// <summary>Held to the end of its equation.</summary>
+    internal static UnflashedWater Instance { get; } = new(Onset.AtTheEnd);
 
     public override string Formulation => "IAPWS R7-97(2012); below saturation liquid that does not flash, Eq. (7)";
 
@@ -21,4 +22,6 @@ internal sealed class UnflashedWater : HeldPhase
     protected override RegionState Equation(double p, double T) => Region1.State(p, T);
 
     protected override Outcome Check(in RegionState at) => at.T <= WaterConstants.T13 && at.T >= WaterConstants.TLeast ? Outcome.Ok : Outcome.PairTooLow;
+
+    protected override double OtherPhase(in SaturatedPair pair, double h) => (h - pair.Liquid.h) / (pair.Vapour.h - pair.Liquid.h);
 }

@@ -97,12 +97,12 @@ public sealed class WaterFluid : Fluid
         return true;
     }
 
-    internal override bool TryHeld(in FluidState at, [NotNullWhen(true)] out Fluid? held)
+    internal override bool TryHeld(in FluidState at, in Onset onset, [NotNullWhen(true)] out Fluid? held)
     {
         held = at.Phase switch
         {
-            Phase.Liquid or Phase.SaturatedLiquid => UnflashedWater.Instance,
-            Phase.SuperheatedVapour or Phase.SaturatedVapour or Phase.Supercritical => SupersaturatedWater.Instance,
+            Phase.Liquid or Phase.SaturatedLiquid => onset == Onset.AtTheEnd ? UnflashedWater.Instance : new UnflashedWater(onset),
+            Phase.SuperheatedVapour or Phase.SaturatedVapour or Phase.Supercritical => onset == Onset.AtTheEnd ? SupersaturatedWater.Instance : new SupersaturatedWater(onset),
             _ => null,
         };
         return held is not null;
