@@ -10,6 +10,9 @@ internal static class FluxRoot
     // Of the flux: what the closure of the property calls leaves.
     private const double Closure = 1e-13;
 
+    // A Newton step that gains less than this is no such step.
+    private const double Halved = 0.5;
+
     // A slow stream is a small difference of large enthalpies.
     private static double Rounding(double h0, double V) => 1e-9 + (1e-13 * Math.Max(Math.Abs(h0), 1e5) / (V * V));
 
@@ -19,6 +22,7 @@ internal static class FluxRoot
         double more = Math.Log(pMore), less = Math.Log(pLess), x = Math.Log(start);
         state = default;
         V = 0;
+        double before = double.PositiveInfinity;
         for (int i = 0; i < MostSteps; i++)
         {
             if (!(x > Math.Min(more, less) && x < Math.Max(more, less))) x = (more + less) / 2;
@@ -30,10 +34,12 @@ internal static class FluxRoot
             else less = x;
             if (Math.Abs(more - less) <= 4e-16 * Math.Abs(x)) return Math.Abs(excess) < Rounding(path.h0, V);
 
-            // On an isentrope d ln G = p v (1/w^2 - 1/V^2) d ln p; a loss bends it little.
+            // On an isentrope d ln G = p v (1/w^2 - 1/V^2) d ln p; a loss bends it little, but near the greatest flux enough to turn its sign.
             double slope = outcome == Outcome.Ok && speed > 0 ? at.p * at.v * ((1 / (at.w * at.w)) - (1 / (speed * speed))) : 0;
             double next = x - (Math.Log(flux / target) / slope);
-            x = double.IsFinite(next) ? next : (more + less) / 2;
+            bool slow = Math.Abs(excess) > Halved * before;
+            before = Math.Abs(excess);
+            x = double.IsFinite(next) && !slow ? next : (more + less) / 2;
         }
 
         return false;
