@@ -18,7 +18,7 @@ public class JsonSchemaTests
     [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --exit \"p=3 bar\"")]
     [InlineData("flowduct nozzle --fluid steam --inlet \"p=9 bar, T=230 degC\" --exit \"p=3.2 bar, T=135.7 degC\"")]
     [InlineData("flowduct nozzle --fluid steam --inlet \"p=9 bar, T=230 degC, V=25 m/s\" --exit \"p=3.2 bar, V=900 m/s\"")]
-    [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --throat \"d=18 mm\" --exit \"d=25 mm\" --back \"p=5 bar\" --path 9")]
+    [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --throat \"d=18 mm\" --exit \"d=25 mm\" --back \"p=5 bar\" --path 9 --show \"rho, p/p0\"")]
     [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --throat \"d=18 mm\" --exit \"d=25 mm\" --back \"p=1 bar\"")]
     [InlineData("flowduct nozzle --fluid steam --inlet \"p0=9 bar, x=1\" --throat \"d=18 mm\" --back \"p=1 bar\" --expansion supersaturated")]
     [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --throat \"d=18 mm\" --find back.p --target \"exit.V=200 m/s\"")]

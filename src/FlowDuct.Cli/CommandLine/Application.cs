@@ -81,10 +81,10 @@ internal static class Application
         AnswerFormat format = RenderBinder.Format(binder);
         DeviceCase c = binder.Device(arguments.Command == CommandName.Nozzle ? DeviceKind.Nozzle : DeviceKind.Diffuser);
         DeviceAnswer answer = binder.Question() is InverseQuestion question ? question.Answer(c, binder.RootNumber) : DeviceSolver.Solve(c);
-        IReadOnlyList<PathPoint>? path = PathBinder.Read(arguments, answer);
+        PathTable? path = PathBinder.Read(arguments, answer, options);
         if (format == AnswerFormat.Csv && path is null) throw Usage.Refuse("--format", "csv holds the states along a nozzle, and none are asked for", "add --path, for example --path 21");
         if (format == AnswerFormat.Json) JsonAnswer.Write(memory, answer, path, options);
-        else if (format == AnswerFormat.Csv) Text(memory, to => PathTable.Csv(to, path!, answer.ExpandingFluid, options));
+        else if (format == AnswerFormat.Csv) Text(memory, to => path!.Csv(to, options));
         else Text(memory, to => TextAnswer.Write(to, answer, path, options));
         return answer.Passes(options.Strict) ? ExitStatus.Passed : ExitStatus.Failed;
     }

@@ -36,6 +36,7 @@ internal static class OptionTable
         new("--branch", "BRANCH", "subsonic or supersonic, where two exits have the same figures; a number, where --find has several answers.", "subsonic", CommandName.Devices),
         new("--path", "N", "States in N sections from inlet to exit, of a nozzle given by its sections.", "21", CommandName.Nozzle),
         new("--wall", "FILE", "Sections of your own instead: a CSV with the columns position [unit], diameter [unit].", "wall.csv", CommandName.Nozzle),
+        new("--show", "LIST", "More columns of the states along a nozzle: quantities of a station, or p/p0, T/T0, rho/rho0, A/At.", "\"rho, p/p0\"", CommandName.Nozzle, OfTheCase: false),
         new("--format", "FORMAT", "text (the default), json (coherent SI whatever the units); with --path or --wall also csv.", "json", CommandName.Answering | CommandName.SelfCheck, OfTheCase: false),
         new("--output", "FILE", "Write to a file, whole or not at all.", "answer.txt", CommandName.Answering | CommandName.SelfCheck, OfTheCase: false),
         new("--units", "SYSTEM", "metric (the default) or us.", "us", CommandName.Answering, OfTheCase: false),

@@ -10,7 +10,7 @@ namespace FlowDuct.Cli.Rendering;
 /// <summary>The answer of a device as JSON: coherent SI whatever the display units, stable key order.</summary>
 internal static class JsonAnswer
 {
-    internal static void Write(Stream to, DeviceAnswer answer, IReadOnlyList<PathPoint>? path, RenderOptions options)
+    internal static void Write(Stream to, DeviceAnswer answer, PathTable? path, RenderOptions options)
     {
         using var json = new Utf8JsonWriter(to, JsonNumbers.Options);
         json.WriteStartObject();
@@ -22,7 +22,7 @@ internal static class JsonAnswer
         JsonStation.Write(json, "throat", answer.Fluid, answer.Throat);
         JsonStation.Write(json, "exit", answer.Fluid, answer.Exit);
         json.WriteEndObject();
-        PathTable.Json(json, path, answer.ExpandingFluid);
+        PathTable.Json(json, path);
         JsonPerformance.Write(json, answer.Performance);
         Ledger(json, answer.Ledger);
         Laws(json, answer.Audit);

@@ -1,76 +1,54 @@
 using System.Globalization;
 using System.Text.Json;
-using FlowDuct.Devices;
 using FlowDuct.Devices.Rating;
-using FlowDuct.Fluids;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Cli.Rendering;
 
-/// <summary>The states along a nozzle as text table, CSV and JSON: position, area, p, T, V, M, x.</summary>
-internal static class PathTable
+/// <summary>The states along a nozzle as text table, CSV and JSON.</summary>
+/// <param name="Points">The sections.</param>
+/// <param name="Columns">What is shown of each.</param>
+internal sealed record PathTable(IReadOnlyList<PathPoint> Points, IReadOnlyList<PathColumn> Columns)
 {
     // As many as a plant drawing or a plot needs.
     private const int CsvDigits = 7;
 
-    private static readonly string[] s_keys = ["p", "T", "V", "M", "x"];
-
-    internal static void Text(TextWriter to, IReadOnlyList<PathPoint> points, Fluid fluid, RenderOptions options)
+    internal void Text(TextWriter to, RenderOptions options)
     {
         var table = new TextTable("path");
-        UnitReading length = options.Units.UnitOf(Dimension.Length), area = options.Units.UnitOf(Dimension.Area);
-        table.Column("position", length.Spelling);
-        table.Column("A", area.Spelling);
-        foreach (string key in s_keys)
-        {
-            UnitReading unit = TextFigures.UnitOf(key, options);
-            table.Column(key, unit.Dimension == Dimension.Ratio ? "-" : unit.Spelling);
-        }
-
+        foreach (PathColumn column in Columns) table.Column(column.Name, column.Unit.Dimension == Dimension.Ratio ? "-" : column.Unit.Spelling);
         int row = 0;
-        foreach (PathPoint point in points)
+        foreach (PathPoint point in Points)
         {
             row++;
-            table.Row(
-                row.ToString(CultureInfo.InvariantCulture),
-                [
-                    TextFigures.Number(point.Position, length, options), TextFigures.Number(point.Area, area, options),
-                    .. s_keys.Select(key => TextFigures.Number(StationFigureTable.Read(fluid, point.At, key), TextFigures.UnitOf(key, options), options)),
-                ]);
+            table.Row(row.ToString(CultureInfo.InvariantCulture), [.. Columns.Select(column => TextFigures.Number(column.Read(point), column.Unit, options))]);
         }
 
         to.WriteLine();
         table.Write(to);
     }
 
-    internal static void Csv(TextWriter to, IReadOnlyList<PathPoint> points, Fluid fluid, RenderOptions options)
+    internal void Csv(TextWriter to, RenderOptions options)
     {
-        UnitReading length = options.Units.UnitOf(Dimension.Length), area = options.Units.UnitOf(Dimension.Area);
-        UnitReading[] units = [length, area, .. s_keys.Select(key => TextFigures.UnitOf(key, options))];
-        string[] names = ["position", "A", .. s_keys];
-        to.WriteLine(string.Join(',', names.Select((name, i) => units[i].Dimension == Dimension.Ratio ? name : $"{name} [{Basis(units[i])}]")));
-        foreach (PathPoint point in points)
-        {
-            double?[] values = [point.Position, point.Area, .. s_keys.Select(key => StationFigureTable.Read(fluid, point.At, key))];
-            to.WriteLine(string.Join(',', values.Select((value, i) => value is double number ? options.Units.Number(number, units[i], options.Digits ?? CsvDigits) : string.Empty)));
-        }
+        to.WriteLine(string.Join(',', Columns.Select(column => column.Unit.Dimension == Dimension.Ratio ? column.Name : $"{column.Name} [{Basis(column.Unit)}]")));
+        foreach (PathPoint point in Points)
+            to.WriteLine(string.Join(',', Columns.Select(column => column.Read(point) is double number ? options.Units.Number(number, column.Unit, options.Digits ?? CsvDigits) : string.Empty)));
     }
 
-    internal static void Json(Utf8JsonWriter json, IReadOnlyList<PathPoint>? points, Fluid fluid)
+    /// <summary>In coherent SI; null where no path is asked for.</summary>
+    internal static void Json(Utf8JsonWriter json, PathTable? path)
     {
-        if (points is null)
+        if (path is null)
         {
             json.WriteNull("path");
             return;
         }
 
         json.WriteStartArray("path");
-        foreach (PathPoint point in points)
+        foreach (PathPoint point in path.Points)
         {
             json.WriteStartObject();
-            JsonNumbers.Write(json, "position", point.Position);
-            JsonNumbers.Write(json, "A", point.Area);
-            foreach (string key in s_keys) JsonNumbers.Write(json, key, StationFigureTable.Read(fluid, point.At, key));
+            foreach (PathColumn column in path.Columns) JsonNumbers.Write(json, column.Name, column.Read(point));
             json.WriteEndObject();
         }
 

@@ -16,7 +16,7 @@ internal static class TextAnswer
     private static readonly string[] s_static = ["p", "T", "x", "h", "s", "V", "M"];
     private static readonly string[] s_stagnation = ["p0", "T0", "rho", "w", "A", "d"];
 
-    internal static void Write(TextWriter to, DeviceAnswer answer, IReadOnlyList<PathPoint>? path, RenderOptions options)
+    internal static void Write(TextWriter to, DeviceAnswer answer, PathTable? path, RenderOptions options)
     {
         to.WriteLine($"{(answer.Case.Device == DeviceKind.Nozzle ? "nozzle" : "diffuser")}, {answer.Fluid.Name}");
         to.WriteLine();
@@ -27,7 +27,7 @@ internal static class TextAnswer
         Device(to, answer, options);
         Energy(to, answer, options);
         Laws(to, answer, options);
-        if (path is not null) PathTable.Text(to, path, answer.ExpandingFluid, options);
+        path?.Text(to, options);
         Findings(to, answer.Findings, options);
         Assumed(to, answer, options);
         to.WriteLine();
