@@ -65,6 +65,18 @@ ask 0 'DF-4110: recovery, efficiency and loss from a measured rise and velocity'
 ask 1 'DF-4120: the vendor quotes more recovery than the second law allows' \
     diffuser --fluid air --inlet 'p=1013 mbar, T=64 degC, V=47 m/s' --exit 'V=24 m/s' --recovery 0.86
 
+ask 0 'DF-4130: fan outlet cone 355 to 500 mm, 1.02 m long: what comes back, and is it short of stall?' \
+    diffuser --fluid air --inlet 'p=4.2 inH2O(g), T=31 degC, V=28 m/s, d=355 mm' --exit 'd=500 mm' --length '1.02 m' \
+    --loss-coefficient idelchik --inlet-blockage 6% --show-in 'p=inH2O(g), dp=Pa' --ambient 'p=0.973 bar, T=24 degC'
+
+ask 0 'DF-4140: duct transition 420x600 to 800x600 mm in 0.6 m: past stall' \
+    diffuser --fluid air --inlet 'p=180 Pa(g), T=31 degC, V=17 m/s, rect=420x600 mm' --exit 'rect=800x600 mm' --length '0.6 m' \
+    --loss-coefficient best-planar --inlet-blockage 8% --ambient 'p=0.973 bar, T=24 degC'
+
+ask 0 'FE-3320: a throat of 46 mm with recovery in the same line: flow, what the reading costs, and when it chokes' \
+    venturi --fluid air --inlet 'p=6.85 barg, T=38 degC, d=102.3 mm' --throat 'd=46 mm, dp=62 kPa' --exit 'd=102.3 mm' \
+    --discharge-coefficient iso5167-venturi-machined --loss-coefficient idelchik --included-angle '10 deg' --ambient 'p=0.973 bar, T=24 degC'
+
 ask 3 'NZ-2107 again: pressure and temperature on the saturation line do not name an inlet' \
     nozzle --fluid steam --inlet 'p=6.4 bar, T=161.4 degC' --exit 'p=2.1 bar'
 

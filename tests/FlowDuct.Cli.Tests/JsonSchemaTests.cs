@@ -21,6 +21,9 @@ public class JsonSchemaTests
     [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --throat \"d=18 mm\" --exit \"d=25 mm\" --back \"p=5 bar\" --path 9 --show \"rho, p/p0\"")]
     [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --throat \"d=18 mm\" --exit \"d=25 mm\" --back \"p=1 bar\"")]
     [InlineData("flowduct nozzle --fluid steam --inlet \"p0=9 bar, x=1\" --throat \"d=18 mm\" --back \"p=1 bar\" --expansion supersaturated")]
+    [InlineData("flowduct diffuser --fluid air --inlet \"p=1 bar, T=300 K, M=2, d=100 mm\" --exit \"d=150 mm\" --included-angle \"8 deg\" --inlet-blockage 4%")]
+    [InlineData("flowduct diffuser --fluid water --inlet \"p=2 bar, T=300 K, V=8 m/s, d=100 mm\" --exit \"d=150 mm\" --included-angle \"8 deg\" --loss-coefficient idelchik")]
+    [InlineData("flowduct venturi --fluid air --inlet \"p=6 bar, T=40 degC, d=100 mm\" --throat \"d=60 mm, dp=25 kPa\" --exit \"d=100 mm\" --loss-coefficient 0.1")]
     [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --throat \"d=18 mm\" --find back.p --target \"exit.V=200 m/s\"")]
     [InlineData("flowduct diffuser --fluid air --inlet \"p=14.2 psi, T=70 degF, V=540 ft/s\" --exit \"V=120 ft/s\" --recovery 0.72")]
     public void An_answer_keeps_the_schema(string line)

@@ -79,7 +79,7 @@ internal static class Application
         var binder = new CaseBinder(arguments);
         RenderOptions options = RenderBinder.Bind(arguments, binder, terminal);
         AnswerFormat format = RenderBinder.Format(binder);
-        DeviceCase c = binder.Device(arguments.Command == CommandName.Nozzle ? DeviceKind.Nozzle : DeviceKind.Diffuser);
+        DeviceCase c = binder.Device(arguments.Command switch { CommandName.Nozzle => DeviceKind.Nozzle, CommandName.Diffuser => DeviceKind.Diffuser, _ => DeviceKind.Venturi });
         DeviceAnswer answer = binder.Question() is InverseQuestion question ? question.Answer(c, binder.RootNumber) : DeviceSolver.Solve(c);
         PathTable? path = PathBinder.Read(arguments, answer, options);
         if (format == AnswerFormat.Csv && path is null) throw Usage.Refuse("--format", "csv holds the states along a nozzle, and none are asked for", "add --path, for example --path 21");

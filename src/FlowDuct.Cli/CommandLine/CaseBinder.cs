@@ -1,6 +1,7 @@
 using System.Globalization;
 using FlowDuct.Devices;
 using FlowDuct.Devices.Coefficients;
+using FlowDuct.Devices.Diffusers;
 using FlowDuct.Devices.Inverse;
 using FlowDuct.Errors;
 using FlowDuct.Fluids;
@@ -54,7 +55,7 @@ internal sealed class CaseBinder
         if (_arguments.Has("--exit")) Fill(ref exit, "--exit", Station.Exit);
         if (_arguments.Has("--throat")) Fill(ref throat, "--throat", Station.Throat);
         if (_arguments.Has("--back")) Fill(ref back, "--back", StationLists.Back);
-        (GivenSlots options, bool flowIsVolume, bool onsetIsDifference) = Options(fluid);
+        (GivenSlots options, bool flowIsVolume, bool onsetIsDifference) = Options(fluid, kind != DeviceKind.Nozzle);
         var c = new DeviceCase
         {
             Device = kind,
@@ -65,6 +66,7 @@ internal sealed class CaseBinder
             Expansion = Choice(
                 "--expansion", ExpansionModel.Equilibrium, ("equilibrium", ExpansionModel.Equilibrium), ("supersaturated", ExpansionModel.Supersaturated),
                 ("single-phase", ExpansionModel.SinglePhase)),
+            LossWord = kind != DeviceKind.Nozzle ? LossWord : null,
             RecoveryBasis = Choice("--recovery-basis", RecoveryBasis.Stagnation, ("stagnation", RecoveryBasis.Stagnation), ("dynamic", RecoveryBasis.Dynamic)),
             AmbientPressure = AmbientPressure,
             AmbientTemperature = AmbientTemperature,
@@ -88,6 +90,15 @@ internal sealed class CaseBinder
         {
             if (_arguments.Value("--discharge-coefficient") is not string text || text.Length == 0 || !char.IsAsciiLetter(text[0])) return null;
             return DischargeCorrelation.Find(text) ?? throw Usage.NotOneOf("--discharge-coefficient", text, ["a number", .. DischargeCorrelation.All.Select(row => row.Name)]);
+        }
+    }
+
+    private string? LossWord
+    {
+        get
+        {
+            if (_arguments.Value("--loss-coefficient") is not string text || text.Length == 0 || !char.IsAsciiLetter(text[0])) return null;
+            return DiffuserLoss.Words.Contains(text) ? text : throw Usage.NotOneOf("--loss-coefficient", text, ["a number", .. DiffuserLoss.Words]);
         }
     }
 
@@ -152,12 +163,12 @@ internal sealed class CaseBinder
     {
         foreach (StationItem item in StationListParser.Parse(option, list, _arguments.Value(option)!, AmbientPressure))
         {
-            slots.Set((int)item.Slot, item.Value.Si, item.Value.HalfWidth);
+            slots.Set(item);
             _usesGauge |= item.Value.WasGauge;
         }
     }
 
-    private (GivenSlots Options, bool FlowIsVolume, bool OnsetIsDifference) Options(Fluid fluid)
+    private (GivenSlots Options, bool FlowIsVolume, bool OnsetIsDifference) Options(Fluid fluid, bool isDiffuser)
     {
         GivenSlots slots = default;
         bool volume = false, difference = false;
@@ -165,7 +176,7 @@ internal sealed class CaseBinder
         {
             string name = "--" + row.Word;
             if (row.OptionSlot is not CaseOption option || _arguments.Value(name) is not string text) continue;
-            if (option == CaseOption.DischargeCoefficient && Correlation is not null) continue;
+            if ((option == CaseOption.DischargeCoefficient && Correlation is not null) || (option == CaseOption.LossCoefficient && isDiffuser && LossWord is not null)) continue;
             GivenValue value = ValueParser.Parse(name, row, text, AmbientPressure);
             double size = option switch
             {

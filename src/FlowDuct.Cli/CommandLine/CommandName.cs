@@ -25,8 +25,17 @@ internal enum CommandName
     /// <summary>The printed check values of the formulations, computed here.</summary>
     SelfCheck = 32,
 
-    /// <summary>Both devices.</summary>
-    Devices = Nozzle | Diffuser,
+    /// <summary>A nozzle followed by a diffuser.</summary>
+    Venturi = 64,
+
+    /// <summary>Every device.</summary>
+    Devices = Nozzle | Diffuser | Venturi,
+
+    /// <summary>The devices with a convergence.</summary>
+    Convergent = Nozzle | Venturi,
+
+    /// <summary>The devices with a subsonic divergence.</summary>
+    Divergent = Diffuser | Venturi,
 
     /// <summary>All that answer with numbers.</summary>
     Answering = State | Devices,

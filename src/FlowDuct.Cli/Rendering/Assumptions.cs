@@ -1,5 +1,6 @@
 using FlowDuct.Devices;
 using FlowDuct.Devices.Coefficients;
+using FlowDuct.Devices.Diffusers;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Cli.Rendering;
@@ -14,9 +15,18 @@ internal static class Assumptions
         if (answer.Fluid.HasSaturation && answer.Exit.State.Phase == Fluids.Phase.Wet) yield return "wet states: one homogeneous mixture at equilibrium";
         if (answer.Case.DischargeCorrelation is DischargeCorrelation row && ThroatFlow.Of(answer) is ThroatFlow throat)
             yield return $"discharge coefficient: {row.Description}, {row.Standing}, uncertainty {text.Text(row.UncertaintyAt(throat), Dimension.Ratio, 2)}";
+        foreach (string line in OfLoss(answer, text)) yield return line;
         foreach (string line in answer.Assumptions) yield return line;
         if (answer.Performance.Thrust is not null && answer.Exit.Mach >= 1) yield return answer.BackPressure is null ? "thrust: against the ambient pressure" : "thrust: against the back pressure";
         if (!answer.Case.AmbientGiven || answer.Case.AmbientAltitude is { GivesPressure: true } or { GivesTemperature: true }) yield return AmbientWords(answer.Case, text);
+    }
+
+    private static IEnumerable<string> OfLoss(DeviceAnswer answer, IQuantityText text)
+    {
+        if (answer.Case.LossWord == DiffuserLoss.Sudden) yield return "loss coefficient: a sudden expansion, by the balance of momentum";
+        if (answer.Diffuser is not { Loss: double K } diffuser || DiffuserLoss.Find(answer.Case.LossWord!) is not DiffuserLoss row) yield break;
+        yield return $"loss coefficient: {row.Description}, {row.Standing}; the recovery may be {text.Text(row.Worse(K), Dimension.Ratio, 2)} less or {text.Text(row.Better(K), Dimension.Ratio, 2)} more";
+        if (!diffuser.FrictionKnown) yield return $"Darcy friction factor: {text.Text(diffuser.Friction, Dimension.Ratio, 2)}, since no Reynolds number is known";
     }
 
     private static string AmbientWords(DeviceCase c, IQuantityText text) =>

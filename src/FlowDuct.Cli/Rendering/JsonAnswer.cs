@@ -38,7 +38,7 @@ internal static class JsonAnswer
         json.WriteStartObject("case");
         json.WriteNull("tag");
         json.WriteNull("name");
-        json.WriteString("device", c.Device == DeviceKind.Nozzle ? "nozzle" : "diffuser");
+        json.WriteString("device", DeviceWords.Of(c.Device));
         json.WriteString("fluid", c.Fluid.Name);
         json.WriteStartObject("given");
         JsonHead.Given(json, "inlet.", c.Inlet);

@@ -18,7 +18,7 @@ internal static class TextAnswer
 
     internal static void Write(TextWriter to, DeviceAnswer answer, PathTable? path, RenderOptions options)
     {
-        to.WriteLine($"{(answer.Case.Device == DeviceKind.Nozzle ? "nozzle" : "diffuser")}, {answer.Fluid.Name}");
+        to.WriteLine($"{DeviceWords.Of(answer.Case.Device)}, {answer.Fluid.Name}");
         to.WriteLine();
         Stations(to, answer, options, "static", s_static);
         to.WriteLine();
@@ -87,10 +87,11 @@ internal static class TextAnswer
     {
         "isentropic_efficiency" when answer.EfficiencyImplied => "   implied by the figures",
         "isentropic_efficiency" when answer.TakenIdeal => "   assumed",
-        "isentropic_efficiency" when answer.Case.Has(CaseOption.Efficiency) => "   given",
+        "isentropic_efficiency" when answer.Case.Has(CaseOption.Efficiency) && answer.Diffuser?.Shock is null => "   given",
         "discharge_coefficient" when answer.Case.DischargeCorrelation is not null => "   by correlation",
         "discharge_coefficient" when answer.Case.Has(CaseOption.DischargeCoefficient) => "   given",
-        "discharge_coefficient" when answer.Case.Has(CaseOption.Flow) => "   implied by the flow",
+        "discharge_coefficient" when answer.Case.Has(CaseOption.Flow) && answer.Case.Device == DeviceKind.Nozzle => "   implied by the flow",
+        "loss_coefficient" when answer.Diffuser?.Loss is not null && answer.Diffuser.Shock is null => "   estimated",
         "recovery" when answer.Case.Has(CaseOption.Recovery) => "   given",
         _ => string.Empty,
     };

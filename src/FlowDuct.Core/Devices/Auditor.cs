@@ -49,7 +49,7 @@ internal static class Auditor
         };
     }
 
-    private static bool Implied(DeviceAnswer a) => !a.Case.Has(CaseOption.DischargeCoefficient) && !a.Case.FlowIsVolume;
+    private static bool Implied(DeviceAnswer a) => !a.Case.Has(CaseOption.DischargeCoefficient);
 
     private static double? Surplus(DeviceAnswer a)
     {
@@ -62,7 +62,7 @@ internal static class Auditor
     {
         bool inlet = station == Station.Inlet;
         GivenSlots slots = inlet ? a.Case.Inlet : a.Case.Exit;
-        if (!slots.Has((int)StationSymbol.Area) && !slots.Has((int)StationSymbol.Diameter)) return audit;
+        if (!StationFigures.HaveSection(slots)) return audit;
         if (Carried(inlet ? a.Inlet : a.Exit) is not double carried) return audit;
         double gap = Math.Abs(carried - flow);
         if (gap <= FlowClosure * flow) return audit;

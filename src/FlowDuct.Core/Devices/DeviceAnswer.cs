@@ -40,6 +40,15 @@ internal sealed record DeviceAnswer : IStations
     /// <summary>The rating behind the answer, where sections and a back pressure were given; else null.</summary>
     internal Rating.NozzleRating? Rating { get; init; }
 
+    /// <summary>Form, shock and loss of a diffuser; null of a nozzle.</summary>
+    internal Diffusers.DiffuserAnswer? Diffuser { get; init; }
+
+    /// <summary>The divergence of a venturi as a diffuser from the throat on; null of other devices.</summary>
+    internal DeviceAnswer? Divergence { get; init; }
+
+    /// <summary>True where a back pressure below that of choking fixes the exit of a venturi.</summary>
+    internal bool BackFixesExit { get; init; }
+
     /// <summary>The figure that was found for a target; null where none was asked for.</summary>
     internal Inverse.FoundFigure? Found { get; init; }
 

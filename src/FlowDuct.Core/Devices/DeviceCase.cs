@@ -11,6 +11,20 @@ internal enum DeviceKind
 
     /// <summary>A duct that slows the flow down and raises its pressure.</summary>
     Diffuser,
+
+    /// <summary>A nozzle followed by a diffuser.</summary>
+    Venturi,
+}
+
+/// <summary>The words of the devices, as in commands, answers and datasheets.</summary>
+internal static class DeviceWords
+{
+    internal static string Of(DeviceKind device) => device switch
+    {
+        DeviceKind.Nozzle => "nozzle",
+        DeviceKind.Diffuser => "diffuser",
+        _ => "venturi",
+    };
 }
 
 /// <summary>The form of a nozzle.</summary>
@@ -83,6 +97,9 @@ internal sealed record DeviceCase
 
     /// <summary>The correlation that gives the discharge coefficient; null where a number or none is given.</summary>
     internal Coefficients.DischargeCorrelation? DischargeCorrelation { get; init; }
+
+    /// <summary>The word of a correlation or balance that gives the loss of a diffuser; null where a number or none is given.</summary>
+    internal string? LossWord { get; init; }
 
     internal RecoveryBasis RecoveryBasis { get; init; }
 

@@ -25,14 +25,23 @@ internal static class DeviceSolver
     internal static DeviceAnswer Stations(DeviceCase c)
     {
         if (c.Has(CaseOption.Heat) && c.Has(CaseOption.HeatLoss)) throw Refusals.HeatTwice();
+        if (c.Device == DeviceKind.Venturi) return Venturis.VenturiSolver.Stations(c);
         if (Rating.NozzleGeometryReader.Asks(c)) return Rating.RatedNozzle.Solve(c);
         if (c.DischargeCorrelation is not null) throw Refusals.CorrelationWithoutBack();
         if (c.Expansion != ExpansionModel.Equilibrium) throw Refusals.ExpansionWithoutSections();
         if (c.Has(CaseOption.Onset)) throw Refusals.OnsetWithoutHeldPhase();
         Inlet inlet = Inlet.Solve(c);
-        if (c.Device == DeviceKind.Diffuser && inlet.V == 0) throw Refusals.DiffuserAtRest();
         if (inlet.Station.Stagnation is null) throw Refusals.NoSuchInlet(inlet.Given.Given);
-        StationFigures given = ExitFigures.Read(c, inlet);
+        return c.Device == DeviceKind.Diffuser ? Diffusers.DiffuserSolver.Stations(c, inlet) : Expand(c, inlet, inlet, ExitFigures.Read(c, inlet));
+    }
+
+    /// <summary>The exit from its figures.</summary>
+    /// <param name="c">The case.</param>
+    /// <param name="inlet">The inlet.</param>
+    /// <param name="passed">The station from which the exit is reached: the inlet, or what lies behind a shock in it.</param>
+    /// <param name="given">The figures of the exit and its loss.</param>
+    internal static DeviceAnswer Expand(DeviceCase c, Inlet inlet, Inlet passed, StationFigures given)
+    {
         double gravity = c.ValueOr(CaseOption.Gravity, Energy.StandardGravity);
         double h0 = inlet.Station.StagnationEnthalpy!.Value + c.Heat + (gravity * (inlet.Given.Elevation - given.Elevation));
         if (ReadsSaturation(c, given))
@@ -40,13 +49,16 @@ internal static class DeviceSolver
 
         (ExitRecipe recipe, bool sectionUsed) = Recipe(c, inlet, given);
         double flux = sectionUsed ? inlet.MassFlow!.Value / (given[Figure.Section] * given.Openings) : 0;
-        var context = new ExitContext(c.Device, c.Fluid, given, inlet, h0, flux, c.Branch);
+        var context = new ExitContext(c.Device, c.Fluid, given, passed, h0, flux, c.Branch);
         FluidState state = recipe.Solve(context);
         StationAnswer exit = state.h - h0 > EnergyFloor(h0)
             ? new StationAnswer { State = state }
             : StationAnswer.From(c.Fluid, state, Energy.Velocity(h0, state.h));
         return Assemble(c, inlet, given, exit, recipe, saturated: false);
     }
+
+    /// <summary>True where the figures of the exit imply its loss, rather than take it as given or as none.</summary>
+    internal static bool Implies(DeviceCase c, Inlet inlet, StationFigures given) => ReadsSaturation(c, given) || Recipe(c, inlet, given).Recipe.Implies;
 
     // Below this two enthalpies are the same number: the closure of the property inverses.
     internal static double EnergyFloor(double h0) => 1e-10 * Math.Max(Math.Abs(h0), 1e3);
@@ -99,6 +111,6 @@ internal static class DeviceSolver
         if (a.Exit.Velocity is not double V2 || !a.Exit.HasState) return null;
         double V1 = a.Inlet.Velocity!.Value, g = a.Case.ValueOr(CaseOption.Gravity, Energy.StandardGravity);
         return new Ledger(
-            a.Inlet.State.h, V1 * V1 / 2, g * a.Inlet.Elevation, a.Case.Heat, a.Exit.State.h, V2 * V2 / 2, g * a.Exit.Elevation);
+            a.Inlet.State.h, a.Inlet.KineticEnergyCoefficient * V1 * V1 / 2, g * a.Inlet.Elevation, a.Case.Heat, a.Exit.State.h, V2 * V2 / 2, g * a.Exit.Elevation);
     }
 }

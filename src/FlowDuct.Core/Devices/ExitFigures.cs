@@ -8,7 +8,7 @@ internal static class ExitFigures
 {
     internal static StationFigures Read(DeviceCase c, Inlet inlet)
     {
-        StationFigures given = StationFigures.Read(c.Exit, Station.Exit);
+        StationFigures given = StationFigures.Read(c.Exit, Station.Exit, c.Inlet);
         if (given.Has(Figure.T0)) throw Refusals.FixedByEnergy("T0");
         if (given.Has(Figure.H0)) throw Refusals.FixedByEnergy("h0");
         foreach (double p in RelativePressures.Read("--exit", c.Exit, inlet.State.p, inlet.Station.Stagnation!.Value.p)) given.Add(Figure.P, p, Station.Exit);

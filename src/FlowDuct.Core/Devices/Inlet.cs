@@ -27,7 +27,9 @@ internal sealed record Inlet(StationAnswer Station, StationFigures Given, double
 
         Outcome outcome = recipe.Solve(c.Fluid, given, datum, out FluidState state, out double V);
         if (outcome != Outcome.Ok) throw Failure(c, given, outcome, datum);
-        StationAnswer station = StationAnswer.From(c.Fluid, state, V) with
+        double alpha = c.ValueOr(CaseOption.KineticEnergyCoefficient, 1);
+        if (alpha != 1 && (figures & Figures.Stagnation) != 0) throw Refusals.ProfileOfStagnation();
+        StationAnswer station = StationAnswer.From(c.Fluid, state, V, alpha) with
         {
             Elevation = given.Elevation,
             Openings = given.Openings,

@@ -19,7 +19,7 @@ internal static class NozzleThroat
         bool below = p2 < critical.p - band;
         bool heated = a.Case.Heat != 0;
         if (heated && (below || a.Exit.Mach >= 1)) throw Refusals.HeatWithChoking();
-        bool bore = a.Case.Exit.Has((int)StationSymbol.Area) || a.Case.Exit.Has((int)StationSymbol.Diameter);
+        bool bore = StationFigures.HaveSection(a.Case.Exit);
         NozzleShape shape = Shape(a.Case.Shape, bore, below);
         if (shape == NozzleShape.Convergent && below) throw Refusals.ConvergentBelowCritical(p2, critical.p);
         string? regime = Regime(a, below, p2 <= critical.p + band);

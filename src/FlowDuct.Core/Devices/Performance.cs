@@ -67,6 +67,14 @@ internal sealed record Performance
 
     internal double? LossCoefficient { get; init; }
 
+    internal double? PolytropicEfficiency { get; init; }
+
+    /// <summary>Figures that only a diffuser has.</summary>
+    internal Diffusers.DiffuserFigures? Diffuser { get; init; }
+
+    /// <summary>Figures that only a venturi has.</summary>
+    internal Venturis.VenturiFigures? Venturi { get; init; }
+
     internal double? Thrust { get; init; }
 
     internal double? AxialForce { get; init; }

@@ -29,7 +29,12 @@ internal static class Performances
             Thrust = Thrust(a, flow),
             AxialForce = AxialForce(a, flow),
         };
-        return a.Case.Device == DeviceKind.Nozzle ? NozzlePerformance.Add(a, performance) : DiffuserPerformance.Add(a, performance);
+        return a.Case.Device switch
+        {
+            DeviceKind.Nozzle => NozzlePerformance.Add(a, performance),
+            DeviceKind.Diffuser => DiffuserPerformance.Add(a, performance),
+            _ => Venturis.VenturiPerformance.Add(a, performance),
+        };
     }
 
     private static double? Sections(StationAnswer of, StationAnswer to) => of.Area * of.Openings / (to.Area * to.Openings);

@@ -12,7 +12,7 @@ internal static class Rounding
     internal static double Effect(DeviceCase c, Func<DeviceAnswer, double?> result, double now)
     {
         double sum = 0;
-        for (int slot = 0; slot < 32; slot++)
+        for (int slot = 0; slot < GivenSlots.Count; slot++)
         {
             sum += Of(c, result, now, slot, c.Inlet, (copy, value) => copy.Inlet.Set(slot, value));
             sum += Of(c, result, now, slot, c.Exit, (copy, value) => copy.Exit.Set(slot, value));

@@ -32,16 +32,19 @@ internal sealed record StationAnswer
     /// <summary>Bore of the circle with this area, m.</summary>
     internal double? Diameter => Area is double A ? Math.Sqrt(4 * A / Math.PI) : null;
 
-    internal double? StagnationEnthalpy => HasState && Velocity is double V ? State.h + (V * V / 2) : null;
+    /// <summary>Kinetic energy of the stream over that of its mean velocity; 1 of a uniform one.</summary>
+    internal double KineticEnergyCoefficient { get; init; } = 1;
+
+    internal double? StagnationEnthalpy => HasState && Velocity is double V ? State.h + (KineticEnergyCoefficient * V * V / 2) : null;
 
     /// <summary>Mass flux density, kg/(m2.s).</summary>
     internal double? Flux => HasState ? Velocity / State.v : null;
 
     /// <summary>A station from its state and velocity, with the stagnation state where the formulation holds it.</summary>
-    internal static StationAnswer From(Fluid fluid, in FluidState state, double V)
+    internal static StationAnswer From(Fluid fluid, in FluidState state, double V, double kineticEnergyCoefficient = 1)
     {
-        bool known = Flow.Stagnation.Of(fluid, state, V, out FluidState stagnation) == Outcome.Ok;
-        return new StationAnswer { State = state, Velocity = V, Stagnation = known ? stagnation : null };
+        bool known = Flow.Stagnation.Of(fluid, state, V * Math.Sqrt(kineticEnergyCoefficient), out FluidState stagnation) == Outcome.Ok;
+        return new StationAnswer { State = state, Velocity = V, KineticEnergyCoefficient = kineticEnergyCoefficient, Stagnation = known ? stagnation : null };
     }
 
     /// <summary>The same station with the area that carries a mass flow, kg/s.</summary>

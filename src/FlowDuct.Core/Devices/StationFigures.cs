@@ -20,6 +20,22 @@ internal sealed class StationFigures
 
     internal double this[Figure figure] => _values[BitOperations.TrailingZeroCount((int)figure)];
 
+    /// <summary>Reads the slots of a station behind the inlet, whose section may be given relative to the inlet's.</summary>
+    internal static StationFigures Read(in GivenSlots slots, Station station, in GivenSlots inlet)
+    {
+        StationFigures figures = Read(slots, station);
+        if (!slots.Has(StationSymbol.DiameterRatio)) return figures;
+        if (!inlet.Has(StationSymbol.Diameter)) throw Refusals.BetaWithoutInlet(station);
+        double d = slots.Value((int)StationSymbol.DiameterRatio) * inlet.Value((int)StationSymbol.Diameter);
+        figures.Add(Figure.Section, Math.PI * d * d / 4, station);
+        return figures;
+    }
+
+    /// <summary>True where the slots give a section.</summary>
+    internal static bool HaveSection(in GivenSlots slots) =>
+        slots.Has(StationSymbol.Area) || slots.Has(StationSymbol.Diameter) || slots.Has(StationSymbol.Rectangle) || slots.Has(StationSymbol.Annulus)
+        || slots.Has(StationSymbol.DiameterRatio);
+
     /// <summary>Reads the slots of a station.</summary>
     internal static StationFigures Read(in GivenSlots slots, Station station)
     {
@@ -33,6 +49,8 @@ internal sealed class StationFigures
             if (slots.Has((int)symbol)) figures.Add(figure, convert(slots.Value((int)symbol)), station);
         }
 
+        if (slots.Has(StationSymbol.Rectangle)) figures.Add(Figure.Section, slots.Value((int)StationSymbol.Rectangle) * slots.Second(StationSymbol.Rectangle), station);
+        if (slots.Has(StationSymbol.Annulus)) figures.Add(Figure.Section, Ring(slots.Value((int)StationSymbol.Annulus), slots.Second(StationSymbol.Annulus)), station);
         if (slots.Has((int)StationSymbol.Temperature)) figures.TemperatureHalfPlace = slots.HalfPlace((int)StationSymbol.Temperature);
         else if (slots.Has((int)StationSymbol.StagnationTemperature))
             figures.TemperatureHalfPlace = slots.HalfPlace((int)StationSymbol.StagnationTemperature);
@@ -48,6 +66,8 @@ internal sealed class StationFigures
         Given |= figure;
         _values[BitOperations.TrailingZeroCount((int)figure)] = value;
     }
+
+    private static double Ring(double outer, double inner) => Math.PI / 4 * ((outer * outer) - (inner * inner));
 
     private static double ValueOr(in GivenSlots slots, StationSymbol symbol, double otherwise) =>
         slots.Has((int)symbol) ? slots.Value((int)symbol) : otherwise;

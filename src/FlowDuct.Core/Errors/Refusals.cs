@@ -94,7 +94,7 @@ internal static class Refusals
         "--efficiency", $"the loss is given more than once ({names})", "keep one of them");
 
     internal static FlowDuctException NotForDevice(string option, DeviceKind device) => NotUnderstood(
-        option, $"this option does not belong to a {DeviceWord(device)}", device == DeviceKind.Nozzle ? "it belongs to the diffuser" : "it belongs to the nozzle");
+        option, $"this option does not belong to a {DeviceWords.Of(device)}", device == DeviceKind.Nozzle ? "it belongs to the diffuser" : "it belongs to the nozzle");
 
     internal static FlowDuctException NoExit(string figures, string range) => NoAnswer(
         "--exit", $"no exit state has {figures}", range);
@@ -190,6 +190,59 @@ internal static class Refusals
     internal static FlowDuctException CorrelationWithoutSection() => NotUnderstood(
         "--discharge-coefficient", "a correlation needs the bore of the throat", "add --throat, for example --throat \"d=18 mm\"");
 
+    internal static FlowDuctException VenturiSections() => NotUnderstood(
+        "--throat", "a venturi has a section at its inlet, its throat and its exit", "give for example --inlet \"p=6 bar, T=40 degC, d=100 mm\" --throat \"d=60 mm, dp=25 kPa\" --exit \"d=100 mm\"");
+
+    internal static FlowDuctException VenturiReadings(int given) => NotUnderstood(
+        "--throat", given == 0 ? "nothing says how much flows" : "the flow is given more than once", "give one of the throat's pressure (p or dp), --flow, --back");
+
+    internal static FlowDuctException NoFlowThrough(double back, double most) => NoAnswer(
+        "--back", $"{Units.Text(back, Dimension.Pressure)} leaves no flow: without one it is {Units.Text(most, Dimension.Pressure)}", "give a lower one");
+
+    internal static FlowDuctException MoreThanChoked(double flow, double most) => NoAnswer(
+        "--flow", $"{Units.Text(flow, Dimension.MassFlow)} is more than the choked throat passes, {Units.Text(most, Dimension.MassFlow)}", "give a smaller one, or a wider throat");
+
+    internal static FlowDuctException VenturiSupersonic(double back) => NoAnswer(
+        "--back", $"at {Units.Text(back, Dimension.Pressure)} the divergence stays supersonic to its exit", "use flowduct nozzle with --throat, --exit and --back");
+
+    internal static FlowDuctException LengthTwice() => NotUnderstood(
+        "--included-angle", "the length and the sections fix it", "leave --included-angle or --length out, or the exit section");
+
+    internal static FlowDuctException LengthWithoutSection() => NotUnderstood(
+        "--length", "an angle follows from it with the section of the inlet only", "add d, A, rect or annulus to --inlet");
+
+    internal static FlowDuctException ProfileOfStagnation() => NotUnderstood(
+        "--kinetic-energy-coefficient", "it belongs to the mean velocity of a static state, and a stagnation figure of the inlet holds it already", "give p, T and V of the inlet");
+
+    internal static FlowDuctException ThroatOfSubsonicDiffuser() => NotUnderstood(
+        "--throat", "a subsonic diffuser has none; a nozzle before a diffuser is a venturi", "leave it out, or use flowduct venturi");
+
+    internal static FlowDuctException DiffuserThroat() => NotUnderstood(
+        "--throat", "a supersonic diffuser takes the section of its throat beside that of its inlet, and no other figure", "give for example --inlet \"..., d=120 mm\" --throat \"d=112 mm\"");
+
+    internal static FlowDuctException ThroatWiderThanInlet() => NotUnderstood("--throat", "it is wider than the inlet", "give the narrowest section");
+
+    internal static FlowDuctException DoesNotStart(double ratio, double least) => NoAnswer(
+        "--throat",
+        $"with {Units.Text(ratio, Dimension.Ratio, 4)} of the inlet area the stream does not start by itself: behind a normal shock at the inlet it needs {Units.Text(least, Dimension.Ratio, 4)} (Kantrowitz and Donaldson, NACA ACR L5D20, 1945)",
+        "give a wider throat, or leave it out to let the shock stand at the inlet");
+
+    internal static FlowDuctException NoShock() => NoAnswer(
+        "--inlet", "the state behind a normal shock in this stream lies outside the range of the fluid", "give a slower inlet");
+
+    internal static FlowDuctException SuddenOfSupersonic() => NoAnswer(
+        "--loss-coefficient", "a sudden expansion of a supersonic stream is not modelled", "give another loss");
+
+    internal static FlowDuctException LossWithoutForm() => NotUnderstood(
+        "--loss-coefficient", "an estimate needs the form of the diffuser", "give sections of inlet and exit, and --length or --included-angle");
+
+    internal static FlowDuctException LossOfAnotherShape(Devices.Diffusers.DiffuserLoss row) => NotUnderstood(
+        "--loss-coefficient", $"{row.Name} is an estimate of {(row.Cone ? "cones, and this diffuser is planar" : "planar diffusers, and this one is none")}",
+        row.Cone ? "give best-planar" : "give idelchik, or rect for the sections");
+
+    internal static FlowDuctException BetaWithoutInlet(Station station) => NotUnderstood(
+        PlaceOf(station), "beta is a diameter over that of the inlet, which is not given", "add d to --inlet, or give d here");
+
     internal static FlowDuctException CorrelationWithoutPipe() => NotUnderstood(
         "--discharge-coefficient",
         "an equation of ISO 5167 needs the static pressure and the bore of the pipe, and the throat alone with the pressure of its tap",
@@ -228,7 +281,7 @@ internal static class Refusals
         Devices.Rating.RatingOutcome.TooGreatALoss => NoAnswer(
             "--efficiency", "so great a loss leaves no flow from this throat through this exit", "give a higher efficiency or a larger exit"),
         Devices.Rating.RatingOutcome.InsideReversion => NoAnswer(
-            "--exit", "the exit plane lies where the held phase gives way: its section is too wide for the stream before that and too narrow for the one behind", "give another exit section, or another --onset"),
+            "--exit", "the held phase gives way where the stream then has no steady way on: in the throat while slower than sound, or across the exit plane", "give another exit section or --onset, or leave --expansion out"),
         Devices.Rating.RatingOutcome.NoThroat or Devices.Rating.RatingOutcome.OutsideRange => NoAnswer(
             "--inlet", "the expansion leaves the range of the fluid before it is solved", $"valid range: {fluid.RangeText}"),
         _ => throw new InvalidOperationException($"a bracketed search of the rating did not close ({outcome})"),
@@ -269,7 +322,6 @@ internal static class Refusals
         _ => Dimension.Ratio,
     };
 
-    private static string DeviceWord(DeviceKind device) => device == DeviceKind.Nozzle ? "nozzle" : "diffuser";
 
     private static FlowDuctException NotUnderstood(string place, string reason, string next) =>
         new(new Refusal(RefusalKind.NotUnderstood, place, reason, next));

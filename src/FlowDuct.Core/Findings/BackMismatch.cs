@@ -9,7 +9,7 @@ internal static class BackMismatch
 {
     internal static Finding? Check(DeviceAnswer a)
     {
-        if (a.Rating is not NozzleRating rating || a.Case.Back.Mask != 0 || a.BackPressure is not double back) return null;
+        if (a.Rating is not NozzleRating rating || !a.Case.Back.IsEmpty || a.BackPressure is not double back) return null;
         if (Math.Abs(rating.Exit.p - back) <= DeviceSolver.LimitTolerance * a.Inlet.Stagnation!.Value.p) return null;
         return new Finding("back-mismatch", Severity.Caution, rating.Exit.p, back, "regime of the nozzle", text =>
             $"the exit plane has {text.Text(rating.Exit.p, Dimension.Pressure)}, not the given {text.Text(back, Dimension.Pressure)}, which was taken as the pressure of the space beyond; write --back for that");

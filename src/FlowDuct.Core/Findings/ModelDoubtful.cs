@@ -25,7 +25,7 @@ internal static class ModelDoubtful
                 "wet compression is taken at equilibrium: droplets evaporate later than that");
         }
 
-        if (a.Case.Device == DeviceKind.Diffuser && a.Inlet.Mach >= 1)
+        if (a.Case.Device == DeviceKind.Diffuser && a.Inlet.Mach >= 1 && a.Diffuser?.Shock is null)
         {
             return new Finding("model-doubtful", Severity.Caution, a.Inlet.Mach, 1, "assumption", _ =>
                 "the inlet is supersonic: the balances hold across any shock, but where it stands and what it costs is not solved");

@@ -11,7 +11,8 @@ internal static class Shock
     {
         if (a.Performance.Shock is not ShockAnswer shock) return null;
         double M = shock.V1 / shock.Upstream.w;
+        string place = a.Diffuser?.Shock is not Devices.Diffusers.InletShock inlet ? string.Empty : inlet.InThroat ? "in the throat" : "in the inlet plane";
         return new Finding("shock", Severity.Caution, shock.AreaRatio, M, "balances of mass, momentum and energy", text =>
-            $"a normal shock stands at {text.Text(shock.AreaRatio, Dimension.Ratio, 4)} times the throat area, M {text.Text(M, Dimension.Ratio, 4)} before it; a real one is a train of waves that moves and shakes");
+            $"a normal shock stands {(place.Length > 0 ? place : $"at {text.Text(shock.AreaRatio, Dimension.Ratio, 4)} times the throat area")}, M {text.Text(M, Dimension.Ratio, 4)} before it; a real one is a train of waves that moves and shakes");
     }
 }

@@ -41,4 +41,19 @@ internal enum CaseOption
 
     /// <summary>Onset of the other phase where one is held: its equilibrium mass fraction, or a temperature difference, K (nozzle).</summary>
     Onset,
+
+    /// <summary>Axial length, m (diffuser).</summary>
+    Length,
+
+    /// <summary>Angle between the diverging walls, rad (diffuser).</summary>
+    IncludedAngle,
+
+    /// <summary>Share of the inlet area that the boundary layers block (diffuser).</summary>
+    InletBlockage,
+
+    /// <summary>Kinetic energy of the inlet stream over that of its mean velocity (diffuser).</summary>
+    KineticEnergyCoefficient,
+
+    /// <summary>Roughness of the wall, m (diffuser).</summary>
+    Roughness,
 }

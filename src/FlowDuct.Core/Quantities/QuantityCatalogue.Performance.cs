@@ -51,6 +51,12 @@ internal static partial class QuantityCatalogue
             "Loss of stagnation pressure over the dynamic pressure of the narrower end."),
         Result("polytropic_efficiency", "etap", "polytropic efficiency", Dimension.Ratio,
             "Efficiency of an infinitely small step of the process."),
+        Result("ideal_recovery_incompressible", "Cpi0", "ideal recovery, incompressible", Dimension.Ratio, "1 - 1/AR^2 at the actual area ratio."),
+        Result("recovery_range.least", "Cp_min", "least recovery", Dimension.Ratio, "Estimated recovery less its uncertainty."),
+        Result("recovery_range.greatest", "Cp_max", "greatest recovery", Dimension.Ratio, "Estimated recovery and its uncertainty, held to the ideal."),
+        Result("sudden_expansion_recovery", "Cp_sudden", "recovery of a sudden expansion", Dimension.Ratio, "Recovery of a sudden expansion of the same area ratio."),
+        Result("exit_loss", "zeta_exit", "dynamic pressure left at the exit", Dimension.Ratio,
+            "Stagnation minus static pressure of the exit over that of the inlet: lost where the exit discharges into a space."),
         Result("reynolds_throat", "Re", "throat Reynolds number", Dimension.Ratio, "Reynolds number of the throat on its bore."),
     ];
 
@@ -104,6 +110,34 @@ internal static partial class QuantityCatalogue
             "Where the held phase gives way inside the nozzle."),
         Result("metastable.onset_area_ratio", "A_on/At", "section at the onset", Dimension.Ratio,
             "Section where the held phase gives way over the throat."),
+    ];
+
+    /// <summary>What only a diffuser has.</summary>
+    private static QuantityRow[] DiffuserRows() =>
+    [
+        Result("form.length", "N", "axial length", Dimension.Length, "Axial length of the diffuser."),
+        Result("form.included_angle", "2theta", "included angle", Dimension.Angle, "Angle between the diverging walls; of the cone of the same areas and length where it is none."),
+        Result("form.relative_length", "N/R1", "relative axial length", Dimension.Ratio,
+            "Over the inlet radius of a cone, the inlet width of a planar diffuser."),
+        Result("form.friction_factor", "f", "Darcy friction factor", Dimension.Ratio, "Of the inlet, as the estimated loss uses it."),
+        Result("stall.angle", "2theta_s", "included angle of first stall", Dimension.Angle, "Angle up to which such a diffuser is met unstalled."),
+        Result("stall.margin", "m_s", "stall margin", Dimension.Ratio, "Angle of first stall over the angle, less one: below zero past it."),
+        Result("best.area_ratio", "AR_best", "best area ratio at this length", Dimension.Ratio, "Area ratio of the cone of greatest recovery at this length, by the equation of Idelchik."),
+        Result("best.recovery", "Cp_best", "its recovery", Dimension.Ratio, "Recovery of the best area ratio at this length, incompressible."),
+        Result("best.included_angle", "2theta_best", "best angle at this area ratio", Dimension.Angle, "Included angle of least loss at this area ratio, by the equation of Idelchik."),
+        Result("best.relative_length", "N/R1_best", "its length over inlet radius", Dimension.Ratio, "Axial length of the best angle over the inlet radius."),
+        Result("best.measured", "Cp_meas", "greatest measured at this blockage", Dimension.Ratio, "Greatest recovery measured at this inlet blockage, whatever the geometry."),
+        Result("supersonic.starting_area_ratio", "At/A1", "throat over inlet, self-starting", Dimension.Ratio,
+            "Least throat area over inlet area through which the supersonic stream starts by itself."),
+        Result("supersonic.isentropic_area_ratio", "At*/A1", "throat over inlet, isentropic", Dimension.Ratio, "Throat area over inlet area at which the started stream is sonic there."),
+        Result("supersonic.standard_recovery", "pi_std", "standard ram recovery", Dimension.Ratio, "Stagnation pressure ratio of the standard schedule at the inlet Mach number."),
+        Result("supersonic.pitot_pressure", "p_pitot", "pitot pressure", Dimension.Pressure, "Stagnation pressure behind a normal shock in the inlet stream: the reading of a pitot tube."),
+        Result("cavitation.margin", "p-pv", "margin to the vapour pressure", Dimension.PressureDifference, "Lowest static pressure minus vapour pressure of the liquid."),
+        Result("cavitation.number", "sigma_c", "cavitation number", Dimension.Ratio, "That margin over the inlet dynamic pressure."),
+        Result("venturi.throat_drop", "p1-pt", "pressure drop to the throat", Dimension.PressureDifference, "Inlet static pressure minus that of the throat."),
+        Result("venturi.permanent_loss", "p1-p2", "permanent pressure loss", Dimension.PressureDifference, "Inlet static pressure minus that of the exit."),
+        Result("venturi.loss_over_drop", "loss/drop", "permanent loss over drop", Dimension.Ratio, "Permanent pressure loss over the drop to the throat."),
+        Result("venturi.choking_pressure_ratio", "p2*/p0", "choking pressure ratio", Dimension.Ratio, "Exit pressure over inlet stagnation pressure at which the throat just chokes."),
     ];
 
     private static QuantityRow Result(

@@ -174,6 +174,50 @@ internal static partial class QuantityCatalogue
             Help = "Height above mean sea level; gives pressure and temperature of the standard atmosphere (ISO 2533:1975, above 32 km that of 1976).",
             Example = "altitude=600 m",
         },
+        new()
+        {
+            Key = "rect",
+            Symbol = "rect",
+            Name = "rectangular section",
+            Dimension = Dimension.Length,
+            Kind = QuantityKind.StationInput,
+            StationSlot = StationSymbol.Rectangle,
+            TakenBy = StationLists.Inlet | StationLists.Throat | StationLists.Exit,
+            JsonKey = "rect",
+            IsPair = true,
+            Limits = QuantityLimits.Positive,
+            Help = "Width x height of a rectangular section; the first side diverges in a diffuser.",
+            Example = "rect=600x400 mm",
+        },
+        new()
+        {
+            Key = "annulus",
+            Symbol = "annulus",
+            Name = "annular section",
+            Dimension = Dimension.Length,
+            Kind = QuantityKind.StationInput,
+            StationSlot = StationSymbol.Annulus,
+            TakenBy = StationLists.Inlet | StationLists.Throat | StationLists.Exit,
+            JsonKey = "annulus",
+            IsPair = true,
+            Limits = QuantityLimits.Positive,
+            Help = "Outer x inner diameter of a ring.",
+            Example = "annulus=900x500 mm",
+        },
+        new()
+        {
+            Key = "beta",
+            Symbol = "beta",
+            Name = "diameter ratio",
+            Dimension = Dimension.Ratio,
+            Kind = QuantityKind.StationInput,
+            StationSlot = StationSymbol.DiameterRatio,
+            TakenBy = StationLists.Throat | StationLists.Exit,
+            JsonKey = "beta",
+            Limits = QuantityLimits.Positive,
+            Help = "This diameter over inlet diameter.",
+            Example = "beta=0.6",
+        },
     ];
 
     private static QuantityRow Answer(string key, string symbol, string name, Dimension dimension, string help) => new()

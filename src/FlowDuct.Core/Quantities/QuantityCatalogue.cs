@@ -62,6 +62,6 @@ internal static partial class QuantityCatalogue
     /// <summary>Built on first use: reading a command line does not need it.</summary>
     private static class Results
     {
-        public static readonly QuantityRow[] Table = [.. DeviceRows(), .. CoefficientRows(), .. ForceAndLimitRows(), .. ShockRows(), .. MetastableRows()];
+        public static readonly QuantityRow[] Table = [.. DeviceRows(), .. CoefficientRows(), .. DiffuserRows(), .. ForceAndLimitRows(), .. ShockRows(), .. MetastableRows()];
     }
 }

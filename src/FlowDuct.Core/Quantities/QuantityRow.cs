@@ -45,6 +45,9 @@ internal sealed class QuantityRow
     /// <summary>True where the answer is a word or yes/no, not a number.</summary>
     public bool IsText { get; init; }
 
+    /// <summary>True where two values of one unit are given as in 600x400 mm.</summary>
+    public bool IsPair { get; init; }
+
     /// <summary>One sentence for help and docs.</summary>
     public required string Help { get; init; }
 

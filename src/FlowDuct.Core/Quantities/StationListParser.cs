@@ -52,10 +52,23 @@ internal static class StationListParser
         refusals.RequireOwnUnit(row, symbol, value);
         if ((row.TakenBy & refusals.List) == 0)
             throw refusals.NotTakenHere(symbol, row);
-        GivenValue given = ValueParser.Parse(new ValueContext(refusals.Place, row, symbol + "="), value, ambientPressure);
+        var context = new ValueContext(refusals.Place, row, symbol + "=");
+        if (row.IsPair) return Pair(refusals, context, value, ambientPressure);
+        GivenValue given = ValueParser.Parse(context, value, ambientPressure);
         if (given.WasGauge && refusals.List == StationLists.Ambient)
             throw refusals.CircularAmbient(piece, given);
         return new StationItem(row, given);
+    }
+
+    // The unit stands once, behind the second number.
+    private static StationItem Pair(StationListRefusals refusals, in ValueContext context, string value, double ambientPressure)
+    {
+        int by = value.IndexOf('x', StringComparison.Ordinal);
+        if (by <= 0) throw refusals.NotAPair(context.Row, value);
+        GivenValue second = ValueParser.Parse(context, value[(by + 1)..], ambientPressure);
+        GivenValue first = ValueParser.Parse(context, value[..by] + second.Unit.Spelling, ambientPressure);
+        if (context.Row.StationSlot == StationSymbol.Annulus && second.Si >= first.Si) throw refusals.NoRing(value);
+        return new StationItem(context.Row, first, second);
     }
 
     private static void Add(List<StationItem> items, StationItem item, StationListRefusals refusals)

@@ -27,6 +27,14 @@ internal sealed class StationListRefusals(string place, StationLists list)
             : Refuse($"{shown} has no equals sign", $"write symbol=value, for example {ListExample()}");
     }
 
+    /// <summary>Refuses a single value where two are meant.</summary>
+    public FlowDuctException NotAPair(QuantityRow row, string value) =>
+        Refuse($"{row.Key}={Echo.Ascii(value)} is one number, and {row.Name} takes two", $"write for example {row.Example}");
+
+    /// <summary>Refuses a ring whose inner diameter is not the smaller one.</summary>
+    public FlowDuctException NoRing(string value) =>
+        Refuse($"annulus={Echo.Ascii(value)} has no ring between its diameters", "write outer x inner diameter, for example annulus=900x500 mm");
+
     /// <summary>Refuses "p=1,5 bar": a number, then a piece that goes on with digits.</summary>
     public void RequireNoDecimalComma(string[] pieces, int index)
     {

@@ -77,4 +77,13 @@ internal enum StationSymbol
 
     /// <summary>altitude above mean sea level (ambient only).</summary>
     Altitude,
+
+    /// <summary>rect, width x height of a rectangular section; the first side diverges.</summary>
+    Rectangle,
+
+    /// <summary>annulus, outer x inner diameter of a ring.</summary>
+    Annulus,
+
+    /// <summary>beta, this diameter over inlet diameter.</summary>
+    DiameterRatio,
 }

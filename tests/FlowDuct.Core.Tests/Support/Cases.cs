@@ -62,6 +62,6 @@ internal static class Cases
     private static void Fill(ref GivenSlots slots, StationLists station, string list)
     {
         foreach (StationItem item in StationListParser.Parse("--" + station.ToString().ToUpperInvariant(), station, list, Ambient))
-            slots.Set((int)item.Slot, item.Value.Si, item.Value.HalfWidth);
+            slots.Set(item);
     }
 }

@@ -19,6 +19,6 @@ internal readonly record struct ThroatFlow(double Re, double Pipe, double beta, 
     {
         if (a.Performance.ReynoldsThroat is not double Re) return null;
         double pipe = a.Inlet.Diameter ?? 0, bore = (a.Throat ?? a.Exit).Diameter ?? 0;
-        return new ThroatFlow(Re, pipe, pipe > 0 ? bore / pipe : 0, a.Exit.State.p / a.Inlet.State.p, a.Performance.Choked == true);
+        return new ThroatFlow(Re, pipe, pipe > 0 ? bore / pipe : 0, (a.Throat ?? a.Exit).State.p / a.Inlet.State.p, a.Performance.Choked == true);
     }
 }

@@ -41,6 +41,7 @@ internal readonly record struct DivergentLimits
         limits = default;
         if (!Choking.TryFind(inlet.Fluid, inlet.h0, inlet.s, inlet.p0, out FluidState throat, out bool atKink)) return RatingOutcome.NoThroat;
         double V = Energy.Velocity(inlet.h0, throat.h);
+        if (atKink && SlowBehindReversion(inlet.Fluid, throat, V)) return RatingOutcome.InsideReversion;
         limits = new DivergentLimits { Throat = throat, ThroatVelocity = V, AtKink = atKink, Flux = V / throat.v, DivergenceEfficiency = 1 };
         double target = limits.Flux * geometry.ThroatArea * (geometry.DischargeCoefficient ?? 1) / geometry.ExitArea;
         var path = new LossPath(inlet.Fluid, inlet.h0, inlet.h0, inlet.s, geometry.Efficiency);
@@ -77,7 +78,7 @@ internal readonly record struct DivergentLimits
         limits = limits with { Exit = exit, ExitVelocity = V, DivergenceEfficiency = OfDivergence(path, throat, exit) };
         if (!(limits.DivergenceEfficiency > 0)) return RatingOutcome.TooGreatALoss;
         limits = limits with { Pressures = limits.Pressures with { FullExpansion = exit.p } };
-        if (!NormalShock.TryFind(inlet.Fluid.Relaxed, exit, V, out FluidState behind, out double V2)) return RatingOutcome.OutsideRange;
+        if (!NormalShock.TryFind(exit.Phase == Phase.Wet ? inlet.Fluid.Relaxed : inlet.Fluid, exit, V, out FluidState behind, out double V2)) return RatingOutcome.OutsideRange;
         limits = limits with
         {
             Behind = new ShockAnswer(exit, V, behind, V2, limits.Flux / target),
@@ -88,6 +89,10 @@ internal readonly record struct DivergentLimits
 
     // Where a held phase gives way the flux falls by a step, and an exit may lie inside it.
     private static RatingOutcome Unsolved(Fluid fluid) => ReferenceEquals(fluid, fluid.Relaxed) ? RatingOutcome.NotConverged : RatingOutcome.InsideReversion;
+
+    // A held phase that gives way in the throat and leaves a stream slower than sound would need a second throat.
+    private static bool SlowBehindReversion(Fluid fluid, in FluidState throat, double V) => !ReferenceEquals(fluid, fluid.Relaxed)
+        && fluid.Relaxed.FromPH(throat.p, throat.h, default, out FluidState relaxed) == Outcome.Ok && V <= relaxed.w;
 
     private static double OfDivergence(LossPath path, in FluidState throat, in FluidState exit)
     {

@@ -88,9 +88,20 @@ internal static class DivergentNozzle
     private static RatingOutcome WithShock(
         in RatingInlet inlet, in NozzleGeometry geometry, in DivergentLimits limits, double back, in NozzleRating all, out NozzleRating rating)
     {
-        RatingOutcome outcome = BackFixesExit(inlet.Fluid.Relaxed, inlet, geometry, back, all with { Regime = Regime.ShockInDivergence }, out rating);
+        RatingOutcome outcome = WithShock(inlet.Fluid, inlet, geometry, limits, back, all, out rating);
+        bool held = !ReferenceEquals(inlet.Fluid, inlet.Fluid.Relaxed);
+        if (!held || (outcome == RatingOutcome.Ok && rating.Shock!.Value.Upstream.Phase != Phase.Wet)) return outcome;
+
+        // The held phase has given way before the shock: what follows is in equilibrium.
+        return WithShock(inlet.Fluid.Relaxed, inlet, geometry, limits, back, all, out rating);
+    }
+
+    private static RatingOutcome WithShock(
+        Fluid behind, in RatingInlet inlet, in NozzleGeometry geometry, in DivergentLimits limits, double back, in NozzleRating all, out NozzleRating rating)
+    {
+        RatingOutcome outcome = BackFixesExit(behind, inlet, geometry, back, all with { Regime = Regime.ShockInDivergence }, out rating);
         if (outcome != RatingOutcome.Ok) return outcome;
-        if (!ShockPosition.TryFind(inlet, geometry, limits, rating.Exit, rating.ExitVelocity, out ShockAnswer shock)) return RatingOutcome.NotConverged;
+        if (!ShockPosition.TryFind(behind, inlet, geometry, limits, rating.Exit, rating.ExitVelocity, out ShockAnswer shock)) return RatingOutcome.NotConverged;
         rating = rating with { Shock = shock };
         return RatingOutcome.Ok;
     }

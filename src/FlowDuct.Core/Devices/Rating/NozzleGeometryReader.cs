@@ -7,13 +7,11 @@ namespace FlowDuct.Devices.Rating;
 internal sealed record NozzleGeometryReader(StationFigures Throat, StationFigures Exit, double Back, NozzleShape Shape, string ShapeWords)
 {
     /// <summary>True where a nozzle is asked for by sections and back pressure rather than by its exit figures.</summary>
-    internal static bool Asks(DeviceCase c) => c.Device == DeviceKind.Nozzle && (c.Back.Mask != 0 || HasSection(c.Throat));
-
-    internal static bool HasSection(in GivenSlots slots) => slots.Has((int)StationSymbol.Area) || slots.Has((int)StationSymbol.Diameter);
+    internal static bool Asks(DeviceCase c) => c.Device == DeviceKind.Nozzle && (!c.Back.IsEmpty || StationFigures.HaveSection(c.Throat));
 
     internal static NozzleGeometryReader Read(DeviceCase c, double p1, double p01)
     {
-        StationFigures throat = StationFigures.Read(c.Throat, Station.Throat), exit = StationFigures.Read(c.Exit, Station.Exit);
+        StationFigures throat = StationFigures.Read(c.Throat, Station.Throat, c.Inlet), exit = StationFigures.Read(c.Exit, Station.Exit, c.Inlet);
         RefuseMeasured(throat, exit);
         double back = BackPressure(c, exit, p1, p01);
         bool both = throat.Has(Figure.Section) && exit.Has(Figure.Section);

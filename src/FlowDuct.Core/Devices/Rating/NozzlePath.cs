@@ -64,7 +64,7 @@ internal static class NozzlePath
     {
         StationAnswer narrow = a.Throat ?? a.Exit;
         double throat = narrow.Area!.Value * narrow.Openings, exit = a.Exit.Area!.Value * a.Exit.Openings;
-        bool given = NozzleGeometryReader.HasSection(a.Case.Inlet);
+        bool given = StationFigures.HaveSection(a.Case.Inlet);
         return (given ? a.Inlet.Area!.Value * a.Inlet.Openings : OpenInlet * throat, throat, exit);
     }
 
@@ -152,7 +152,7 @@ internal static class NozzlePath
             }
 
             (state, V) = (default, 0);
-            Fluid fluid = _shockPassed ? Fluid.Relaxed : Fluid;
+            Fluid fluid = _shockPassed && _rating.Shock!.Value.Upstream.Phase == Phase.Wet ? Fluid.Relaxed : Fluid;
             if (fluid.FromHS(_h0, s, default, out FluidState rest) != Outcome.Ok) return false;
             double low = Choking.TryFind(fluid, _h0, s, rest.p, out FluidState critical, out _) ? critical.p : Math.Max(least, _rating.Exit.p);
             return FluxRoot.TryFind(new LossPath(fluid, _h0, _h0, s, efficiency), flux, low, rest.p, (low + rest.p) / 2, out state, out V);

@@ -20,7 +20,7 @@ internal enum RatingOutcome
     /// <summary>So great a loss leaves no supersonic flow in this exit area.</summary>
     TooGreatALoss,
 
-    /// <summary>The exit plane lies where a held phase gives way: between its section before and its section behind that.</summary>
+    /// <summary>A held phase gives way where no steady stream goes on: slower than sound in the throat, or across the exit plane.</summary>
     InsideReversion,
 
     /// <summary>A bracketed search did not close: a defect, reported as such.</summary>

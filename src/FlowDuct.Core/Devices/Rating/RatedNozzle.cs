@@ -107,7 +107,7 @@ internal static class RatedNozzle
         if (!ReferenceEquals(fluid, c.Fluid)) assumptions.Add("expansion: " + fluid.Formulation);
         if (geometry.ShapeWords.Length > 0) assumptions.Add(geometry.ShapeWords);
         if (rating.AtKink && rating.Choked && ReferenceEquals(fluid, c.Fluid)) assumptions.Add("the flux is greatest where the flow meets saturation, not where M = 1");
-        if (c.Back.Mask == 0) assumptions.Add("back pressure: the given exit pressure");
+        if (c.Back.IsEmpty) assumptions.Add("back pressure: the given exit pressure");
         if (sections) assumptions.Add(CoefficientWords(inlet, ownApproach));
         var answer = new DeviceAnswer
         {

@@ -11,9 +11,9 @@ internal static class ShockPosition
 
     /// <summary>Finds the shock; the exit state is known from mass, energy and the back pressure.</summary>
     internal static bool TryFind(
-        in RatingInlet inlet, in NozzleGeometry geometry, in DivergentLimits limits, in FluidState exit, double exitVelocity, out ShockAnswer shock)
+        Fluid behind, in RatingInlet inlet, in NozzleGeometry geometry, in DivergentLimits limits, in FluidState exit, double exitVelocity, out ShockAnswer shock)
     {
-        var excess = new Excess(inlet, geometry, limits, exit.p, exitVelocity);
+        var excess = new Excess(behind, inlet, geometry, limits, exit.p, exitVelocity);
         double strong = limits.Exit.p, weak = limits.Throat.p * (1 - 1e-9), atStrong = excess.Of(limits.Behind), atWeak = excess.WithoutLoss;
 
         // So near the throat (or the exit) that rounding decides: the shock stands there.
@@ -24,7 +24,7 @@ internal static class ShockPosition
     }
 
     // In terms of the pressure before the shock: how much kinetic energy the exit would have too much.
-    private readonly struct Excess(RatingInlet inlet, NozzleGeometry geometry, DivergentLimits limits, double back, double exitVelocity) : IScalarFunction
+    private readonly struct Excess(Fluid fluid, RatingInlet inlet, NozzleGeometry geometry, DivergentLimits limits, double back, double exitVelocity) : IScalarFunction
     {
         private readonly LossPath _path = new(inlet.Fluid, inlet.h0, limits.Throat.h, inlet.s, limits.DivergenceEfficiency);
         private readonly double _throatFlux = limits.Flux * (geometry.DischargeCoefficient ?? 1);
@@ -38,7 +38,7 @@ internal static class ShockPosition
 
         internal double Of(in ShockAnswer shock)
         {
-            if (inlet.Fluid.Relaxed.FromPS(back, shock.Downstream.s, shock.Downstream, out FluidState ideal) != Outcome.Ok) return double.NegativeInfinity;
+            if (fluid.FromPS(back, shock.Downstream.s, shock.Downstream, out FluidState ideal) != Outcome.Ok) return double.NegativeInfinity;
             double share = (shock.AreaRatio - 1) / ((geometry.ExitArea / geometry.ThroatArea) - 1);
             double efficiency = 1 - ((1 - geometry.Efficiency) * Math.Clamp(1 - share, 0, 1));
             return (efficiency * (inlet.h0 - ideal.h)) - (exitVelocity * exitVelocity / 2);
@@ -49,7 +49,7 @@ internal static class ShockPosition
             shock = default;
             if (_path.At(p, limits.Throat, out FluidState before, out double V) != Outcome.Ok) return false;
             double area = _throatFlux * before.v / V;
-            if (!NormalShock.TryFind(inlet.Fluid.Relaxed, before, V, out FluidState behind, out double V2)) (behind, V2) = (before, V);
+            if (!NormalShock.TryFind(fluid, before, V, out FluidState behind, out double V2)) (behind, V2) = (before, V);
             shock = new ShockAnswer(before, V, behind, V2, area);
             return true;
         }
