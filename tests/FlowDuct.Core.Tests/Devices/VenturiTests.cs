@@ -82,7 +82,8 @@ public class VenturiTests
     {
         DeviceCase c = Case(GasCatalogue.Air, Pipe, "d=60 mm, dp=25 kPa", "d=100 mm", string.Empty, (CaseOption.IncludedAngle, "8 deg")) with
         {
-            DischargeCorrelation = DischargeCorrelation.Find("iso5167-venturi-cast"), LossWord = "idelchik",
+            DischargeCorrelation = DischargeCorrelation.Find("iso5167-venturi-cast"),
+            LossWord = "idelchik",
         };
         DeviceAnswer a = DeviceSolver.Solve(c);
         Assert.Equal(0.984, a.Performance.DischargeCoefficient!.Value, 1e-9);

@@ -1,7 +1,7 @@
+using FlowDuct.Devices.Rating;
 using FlowDuct.Errors;
 using FlowDuct.Flow;
 using FlowDuct.Fluids;
-using FlowDuct.Devices.Rating;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Devices.Diffusers;

@@ -99,7 +99,8 @@ public class DiffuserFormTests
         DeviceCase c = Cases.Diffuser(GasCatalogue.Air, "p=1 bar, T=300 K, V=150 m/s, d=100 mm", "V=60 m/s", (CaseOption.IncludedAngle, "7 deg")) with { LossWord = "idelchik" };
         DeviceAnswer sized = DeviceSolver.Solve(c);
         DeviceCase again = Cases.Diffuser(
-            GasCatalogue.Air, "p=1 bar, T=300 K, V=150 m/s, d=100 mm", $"A={Text(sized.Exit.Area!.Value)} m2", (CaseOption.IncludedAngle, "7 deg")) with { LossWord = "idelchik" };
+            GasCatalogue.Air, "p=1 bar, T=300 K, V=150 m/s, d=100 mm", $"A={Text(sized.Exit.Area!.Value)} m2", (CaseOption.IncludedAngle, "7 deg")) with
+        { LossWord = "idelchik" };
         Assert.Equal(60, DeviceSolver.Solve(again).Exit.Velocity!.Value, 1e-6);
     }
 
