@@ -13,8 +13,10 @@ internal static class FluxRoot
     // A Newton step that gains less than this is no such step.
     private const double Halved = 0.5;
 
-    // Saturated states step where the regions of IAPWS-IF97 meet, at 623.15 K: a flux inside that step has no state, and its edge stands for it.
-    private const double RegionStep = 5e-5;
+    // Saturated states step where the regions of IAPWS-IF97 meet, at 623.15 K, by up to 4 J/kg: a flux inside that step has no state, and its edge
+    // stands for it.
+    private const double RegionEdge = 623.15;
+    private const double RegionStep = 6;
 
     // A slow stream is a small difference of large enthalpies.
     private static double Rounding(double h0, double V) => 1e-9 + (1e-13 * Math.Max(Math.Abs(h0), 1e5) / (V * V));
@@ -35,7 +37,7 @@ internal static class FluxRoot
             if (Math.Abs(excess) <= Closure) return true;
             if (excess > 0) more = x;
             else less = x;
-            if (Math.Abs(more - less) <= 4e-16 * Math.Abs(x)) return Math.Abs(excess) < Math.Max(RegionStep, Rounding(path.h0, V));
+            if (Math.Abs(more - less) <= 4e-16 * Math.Abs(x)) return Math.Abs(excess) < Rounding(path.h0, V) + (Math.Abs(state.T - RegionEdge) < 1e-6 ? RegionStep / (V * V) : 0);
 
             // On an isentrope d ln G = p v (1/w^2 - 1/V^2) d ln p; a loss bends it little, but near the greatest flux enough to turn its sign.
             double slope = outcome == Outcome.Ok && speed > 0 ? at.p * at.v * ((1 / (at.w * at.w)) - (1 / (speed * speed))) : 0;
