@@ -54,7 +54,8 @@ internal sealed class CaseBinder
         if (_arguments.Has("--exit")) Fill(ref exit, "--exit", Station.Exit);
         if (_arguments.Has("--throat")) Fill(ref throat, "--throat", Station.Throat);
         if (_arguments.Has("--back")) Fill(ref back, "--back", StationLists.Back);
-        (GivenSlots options, bool flowIsVolume, bool onsetIsDifference) = Options(fluid);
+        FlowReference? reference = FlowBinder.Reference(_arguments, fluid);
+        (GivenSlots options, bool flowIsVolume, bool onsetIsDifference) = Options(reference?.MassPerVolume(fluid) ?? 1);
         var c = new DeviceCase
         {
             Device = kind,
@@ -72,6 +73,7 @@ internal sealed class CaseBinder
             AmbientAltitude = AmbientAltitude,
             UsesGauge = _usesGauge,
             FlowIsVolume = flowIsVolume,
+            FlowReference = reference,
             OnsetIsDifference = onsetIsDifference,
         };
         (c.Inlet, c.Exit, c.Options, c.Throat, c.Back) = (inlet, exit, options, throat, back);
@@ -157,19 +159,20 @@ internal sealed class CaseBinder
         }
     }
 
-    private (GivenSlots Options, bool FlowIsVolume, bool OnsetIsDifference) Options(Fluid fluid)
+    private (GivenSlots Options, bool FlowIsVolume, bool OnsetIsDifference) Options(double massPerVolume)
     {
         GivenSlots slots = default;
         bool volume = false, difference = false;
         foreach (QuantityRow row in QuantityCatalogue.Options)
         {
             string name = "--" + row.Word;
-            if (row.OptionSlot is not CaseOption option || _arguments.Value(name) is not string text) continue;
+            if (row.OptionSlot is not CaseOption option || _arguments.Value(name) is not string typed) continue;
+            string text = option == CaseOption.Flow ? FlowBinder.WithoutMoisture(typed) : typed;
             if (option == CaseOption.DischargeCoefficient && Correlation is not null) continue;
             GivenValue value = ValueParser.Parse(name, row, text, AmbientPressure);
             double size = option switch
             {
-                CaseOption.Flow => AmountToMass(fluid, value.Unit.Dimension),
+                CaseOption.Flow => massPerVolume,
                 CaseOption.Heat or CaseOption.HeatLoss when value.Unit.Dimension == Dimension.HeatRate => 1 / MassFlow(name, slots, volume),
                 _ => 1,
             };
@@ -188,13 +191,6 @@ internal sealed class CaseBinder
         bool dynamic = _arguments.Value("--recovery-basis") == "dynamic";
         if (!dynamic && slots.Has((int)CaseOption.Recovery) && slots.Value((int)CaseOption.Recovery) > 1)
             throw Usage.Refuse("--recovery", $"{_arguments.Value("--recovery")} is above 1, the recovery of a flow brought to rest without loss", "give a ratio up to 1, or --recovery-basis dynamic");
-    }
-
-    private static double AmountToMass(Fluid fluid, Dimension dimension)
-    {
-        if (dimension is not (Dimension.NormalVolumeFlow or Dimension.StandardVolumeFlow)) return 1;
-        return ReferenceVolume.Density(fluid, dimension) ?? throw Usage.Refuse(
-            "--flow", $"normal and standard volumes are amounts of ideal gas, and {fluid.Name} is none", "give a mass flow, or an actual volume flow in m3/h");
     }
 
     // Options come in the order of the catalogue, in which the flow stands before the heat.

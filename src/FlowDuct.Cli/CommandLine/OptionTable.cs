@@ -16,6 +16,7 @@ internal static class OptionTable
         new("--back", "LIST", "Pressure of the space that the exit discharges into.", "\"p=1 atm\"", CommandName.Nozzle),
         new("--ambient", "LIST", "Pressure and temperature of the surroundings, or their altitude; 1 atm, 15 degC if not given.", "\"p=0.98 bar\"", CommandName.Answering),
         Of(CaseOption.Flow, "FLOW", CommandName.Devices),
+        new("--reference-state", "LIST", "State at which a flow in scfm, NL/min or the like is counted: T and p.", "\"T=60 degF, p=14.696 psi\"", CommandName.Devices),
         Of(CaseOption.Efficiency, "RATIO", CommandName.Devices),
         Of(CaseOption.VelocityCoefficient, "RATIO", CommandName.Nozzle),
         Of(CaseOption.DischargeCoefficient, "RATIO", CommandName.Nozzle),

@@ -1,5 +1,6 @@
 using FlowDuct.Devices;
 using FlowDuct.Devices.Coefficients;
+using FlowDuct.Fluids;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Cli.Rendering;
@@ -14,10 +15,23 @@ internal static class Assumptions
         if (answer.Fluid.HasSaturation && answer.Exit.State.Phase == Fluids.Phase.Wet) yield return "wet states: one homogeneous mixture at equilibrium";
         if (answer.Case.DischargeCorrelation is DischargeCorrelation row && ThroatFlow.Of(answer) is ThroatFlow throat)
             yield return $"discharge coefficient: {row.Description}, {row.Standing}, uncertainty {text.Text(row.UncertaintyAt(throat), Dimension.Ratio, 2)}";
+        if (answer.Case.FlowReference is FlowReference flow) yield return FlowWords(flow, answer.Fluid, text);
         foreach (string line in answer.Assumptions) yield return line;
         if (answer.Performance.Thrust is not null && answer.Exit.Mach >= 1) yield return answer.BackPressure is null ? "thrust: against the ambient pressure" : "thrust: against the back pressure";
         if (!answer.Case.AmbientGiven || answer.Case.AmbientAltitude is { GivesPressure: true } or { GivesTemperature: true }) yield return AmbientWords(answer.Case, text);
     }
+
+    private static string FlowWords(FlowReference flow, Fluid fluid, IQuantityText text) =>
+        $"flow: {flow.Typed} counts ideal gas at {text.Text(flow.T, Dimension.Temperature, 6)}, {text.Text(flow.p, Dimension.Pressure, 6)} ({flow.Source}){MoistureWords(flow, fluid)}";
+
+    // Nothing to tell apart in a dry gas.
+    private static string MoistureWords(FlowReference flow, Fluid fluid) => (FlowReference.WaterVapour(fluid) > 0, flow.Moisture) switch
+    {
+        (false, _) => string.Empty,
+        (_, GasMoisture.Dry) => ", dry: without the water vapour of the gas",
+        (_, GasMoisture.Wet) => ", wet: with the water vapour of the gas",
+        _ => ", taken wet, with the water vapour of the gas: dry or wet was not said",
+    };
 
     private static string AmbientWords(DeviceCase c, IQuantityText text) =>
         $"ambient: {text.Text(c.AmbientPressure, Dimension.Pressure, 6)}, {text.Text(c.AmbientTemperature, Dimension.Temperature, 4)} ({Origin(c.AmbientAltitude)})";

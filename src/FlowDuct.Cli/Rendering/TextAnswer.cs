@@ -85,6 +85,8 @@ internal static class TextAnswer
 
     private static string Remark(DeviceAnswer answer, string key) => key switch
     {
+        "normal_volume_flow" => "   0 degC, 1.01325 bar" + Wet(answer),
+        "standard_volume_flow" => "   15 degC, 1.01325 bar" + Wet(answer),
         "isentropic_efficiency" when answer.EfficiencyImplied => "   implied by the figures",
         "isentropic_efficiency" when answer.TakenIdeal => "   assumed",
         "isentropic_efficiency" when answer.Case.Has(CaseOption.Efficiency) => "   given",
@@ -94,6 +96,8 @@ internal static class TextAnswer
         "recovery" when answer.Case.Has(CaseOption.Recovery) => "   given",
         _ => string.Empty,
     };
+
+    private static string Wet(DeviceAnswer answer) => FlowReference.WaterVapour(answer.Fluid) > 0 ? ", wet" : string.Empty;
 
     private static void Line(TextWriter to, string name, string value, string unit) =>
         to.WriteLine($"  {name,-34}{value,12} {unit}".TrimEnd());

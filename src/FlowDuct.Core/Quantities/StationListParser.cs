@@ -53,8 +53,8 @@ internal static class StationListParser
         if ((row.TakenBy & refusals.List) == 0)
             throw refusals.NotTakenHere(symbol, row);
         GivenValue given = ValueParser.Parse(new ValueContext(refusals.Place, row, symbol + "="), value, ambientPressure);
-        if (given.WasGauge && refusals.List == StationLists.Ambient)
-            throw refusals.CircularAmbient(piece, given);
+        if (given.WasGauge && refusals.List is (StationLists.Ambient or StationLists.Reference))
+            throw refusals.NeedsAbsolute(piece, given);
         return new StationItem(row, given);
     }
 

@@ -71,12 +71,14 @@ internal sealed class StationListRefusals(string place, StationLists list)
     /// <summary>Refuses a second item of a quantity.</summary>
     public FlowDuctException Twice(QuantityRow row) => Refuse($"{row.Symbol} is given twice", string.Empty);
 
-    /// <summary>Refuses an ambient pressure that is told relative to the ambient pressure.</summary>
-    public FlowDuctException CircularAmbient(string piece, in GivenValue given)
+    /// <summary>Refuses an ambient or reference pressure that is told relative to the ambient pressure.</summary>
+    public FlowDuctException NeedsAbsolute(string piece, in GivenValue given)
     {
         string spelling = given.Unit.Unit.Spelling;
         string plain = given.Unit.Unit.Basis == UnitBasis.Gauge ? spelling[..^1] : spelling;
-        string reason = $"{Echo.Ascii(piece)}: gauge and vacuum readings start from the ambient pressure itself";
+        string reason = list == StationLists.Ambient
+            ? $"{Echo.Ascii(piece)}: gauge and vacuum readings start from the ambient pressure itself"
+            : $"{Echo.Ascii(piece)}: a reference state does not move with the weather";
         return Refuse(reason, $"give it absolute, in {plain}(a)");
     }
 
