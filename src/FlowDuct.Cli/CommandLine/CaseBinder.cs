@@ -55,6 +55,7 @@ internal sealed class CaseBinder
         if (_arguments.Has("--throat")) Fill(ref throat, "--throat", Station.Throat);
         if (_arguments.Has("--back")) Fill(ref back, "--back", StationLists.Back);
         FlowReference? reference = FlowBinder.Reference(_arguments, fluid);
+        RefuseHeatRateOfUnknownMass(reference, fluid);
         (GivenSlots options, bool flowIsVolume, bool onsetIsDifference) = Options(reference?.MassPerVolume(fluid) ?? 1);
         var c = new DeviceCase
         {
@@ -120,7 +121,7 @@ internal sealed class CaseBinder
         throw Usage.NotOneOf(option, typed, [.. choices.Select(choice => choice.Word)]);
     }
 
-    private Fluid RefuseIdleFractions(Fluid fluid) => !_arguments.Has("--fractions") || fluid is IdealGas { Mixture: not null }
+    private Fluid RefuseIdleFractions(Fluid fluid) => !_arguments.Has("--fractions") || fluid is IdealGas { Mixture.IsHumidAir: false }
         ? fluid
         : throw Usage.Refuse("--fractions", $"{fluid.Name} is no mixture and has no fractions", "leave it out, or give --fluid such as N2=0.72,CO2=0.13,H2O=0.15");
 
@@ -191,6 +192,17 @@ internal sealed class CaseBinder
         bool dynamic = _arguments.Value("--recovery-basis") == "dynamic";
         if (!dynamic && slots.Has((int)CaseOption.Recovery) && slots.Value((int)CaseOption.Recovery) > 1)
             throw Usage.Refuse("--recovery", $"{_arguments.Value("--recovery")} is above 1, the recovery of a flow brought to rest without loss", "give a ratio up to 1, or --recovery-basis dynamic");
+    }
+
+    // The mass that goes with a reference volume of humid air is known only once the inlet is.
+    private void RefuseHeatRateOfUnknownMass(FlowReference? reference, Fluid fluid)
+    {
+        if (reference is null || fluid is not IdealGas { Mixture.IsHumidAir: true }) return;
+        foreach (string option in (string[])["--heat", "--heat-loss"])
+        {
+            if (_arguments.Value(option) is string text && ValueParser.Parse(option, QuantityCatalogue.Of(CaseOption.Heat), text, AmbientPressure).Unit.Dimension == Dimension.HeatRate)
+                throw Usage.Refuse(option, "a heat rate needs the mass flow that takes it, and that of humid air by volume follows from its humidity", "give --flow in kg/s, or the heat in kJ/kg");
+        }
     }
 
     // Options come in the order of the catalogue, in which the flow stands before the heat.

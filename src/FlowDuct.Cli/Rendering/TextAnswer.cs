@@ -14,6 +14,7 @@ internal static class TextAnswer
         "Engineering estimate: it certifies nothing. The local pressure-equipment and piping codes and a licensed engineer decide.";
 
     private static readonly string[] s_static = ["p", "T", "x", "h", "s", "V", "M"];
+    private static readonly string[] s_vapour = ["humidity", "dew-point", "humidity-ratio"];
     private static readonly string[] s_stagnation = ["p0", "T0", "rho", "w", "A", "d"];
 
     internal static void Write(TextWriter to, DeviceAnswer answer, PathTable? path, RenderOptions options)
@@ -24,6 +25,12 @@ internal static class TextAnswer
         to.WriteLine();
         Stations(to, answer, options, "stagnation", s_stagnation);
         to.WriteLine();
+        if (StationFigureTable.Read(answer.Fluid, answer.Inlet, "humidity-ratio") is not null)
+        {
+            Stations(to, answer, options, "vapour", s_vapour);
+            to.WriteLine();
+        }
+
         Device(to, answer, options);
         Energy(to, answer, options);
         Laws(to, answer, options);
