@@ -16,6 +16,8 @@ public class JsonSchemaTests
     [InlineData("flowduct state --fluid water --at \"p=7 bar, superheat=20 K\"")]
     [InlineData("flowduct state --fluid air --at \"p=2 bar, T=300 K\"")]
     [InlineData("flowduct nozzle --fluid air --inlet \"p0=7 barg, T0=40 degC\" --exit \"p=3 bar\"")]
+    [InlineData("flowduct state --fluid air --at \"T=200..400 K by 50 K\"")]
+    [InlineData("flowduct state --fluid water --at \"p=1..9 bar by 2 bar, x=1\"")]
     [InlineData("flowduct state --fluid humid-air --at \"p=1 bar, T=300 K, humidity=0\"")]
     [InlineData("flowduct nozzle --fluid humid-air --inlet \"p0=3 bar, T0=40 degC, dew-point=12 degC\" --exit \"p=2 bar\" --flow \"300 scfm dry\" --reference-state \"T=60 degF, p=14.696 psi\"")]
     [InlineData("flowduct nozzle --fluid steam --inlet \"p=9 bar, T=230 degC\" --exit \"p=3.2 bar, T=135.7 degC\"")]

@@ -48,7 +48,7 @@ public class RefusalTests
     [InlineData(2, "flowduct nozzle --fluid air --inlet \"p=5 bar, T=300 K\" --exit \"p=4 bar, T=290 K\" --heat \"5 kJ/kg\" --heat-loss \"2 kJ/kg\"", "--heat-loss: the heat is given too, as --heat\n  keep one of them; --heat takes a minus sign for a loss")]
     [InlineData(2, "flowduct nozzle --fluid air --inlet \"p=5 bar, T=300 K\" --exit \"p=4 bar\" --flow \"300 scfm\"", "--flow: 300 scfm names no reference state (conventions differ by up to 8.7 %)\n  add --reference-state, for example --reference-state \"T=60 degF, p=14.696 psi\", or give Nm3/h (0 degC) or Sm3/h (15 degC)")]
     [InlineData(2, "flowduct state --fluid water --at \"p=1 bar, T=300 K\" --digits 40", "--digits: 40 is not a whole number from 1 to 15\n  write for example --digits 7")]
-    [InlineData(2, "flowduct state --fluid water --at \"p=1 bar, T=300 K\" --format xml", "--format: xml is not one of text, json")]
+    [InlineData(2, "flowduct state --fluid water --at \"p=1 bar, T=300 K\" --format xml", "--format: xml is not one of text, json, csv")]
     [InlineData(2, Air + "\"p=9 bar, T=200\" --exit \"p=8 bar\"", "--inlet: T=200 has no unit; write for example T=200 degC")]
     [InlineData(2, Air + "\"p=9 bar, T=230,5 degC\" --exit \"p=8 bar\"", "--inlet: T=230,5 degC has a decimal comma\n  write T=230.5 degC")]
     [InlineData(2, Air + "\"p=NaN bar, T=230 degC\" --exit \"p=8 bar\"", "--inlet: p=NaN is not a finite number\n  write for example p=9 bar")]

@@ -45,6 +45,15 @@ internal sealed class CaseBinder
         return slots;
     }
 
+    /// <summary>The range of a property question, with the slots that stay; null where it asks for one state.</summary>
+    internal (StationRange Range, GivenSlots Fixed)? AtRange()
+    {
+        if (StationRange.Find("--at", StationLists.At, _arguments.Value("--at")!, AmbientPressure) is not StationRange range) return null;
+        GivenSlots slots = default;
+        if (range.Rest.Length > 0) Fill(ref slots, "--at", StationLists.At, range.Rest);
+        return slots.Has((int)range.Row.StationSlot!.Value) ? throw Usage.Refuse("--at", $"{range.Row.Symbol} is given twice", string.Empty) : (range, slots);
+    }
+
     /// <summary>The case of a device.</summary>
     internal DeviceCase Device(DeviceKind kind)
     {
@@ -151,9 +160,11 @@ internal sealed class CaseBinder
 
     private void Fill(ref GivenSlots slots, string option, Station station) => Fill(ref slots, option, station.ToList());
 
-    private void Fill(ref GivenSlots slots, string option, StationLists list)
+    private void Fill(ref GivenSlots slots, string option, StationLists list) => Fill(ref slots, option, list, _arguments.Value(option)!);
+
+    private void Fill(ref GivenSlots slots, string option, StationLists list, string text)
     {
-        foreach (StationItem item in StationListParser.Parse(option, list, _arguments.Value(option)!, AmbientPressure))
+        foreach (StationItem item in StationListParser.Parse(option, list, text, AmbientPressure))
         {
             slots.Set((int)item.Slot, item.Value.Si, item.Value.HalfWidth);
             _usesGauge |= item.Value.WasGauge;

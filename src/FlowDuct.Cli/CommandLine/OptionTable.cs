@@ -9,7 +9,7 @@ internal static class OptionTable
     [
         new("--fluid", "NAME", "Fluid by name, or a mixture of gases such as N2=0.72,CO2=0.13,H2O=0.15; flowduct fluids lists them.", "steam", CommandName.Answering, IsRequired: true),
         new("--fractions", "BASIS", "What the fractions of a mixture count: mole (the default) or mass.", "mass", CommandName.Answering),
-        new("--at", "LIST", "Two independent properties, each with its unit.", "\"p=7 bar, superheat=20 K\"", CommandName.State, IsRequired: true),
+        new("--at", "LIST", "Two independent properties, each with its unit; one may be a range (T=300..600 K by 50 K, p=1..9 bar in 5 points). Of an ideal gas T=200..1000 K by 100 K alone prints the gas table: h, u, s0, p_r, v_r.", "\"p=7 bar, superheat=20 K\"", CommandName.State, IsRequired: true),
         new("--inlet", "LIST", "State and velocity at the inlet.", "\"p=9 bar, T=230 degC, V=25 m/s\"", CommandName.Devices, IsRequired: true),
         new("--throat", "LIST", "Section of the throat.", "\"d=18 mm\"", CommandName.Nozzle),
         new("--exit", "LIST", "What is known of the exit plane.", "\"p=3.2 bar\"", CommandName.Devices),
@@ -38,7 +38,7 @@ internal static class OptionTable
         new("--path", "N", "States in N sections from inlet to exit, of a nozzle given by its sections.", "21", CommandName.Nozzle),
         new("--wall", "FILE", "Sections of your own instead: a CSV with the columns position [unit], diameter [unit].", "wall.csv", CommandName.Nozzle),
         new("--show", "LIST", "More columns of the states along a nozzle: quantities of a station, or p/p0, T/T0, rho/rho0, A/At.", "\"rho, p/p0\"", CommandName.Nozzle, OfTheCase: false),
-        new("--format", "FORMAT", "text (the default), json (coherent SI whatever the units); with --path or --wall also csv.", "json", CommandName.Answering | CommandName.SelfCheck, OfTheCase: false),
+        new("--format", "FORMAT", "text (the default), json (coherent SI whatever the units); with --path, --wall or a range also csv.", "json", CommandName.Answering | CommandName.SelfCheck, OfTheCase: false),
         new("--output", "FILE", "Write to a file, whole or not at all.", "answer.txt", CommandName.Answering | CommandName.SelfCheck, OfTheCase: false),
         new("--units", "SYSTEM", "metric (the default) or us.", "us", CommandName.Answering, OfTheCase: false),
         new("--show-in", "LIST", "Units of your own for some quantities.", "\"T=degF, p=inH2O(g)\"", CommandName.Answering, OfTheCase: false),

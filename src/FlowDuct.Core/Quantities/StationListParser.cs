@@ -45,17 +45,23 @@ internal static class StationListParser
             throw refusals.NotAnItem(piece);
         string symbol = piece[..equals].TrimEnd();
         string value = piece[(equals + 1)..].TrimStart();
+        QuantityRow row = RowOf(refusals, symbol, value);
+        refusals.RequireNoRange(piece, value);
+        GivenValue given = ValueParser.Parse(new ValueContext(refusals.Place, row, symbol + "="), value, ambientPressure);
+        if (given.WasGauge && refusals.List is (StationLists.Ambient or StationLists.Reference))
+            throw refusals.NeedsAbsolute(piece, given);
+        return new StationItem(row, given);
+    }
+
+    /// <summary>The quantity of a symbol that the list takes.</summary>
+    internal static QuantityRow RowOf(StationListRefusals refusals, string symbol, string value)
+    {
         if (!QuantityCatalogue.TryFindStationQuantity(symbol, out QuantityRow? row))
             throw refusals.UnknownSymbol(symbol, value);
         if (row.StationSlot is null)
             throw refusals.AnswerOnly(row, symbol);
         refusals.RequireOwnUnit(row, symbol, value);
-        if ((row.TakenBy & refusals.List) == 0)
-            throw refusals.NotTakenHere(symbol, row);
-        GivenValue given = ValueParser.Parse(new ValueContext(refusals.Place, row, symbol + "="), value, ambientPressure);
-        if (given.WasGauge && refusals.List is (StationLists.Ambient or StationLists.Reference))
-            throw refusals.NeedsAbsolute(piece, given);
-        return new StationItem(row, given);
+        return (row.TakenBy & refusals.List) != 0 ? row : throw refusals.NotTakenHere(symbol, row);
     }
 
     private static void Add(List<StationItem> items, StationItem item, StationListRefusals refusals)
