@@ -52,6 +52,10 @@ ask 0 'NZ-1014: the same nozzle with condensation at 3.2 % equilibrium moisture'
 ask 0 'NZ-2203: the most that the bath nozzle could pass if nothing flashed before its exit' \
     nozzle --fluid water --inlet 'p=8.5 bar, T=138 degC' --throat 'd=6 mm' --back 'p=1.02 bar' --expansion single-phase
 
+ask 0 'NZ-3305: air dried to a frost point of -20 degC at 7 barg into the conveying line: where does its vapour turn to ice?' \
+    nozzle --fluid humid-air --inlet 'p0=7 barg, T0=35 degC, dew-point=-20 degC' --throat 'd=9 mm' --exit 'd=12 mm' --back 'p=1.1 bar' \
+    --divergent-angle '8 deg'
+
 ask 0 'NZ-3302: which coefficient does a measured 0.505 kg/s imply for a bore of 18.0 mm?' \
     nozzle --fluid air --inlet 'p0=7.8 barg, T0=41 degC' --throat 'd=18.0 mm' --back 'p=1 bar' --flow '0.505 kg/s'
 

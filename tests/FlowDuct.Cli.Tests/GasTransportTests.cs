@@ -18,7 +18,7 @@ public class GasTransportTests
     [Fact]
     public void Outside_its_fit_a_gas_answers_without_them()
     {
-        CommandRun run = CommandRun.RunLine("flowduct state --fluid H2O --at \"p=1 bar, T=350 K\"");
+        CommandRun run = CommandRun.RunLine("flowduct state --fluid H2O --at \"p=1 bar, T=270 K\"");
         Assert.Equal(0, run.Status);
         Assert.DoesNotContain("viscosity", run.Output, StringComparison.Ordinal);
     }

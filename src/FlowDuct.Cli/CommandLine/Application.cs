@@ -5,6 +5,7 @@ using FlowDuct.Devices.Rating;
 using FlowDuct.Errors;
 using FlowDuct.Findings;
 using FlowDuct.Fluids.Water.Verification;
+using FlowDuct.Quantities;
 
 namespace FlowDuct.Cli.CommandLine;
 
@@ -68,10 +69,20 @@ internal static class Application
     {
         var binder = new CaseBinder(arguments);
         RenderOptions options = RenderBinder.Bind(arguments, binder, terminal);
+        AnswerFormat format = RenderBinder.Format(binder);
+        if (binder.AtRange() is (StationRange range, GivenSlots rest)) return Table(StateTable.Solve(binder.Fluid(), rest, range, format == AnswerFormat.Json ? UnitSystem.Metric : RenderBinder.System(binder)), format, memory, options);
+        if (format == AnswerFormat.Csv) throw Usage.Refuse("--format", "csv holds a table of states, and one state is asked for", "give a range, for example --at \"T=200..1000 K by 100 K\"");
         StateAnswer answer = StateAnswer.Solve(binder.Fluid(), binder.At());
-        if (RenderBinder.WantsJson(binder)) StateJson.Write(memory, answer, options);
+        if (format == AnswerFormat.Json) StateJson.Write(memory, answer, options);
         else Text(memory, to => StateText.Write(to, answer, options));
         return FindingRules.Pass(answer.Findings, options.Strict) ? ExitStatus.Passed : ExitStatus.Failed;
+    }
+
+    private static int Table(StateTable table, AnswerFormat format, MemoryStream memory, RenderOptions options)
+    {
+        if (format == AnswerFormat.Json) StateTableJson.Write(memory, table, options);
+        else Text(memory, to => StateTableText.Write(to, table, options, csv: format == AnswerFormat.Csv));
+        return FindingRules.Pass(table.Findings, options.Strict) ? ExitStatus.Passed : ExitStatus.Failed;
     }
 
     private static int Device(Arguments arguments, MemoryStream memory, bool terminal)

@@ -46,6 +46,15 @@ internal sealed class CaseBinder
         return slots;
     }
 
+    /// <summary>The range of a property question, with the slots that stay; null where it asks for one state.</summary>
+    internal (StationRange Range, GivenSlots Fixed)? AtRange()
+    {
+        if (StationRange.Find("--at", StationLists.At, _arguments.Value("--at")!, AmbientPressure) is not StationRange range) return null;
+        GivenSlots slots = default;
+        if (range.Rest.Length > 0) Fill(ref slots, "--at", StationLists.At, range.Rest);
+        return slots.Has((int)range.Row.StationSlot!.Value) ? throw Usage.Refuse("--at", $"{range.Row.Symbol} is given twice", string.Empty) : (range, slots);
+    }
+
     /// <summary>The case of a device.</summary>
     internal DeviceCase Device(DeviceKind kind)
     {
@@ -55,7 +64,9 @@ internal sealed class CaseBinder
         if (_arguments.Has("--exit")) Fill(ref exit, "--exit", Station.Exit);
         if (_arguments.Has("--throat")) Fill(ref throat, "--throat", Station.Throat);
         if (_arguments.Has("--back")) Fill(ref back, "--back", StationLists.Back);
-        (GivenSlots options, bool flowIsVolume, bool onsetIsDifference) = Options(fluid, kind != DeviceKind.Nozzle);
+        FlowReference? reference = FlowBinder.Reference(_arguments, fluid);
+        RefuseHeatRateOfUnknownMass(reference, fluid);
+        (GivenSlots options, bool flowIsVolume, bool onsetIsDifference) = Options(reference?.MassPerVolume(fluid) ?? 1, kind != DeviceKind.Nozzle);
         var c = new DeviceCase
         {
             Device = kind,
@@ -74,6 +85,7 @@ internal sealed class CaseBinder
             AmbientAltitude = AmbientAltitude,
             UsesGauge = _usesGauge,
             FlowIsVolume = flowIsVolume,
+            FlowReference = reference,
             OnsetIsDifference = onsetIsDifference,
         };
         (c.Inlet, c.Exit, c.Options, c.Throat, c.Back) = (inlet, exit, options, throat, back);
@@ -129,7 +141,7 @@ internal sealed class CaseBinder
         throw Usage.NotOneOf(option, typed, [.. choices.Select(choice => choice.Word)]);
     }
 
-    private Fluid RefuseIdleFractions(Fluid fluid) => !_arguments.Has("--fractions") || fluid is IdealGas { Mixture: not null }
+    private Fluid RefuseIdleFractions(Fluid fluid) => !_arguments.Has("--fractions") || fluid is IdealGas { Mixture.IsHumidAir: false }
         ? fluid
         : throw Usage.Refuse("--fractions", $"{fluid.Name} is no mixture and has no fractions", "leave it out, or give --fluid such as N2=0.72,CO2=0.13,H2O=0.15");
 
@@ -159,28 +171,31 @@ internal sealed class CaseBinder
 
     private void Fill(ref GivenSlots slots, string option, Station station) => Fill(ref slots, option, station.ToList());
 
-    private void Fill(ref GivenSlots slots, string option, StationLists list)
+    private void Fill(ref GivenSlots slots, string option, StationLists list) => Fill(ref slots, option, list, _arguments.Value(option)!);
+
+    private void Fill(ref GivenSlots slots, string option, StationLists list, string text)
     {
-        foreach (StationItem item in StationListParser.Parse(option, list, _arguments.Value(option)!, AmbientPressure))
+        foreach (StationItem item in StationListParser.Parse(option, list, text, AmbientPressure))
         {
             slots.Set(item);
             _usesGauge |= item.Value.WasGauge;
         }
     }
 
-    private (GivenSlots Options, bool FlowIsVolume, bool OnsetIsDifference) Options(Fluid fluid, bool isDiffuser)
+    private (GivenSlots Options, bool FlowIsVolume, bool OnsetIsDifference) Options(double massPerVolume, bool isDiffuser)
     {
         GivenSlots slots = default;
         bool volume = false, difference = false;
         foreach (QuantityRow row in QuantityCatalogue.Options)
         {
             string name = "--" + row.Word;
-            if (row.OptionSlot is not CaseOption option || _arguments.Value(name) is not string text) continue;
+            if (row.OptionSlot is not CaseOption option || _arguments.Value(name) is not string typed) continue;
+            string text = option == CaseOption.Flow ? FlowBinder.WithoutMoisture(typed) : typed;
             if ((option == CaseOption.DischargeCoefficient && Correlation is not null) || (option == CaseOption.LossCoefficient && isDiffuser && LossWord is not null)) continue;
             GivenValue value = ValueParser.Parse(name, row, text, AmbientPressure);
             double size = option switch
             {
-                CaseOption.Flow => AmountToMass(fluid, value.Unit.Dimension),
+                CaseOption.Flow => massPerVolume,
                 CaseOption.Heat or CaseOption.HeatLoss when value.Unit.Dimension == Dimension.HeatRate => 1 / MassFlow(name, slots, volume),
                 _ => 1,
             };
@@ -201,11 +216,15 @@ internal sealed class CaseBinder
             throw Usage.Refuse("--recovery", $"{_arguments.Value("--recovery")} is above 1, the recovery of a flow brought to rest without loss", "give a ratio up to 1, or --recovery-basis dynamic");
     }
 
-    private static double AmountToMass(Fluid fluid, Dimension dimension)
+    // The mass that goes with a reference volume of humid air is known only once the inlet is.
+    private void RefuseHeatRateOfUnknownMass(FlowReference? reference, Fluid fluid)
     {
-        if (dimension is not (Dimension.NormalVolumeFlow or Dimension.StandardVolumeFlow)) return 1;
-        return ReferenceVolume.Density(fluid, dimension) ?? throw Usage.Refuse(
-            "--flow", $"normal and standard volumes are amounts of ideal gas, and {fluid.Name} is none", "give a mass flow, or an actual volume flow in m3/h");
+        if (reference is null || fluid is not IdealGas { Mixture.IsHumidAir: true }) return;
+        foreach (string option in (string[])["--heat", "--heat-loss"])
+        {
+            if (_arguments.Value(option) is string text && ValueParser.Parse(option, QuantityCatalogue.Of(CaseOption.Heat), text, AmbientPressure).Unit.Dimension == Dimension.HeatRate)
+                throw Usage.Refuse(option, "a heat rate needs the mass flow that takes it, and that of humid air by volume follows from its humidity", "give --flow in kg/s, or the heat in kJ/kg");
+        }
     }
 
     // Options come in the order of the catalogue, in which the flow stands before the heat.

@@ -10,14 +10,17 @@ internal static class RenderBinder
 
     internal static RenderOptions Bind(Arguments arguments, CaseBinder binder, bool terminal)
     {
-        UnitSystem system = binder.Choice("--units", UnitSystem.Metric, ("metric", UnitSystem.Metric), ("us", UnitSystem.Us));
         return new RenderOptions(
-            new DisplayText(system, binder.AmbientPressure, ShowIn(arguments)),
+            new DisplayText(System(binder), binder.AmbientPressure, ShowIn(arguments)),
             Digits(arguments),
             Colour(binder, terminal),
             arguments.Has("--quiet"),
             arguments.Has("--strict"));
     }
+
+    /// <summary>The unit system of the answer.</summary>
+    internal static UnitSystem System(CaseBinder binder) =>
+        binder.Choice("--units", UnitSystem.Metric, ("metric", UnitSystem.Metric), ("us", UnitSystem.Us));
 
     /// <summary>True for JSON, false for text.</summary>
     internal static bool WantsJson(CaseBinder binder) => binder.Choice("--format", false, ("text", false), ("json", true));

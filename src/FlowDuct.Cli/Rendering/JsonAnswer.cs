@@ -48,7 +48,9 @@ internal static class JsonAnswer
         if (c.AmbientAltitude is AmbientAltitude altitude) json.WriteNumber("ambient.altitude", altitude.z);
         foreach (QuantityRow row in QuantityCatalogue.Options)
         {
-            if (row.OptionSlot is CaseOption option && c.Has(option)) json.WriteNumber(GivenKey(row, c), c.Value(option));
+            if (row.OptionSlot is not CaseOption option || !c.Has(option)) continue;
+            if (option == CaseOption.Flow && c.FlowReference is FlowReference reference) JsonFlow.Given(json, reference);
+            else json.WriteNumber(GivenKey(row, c), c.Value(option));
         }
 
         json.WriteEndObject();
@@ -57,6 +59,7 @@ internal static class JsonAnswer
         if (answer.InletTakenAtRest) json.WriteNumber("inlet.V", 0);
         if (!c.AmbientGiven || c.AmbientAltitude is { GivesPressure: true }) json.WriteNumber("ambient.p", c.AmbientPressure);
         if (!c.AmbientGiven || c.AmbientAltitude is { GivesTemperature: true }) json.WriteNumber("ambient.T", c.AmbientTemperature);
+        if (c.FlowReference is FlowReference flow) JsonFlow.Assumed(json, flow, c.Fluid);
         json.WriteEndObject();
         Found(json, answer.Found);
         json.WriteStartArray("assumptions");

@@ -16,7 +16,14 @@ internal static class JsonStation
             return;
         }
 
-        json.WriteStartObject(name);
+        json.WritePropertyName(name);
+        WriteElement(json, fluid, at);
+    }
+
+    /// <summary>The object without a name before it.</summary>
+    internal static void WriteElement(Utf8JsonWriter json, Fluid fluid, StationAnswer at)
+    {
+        json.WriteStartObject();
         foreach ((string key, Func<Fluid, StationAnswer, double?> read) in StationFigureTable.All)
         {
             JsonNumbers.Write(json, KeyOf(key), read(fluid, at));

@@ -7,7 +7,7 @@ namespace FlowDuct.Cli.Rendering;
 /// <summary>The text answer of a property question: one line a quantity.</summary>
 internal static class StateText
 {
-    private static readonly string[] s_keys = ["p", "T", "x", "superheat", "h", "s", "u", "rho", "cp", "cv", "w", "w_wet", "kappa", "mu", "nu", "lambda", "prandtl", "sigma", "V", "M", "p0", "T0", "h0"];
+    private static readonly string[] s_keys = ["p", "T", "x", "superheat", "h", "s", "u", "rho", "cp", "cv", "w", "w_wet", "kappa", "mu", "nu", "lambda", "prandtl", "sigma", "humidity", "dew-point", "humidity-ratio", "V", "M", "p0", "T0", "h0"];
 
     internal static void Write(TextWriter to, StateAnswer answer, RenderOptions options)
     {

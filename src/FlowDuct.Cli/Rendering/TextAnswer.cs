@@ -14,6 +14,7 @@ internal static class TextAnswer
         "Engineering estimate: it certifies nothing. The local pressure-equipment and piping codes and a licensed engineer decide.";
 
     private static readonly string[] s_static = ["p", "T", "x", "h", "s", "V", "M"];
+    private static readonly string[] s_vapour = ["humidity", "dew-point", "humidity-ratio"];
     private static readonly string[] s_stagnation = ["p0", "T0", "rho", "w", "A", "d"];
 
     internal static void Write(TextWriter to, DeviceAnswer answer, PathTable? path, RenderOptions options)
@@ -24,6 +25,12 @@ internal static class TextAnswer
         to.WriteLine();
         Stations(to, answer, options, "stagnation", s_stagnation);
         to.WriteLine();
+        if (StationFigureTable.Read(answer.Fluid, answer.Inlet, "humidity-ratio") is not null)
+        {
+            Stations(to, answer, options, "vapour", s_vapour);
+            to.WriteLine();
+        }
+
         Device(to, answer, options);
         Energy(to, answer, options);
         Laws(to, answer, options);
@@ -85,6 +92,8 @@ internal static class TextAnswer
 
     private static string Remark(DeviceAnswer answer, string key) => key switch
     {
+        "normal_volume_flow" => "   0 degC, 1.01325 bar" + Wet(answer),
+        "standard_volume_flow" => "   15 degC, 1.01325 bar" + Wet(answer),
         "isentropic_efficiency" when answer.EfficiencyImplied => "   implied by the figures",
         "isentropic_efficiency" when answer.TakenIdeal => "   assumed",
         "isentropic_efficiency" when answer.Case.Has(CaseOption.Efficiency) && answer.Diffuser?.Shock is null => "   given",
@@ -95,6 +104,8 @@ internal static class TextAnswer
         "recovery" when answer.Case.Has(CaseOption.Recovery) => "   given",
         _ => string.Empty,
     };
+
+    private static string Wet(DeviceAnswer answer) => FlowReference.WaterVapour(answer.Fluid) > 0 ? ", wet" : string.Empty;
 
     private static void Line(TextWriter to, string name, string value, string unit) =>
         to.WriteLine($"  {name,-34}{value,12} {unit}".TrimEnd());

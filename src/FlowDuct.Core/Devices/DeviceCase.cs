@@ -118,6 +118,9 @@ internal sealed record DeviceCase
     /// <summary>True where the flow is an actual volume flow at the inlet, m3/s; else it is a mass flow, kg/s.</summary>
     internal bool FlowIsVolume { get; init; }
 
+    /// <summary>The reference volume that the mass flow was given by; null where it was given otherwise.</summary>
+    internal FlowReference? FlowReference { get; init; }
+
     /// <summary>True where the onset of the other phase is a temperature difference, K; else it is its mass fraction at equilibrium.</summary>
     internal bool OnsetIsDifference { get; init; }
 

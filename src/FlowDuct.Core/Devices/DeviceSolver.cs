@@ -25,6 +25,7 @@ internal static class DeviceSolver
     internal static DeviceAnswer Stations(DeviceCase c)
     {
         if (c.Has(CaseOption.Heat) && c.Has(CaseOption.HeatLoss)) throw Refusals.HeatTwice();
+        c = HumidAirCase.Resolve(c);
         if (c.Device == DeviceKind.Venturi) return Venturis.VenturiSolver.Stations(c);
         if (Rating.NozzleGeometryReader.Asks(c)) return Rating.RatedNozzle.Solve(c);
         if (c.DischargeCorrelation is not null) throw Refusals.CorrelationWithoutBack();

@@ -12,6 +12,12 @@ internal sealed record Performance
     /// <summary>Actual volume flow at the inlet's static state, m3/s.</summary>
     internal double? VolumeFlow { get; init; }
 
+    /// <summary>Volume flow at 0 degC, 101.325 kPa, m3/s; of an ideal gas only.</summary>
+    internal double? NormalVolumeFlow { get; init; }
+
+    /// <summary>Volume flow at 15 degC, 101.325 kPa, m3/s; of an ideal gas only.</summary>
+    internal double? StandardVolumeFlow { get; init; }
+
     internal double? IsentropicEfficiency { get; init; }
 
     /// <summary>Least and greatest efficiency that the readings allow, where they fix no single one.</summary>

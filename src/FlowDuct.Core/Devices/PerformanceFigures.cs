@@ -8,6 +8,8 @@ internal static class PerformanceFigures
     [
         ("mass_flow", p => p.MassFlow),
         ("volume_flow", p => p.VolumeFlow),
+        ("normal_volume_flow", p => p.NormalVolumeFlow),
+        ("standard_volume_flow", p => p.StandardVolumeFlow),
         ("isentropic_efficiency", p => p.IsentropicEfficiency),
         ("velocity_coefficient", p => p.VelocityCoefficient),
         ("discharge_coefficient", p => p.DischargeCoefficient),

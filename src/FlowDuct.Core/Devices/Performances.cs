@@ -15,6 +15,8 @@ internal static class Performances
         Performance performance = a.Performance with
         {
             VolumeFlow = flow * first.v,
+            NormalVolumeFlow = flow / ReferenceVolume.Density(a.Fluid, Dimension.NormalVolumeFlow),
+            StandardVolumeFlow = flow / ReferenceVolume.Density(a.Fluid, Dimension.StandardVolumeFlow),
             EntropyRise = EntropyRise(a),
             LostWork = a.Audit.Entropy == Verdict.Broken ? null : LostWork(a),
             HeatRate = a.Case.Heat != 0 ? flow * a.Case.Heat : null,

@@ -24,14 +24,20 @@ internal sealed record StateAnswer(Fluid Fluid, GivenSlots Given, StationAnswer 
     internal static StateAnswer Solve(Fluid fluid, in GivenSlots slots)
     {
         StationFigures given = StationFigures.Read(slots, Station.At);
+        fluid = HumidAirCase.Resolve(fluid, slots, of => State(of, given));
+        FluidState state = State(fluid, given);
+        double V = given.Has(Figure.V) ? given[Figure.V] : given.Has(Figure.M) ? given[Figure.M] * state.w : 0;
+        return new StateAnswer(fluid, slots, StationAnswer.From(fluid, state, V));
+    }
+
+    private static FluidState State(Fluid fluid, StationFigures given)
+    {
         Figure figures = given.Given & (Figures.Static | Figures.Stagnation);
         StatePairs.Pair pair = StatePairs.Find(figures) ?? throw NoPair(given, figures);
         if (pair.Mask == (Figure.P | Figure.T)
             && Inlet.IsSaturatedReading(fluid, given[Figure.P], given[Figure.T], given.TemperatureHalfPlace, out double Tsat))
             throw Refusals.SaturatedInlet(Station.At, given[Figure.P], given[Figure.T], Tsat);
-        FluidState state = StatePairs.Solve(fluid, pair, given, Station.At);
-        double V = given.Has(Figure.V) ? given[Figure.V] : given.Has(Figure.M) ? given[Figure.M] * state.w : 0;
-        return new StateAnswer(fluid, slots, StationAnswer.From(fluid, state, V));
+        return StatePairs.Solve(fluid, pair, given, Station.At);
     }
 
     private static FlowDuctException NoPair(StationFigures given, Figure figures)

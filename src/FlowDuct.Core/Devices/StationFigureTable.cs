@@ -1,4 +1,5 @@
 using FlowDuct.Fluids;
+using FlowDuct.Fluids.Gases;
 
 namespace FlowDuct.Devices;
 
@@ -35,6 +36,9 @@ internal static class StationFigureTable
         ("lambda", (fluid, at) => TransportOf(fluid, at)?.lambda),
         ("prandtl", (fluid, at) => TransportOf(fluid, at) is Transport flow ? flow.mu * at.State.cp / flow.lambda : null),
         ("sigma", (fluid, at) => at.HasState && at.State.HasQuality && fluid.TrySurfaceTension(at.State.T, out double sigma) ? sigma : null),
+        ("humidity", (fluid, at) => WaterVapour(fluid) is double x ? Humidity.Relative(x, at.State.p, at.State.T) : null),
+        ("dew-point", (fluid, at) => WaterVapour(fluid) is double x ? Humidity.DewPoint(x, at.State.p) : null),
+        ("humidity-ratio", (fluid, _) => WaterVapour(fluid) is null ? null : Humidity.Ratio((IdealGas)fluid)),
     ];
 
     /// <summary>The number of a key, or null where it cannot be known.</summary>
@@ -47,6 +51,10 @@ internal static class StationFigureTable
 
         return null;
     }
+
+    // Of a gas that holds water vapour, or is said to be humid.
+    private static double? WaterVapour(Fluid fluid) =>
+        fluid is IdealGas gas && (gas.FractionOf("H2O") > 0 || gas.Mixture is { IsHumidAir: true }) ? gas.FractionOf("H2O") : null;
 
     private static Transport? TransportOf(Fluid fluid, StationAnswer at) =>
         at.HasState && at.State.HasIsobaricHeatCapacity && fluid.TryTransport(at.State, out Transport transport) ? transport : null;

@@ -7,11 +7,15 @@ namespace FlowDuct.Fluids;
 /// <summary>The fluids by the names that the command line and datasheets use.</summary>
 public static class FluidCatalogue
 {
+    // A stand-in: the composition follows from the humidity, which is a figure of the inlet.
+    private const double UntilTheInletSays = 0.01;
+
     private static readonly FluidName[] s_names =
     [
         new("water", "water and steam", () => Water.WaterFluid.Instance),
         new("steam", "the same as water", () => Water.WaterFluid.Instance),
         new("air", "dry air as an ideal gas", () => GasCatalogue.Air),
+        new("humid-air", "air and water vapour as ideal gases; the inlet says how humid", () => GasMixture.HumidAir(UntilTheInletSays).Gas),
     ];
 
     /// <summary>Every accepted name with a word about the fluid; the gases follow in the order of their table.</summary>

@@ -1,16 +1,24 @@
+using FlowDuct.Fluids.Gases;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Fluids;
 
-/// <summary>Normal and standard volumes: amounts of ideal gas, told as the volume that they fill at a reference state.</summary>
+/// <summary>Normal, standard and other reference volumes: amounts of ideal gas, told as the volume that they fill at a reference state.</summary>
 internal static class ReferenceVolume
 {
-    private const double Pressure = 101325;
+    /// <summary>Pressure of normal and standard volumes, Pa (DIN 1343, ISO 13443).</summary>
+    internal const double Pressure = 101325;
+
+    /// <summary>Temperature of normal volumes, K (DIN 1343).</summary>
+    internal const double NormalTemperature = 273.15;
+
+    /// <summary>Temperature of standard volumes, K (ISO 13443).</summary>
+    internal const double StandardTemperature = 288.15;
 
     /// <summary>Mass of a normal (0 degC, DIN 1343) or standard (15 degC, ISO 13443) cubic metre, kg/m3; null where the fluid is no ideal gas.</summary>
-    internal static double? Density(Fluid fluid, Dimension flow)
-    {
-        double T = flow == Dimension.NormalVolumeFlow ? 273.15 : 288.15;
-        return !fluid.HasSaturation && fluid.FromPT(Pressure, T, out FluidState reference) == Outcome.Ok ? reference.rho : null;
-    }
+    internal static double? Density(Fluid fluid, Dimension flow) =>
+        Density(fluid, Pressure, flow == Dimension.NormalVolumeFlow ? NormalTemperature : StandardTemperature);
+
+    /// <summary>Mass of a cubic metre of ideal gas at p, Pa, and T, K; kg/m3; null where the fluid is no ideal gas.</summary>
+    internal static double? Density(Fluid fluid, double p, double T) => fluid is IdealGas gas ? p / (gas.R * T) : null;
 }

@@ -54,6 +54,9 @@ internal enum Dimension
     /// <summary>Volume flow rate of ideal gas at 15 degC, 101.325 kPa (ISO 13443), m3/s.</summary>
     StandardVolumeFlow,
 
+    /// <summary>Volume flow rate of ideal gas at a reference state that is given beside it, m3/s.</summary>
+    ReferenceVolumeFlow,
+
     /// <summary>Heat rate or power, W.</summary>
     HeatRate,
 

@@ -6,6 +6,12 @@ internal sealed class DisplayText(UnitSystem system, double ambientPressure, IRe
     /// <summary>Metric units; gauge readings do not occur.</summary>
     internal static readonly DisplayText Metric = new(UnitSystem.Metric, 0);
 
+    /// <summary>The unit system.</summary>
+    internal UnitSystem System => system;
+
+    /// <summary>True where a unit of the reader's own was asked for.</summary>
+    internal bool Asks(Dimension dimension) => own is not null && own.ContainsKey(dimension);
+
     /// <summary>The unit in which a dimension is shown.</summary>
     internal UnitReading UnitOf(Dimension dimension)
     {
@@ -18,8 +24,7 @@ internal sealed class DisplayText(UnitSystem system, double ambientPressure, IRe
     /// <summary>The unit of a quantity: one asked for, its own where it has one, else that of its dimension.</summary>
     internal UnitReading UnitOf(QuantityRow row)
     {
-        bool asked = own is not null && own.ContainsKey(row.Dimension);
-        return !asked && UnitTable.TryFind(row.DisplayUnit(system), row.Dimension, out UnitReading usual) ? usual : UnitOf(row.Dimension);
+        return !Asks(row.Dimension) && UnitTable.TryFind(row.DisplayUnit(system), row.Dimension, out UnitReading usual) ? usual : UnitOf(row.Dimension);
     }
 
     /// <summary>The number alone, with trailing zeros to the count of digits, as columns want it.</summary>

@@ -16,7 +16,7 @@ internal static partial class QuantityCatalogue
             Kind = QuantityKind.Both,
             StationSlot = StationSymbol.Pressure,
             TakenBy = StationLists.Inlet | StationLists.Throat | StationLists.Exit
-                | StationLists.Ambient | StationLists.At | StationLists.Back,
+                | StationLists.Ambient | StationLists.At | StationLists.Back | StationLists.Reference,
             JsonKey = "p",
             Limits = QuantityLimits.Positive,
             Help = "Absolute static pressure; gauge and vacuum readings are converted with the ambient pressure.",
@@ -46,7 +46,8 @@ internal static partial class QuantityCatalogue
             Dimension = Dimension.Temperature,
             Kind = QuantityKind.Both,
             StationSlot = StationSymbol.Temperature,
-            TakenBy = StationLists.Inlet | StationLists.Throat | StationLists.Exit | StationLists.Ambient | StationLists.At,
+            TakenBy = StationLists.Inlet | StationLists.Throat | StationLists.Exit | StationLists.Ambient | StationLists.At
+                | StationLists.Reference,
             JsonKey = "T",
             Limits = QuantityLimits.Positive,
             Help = "Static temperature.",

@@ -5,7 +5,7 @@ namespace FlowDuct.Quantities;
 /// <summary>The one table of quantities. Options, station lists, headers, JSON keys, help and docs are renderings of it.</summary>
 internal static partial class QuantityCatalogue
 {
-    private static readonly QuantityRow[] StationTable = [.. StateRows(), .. FlowRows(), .. RelativeRows(), .. StationAnswerRows()];
+    private static readonly QuantityRow[] StationTable = [.. StateRows(), .. FlowRows(), .. RelativeRows(), .. HumidityRows(), .. StationAnswerRows()];
 
     private static readonly QuantityRow[] OptionTable = OptionRows();
 

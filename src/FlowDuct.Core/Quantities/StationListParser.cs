@@ -45,19 +45,25 @@ internal static class StationListParser
             throw refusals.NotAnItem(piece);
         string symbol = piece[..equals].TrimEnd();
         string value = piece[(equals + 1)..].TrimStart();
+        QuantityRow row = RowOf(refusals, symbol, value);
+        refusals.RequireNoRange(piece, value);
+        var context = new ValueContext(refusals.Place, row, symbol + "=");
+        if (row.IsPair) return Pair(refusals, context, value, ambientPressure);
+        GivenValue given = ValueParser.Parse(context, value, ambientPressure);
+        if (given.WasGauge && refusals.List is (StationLists.Ambient or StationLists.Reference))
+            throw refusals.NeedsAbsolute(piece, given);
+        return new StationItem(row, given);
+    }
+
+    /// <summary>The quantity of a symbol that the list takes.</summary>
+    internal static QuantityRow RowOf(StationListRefusals refusals, string symbol, string value)
+    {
         if (!QuantityCatalogue.TryFindStationQuantity(symbol, out QuantityRow? row))
             throw refusals.UnknownSymbol(symbol, value);
         if (row.StationSlot is null)
             throw refusals.AnswerOnly(row, symbol);
         refusals.RequireOwnUnit(row, symbol, value);
-        if ((row.TakenBy & refusals.List) == 0)
-            throw refusals.NotTakenHere(symbol, row);
-        var context = new ValueContext(refusals.Place, row, symbol + "=");
-        if (row.IsPair) return Pair(refusals, context, value, ambientPressure);
-        GivenValue given = ValueParser.Parse(context, value, ambientPressure);
-        if (given.WasGauge && refusals.List == StationLists.Ambient)
-            throw refusals.CircularAmbient(piece, given);
-        return new StationItem(row, given);
+        return (row.TakenBy & refusals.List) != 0 ? row : throw refusals.NotTakenHere(symbol, row);
     }
 
     // The unit stands once, behind the second number.

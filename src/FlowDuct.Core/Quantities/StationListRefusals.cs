@@ -79,12 +79,25 @@ internal sealed class StationListRefusals(string place, StationLists list)
     /// <summary>Refuses a second item of a quantity.</summary>
     public FlowDuctException Twice(QuantityRow row) => Refuse($"{row.Symbol} is given twice", string.Empty);
 
-    /// <summary>Refuses an ambient pressure that is told relative to the ambient pressure.</summary>
-    public FlowDuctException CircularAmbient(string piece, in GivenValue given)
+    /// <summary>Refuses a second range: a table has one quantity that varies.</summary>
+    public FlowDuctException SecondRange(string first, string second) =>
+        Refuse($"{Echo.Ascii(first)} and {Echo.Ascii(second)} are two ranges, and a table has one", "give one of them a value");
+
+    /// <summary>Refuses a range where one value is wanted.</summary>
+    public void RequireNoRange(string piece, string value)
+    {
+        if (ValueRangeParser.IsRange(value) && NumberParser.Measure(value, out _) > 0)
+            throw Refuse($"{Echo.Ascii(piece)} is a range, and one value is wanted here", "a range belongs to --at of flowduct state");
+    }
+
+    /// <summary>Refuses an ambient or reference pressure that is told relative to the ambient pressure.</summary>
+    public FlowDuctException NeedsAbsolute(string piece, in GivenValue given)
     {
         string spelling = given.Unit.Unit.Spelling;
         string plain = given.Unit.Unit.Basis == UnitBasis.Gauge ? spelling[..^1] : spelling;
-        string reason = $"{Echo.Ascii(piece)}: gauge and vacuum readings start from the ambient pressure itself";
+        string reason = list == StationLists.Ambient
+            ? $"{Echo.Ascii(piece)}: gauge and vacuum readings start from the ambient pressure itself"
+            : $"{Echo.Ascii(piece)}: a reference state does not move with the weather";
         return Refuse(reason, $"give it absolute, in {plain}(a)");
     }
 

@@ -24,6 +24,9 @@ internal enum StationLists
 
     /// <summary>--back, the space that the exit discharges into.</summary>
     Back = 1 << 5,
+
+    /// <summary>--reference-state, at which a volume of gas is counted.</summary>
+    Reference = 1 << 6,
 }
 
 /// <summary>Steps from a station to its list.</summary>

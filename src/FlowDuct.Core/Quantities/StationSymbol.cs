@@ -86,4 +86,13 @@ internal enum StationSymbol
 
     /// <summary>beta, this diameter over inlet diameter.</summary>
     DiameterRatio,
+
+    /// <summary>humidity, partial over saturation pressure of water vapour (humid-air).</summary>
+    Humidity,
+
+    /// <summary>dew-point at the static pressure of the station (humid-air).</summary>
+    DewPoint,
+
+    /// <summary>humidity-ratio, water vapour over dry air by mass (humid-air).</summary>
+    HumidityRatio,
 }

@@ -54,10 +54,10 @@ internal static class UnitSuggestion
     private static string? AmbiguousReference(string spelling, Dimension dimension)
     {
         bool isFlow = dimension is Dimension.MassFlow or Dimension.VolumeFlow
-            or Dimension.NormalVolumeFlow or Dimension.StandardVolumeFlow;
+            or Dimension.NormalVolumeFlow or Dimension.StandardVolumeFlow or Dimension.ReferenceVolumeFlow;
         return isFlow && IsAmbiguous(spelling)
             ? $"{spelling} names no reference state (conventions differ by up to 8.7 %); "
-                + "write Nm3/h (0 degC) or Sm3/h (15 degC)"
+                + "write scfm, NL/min or the like with --reference-state, or Nm3/h (0 degC) or Sm3/h (15 degC)"
             : null;
     }
 

@@ -25,6 +25,8 @@ internal static partial class UnitTable
     private const string Din1343 = "DIN 1343: 0 degC, 101.325 kPa";
     private const string Iso13443 = "ISO 13443: 15 degC, 101.325 kPa";
 
+    private const string GivenReference = "volume of NIST SP 811; its state by --reference-state";
+
     private static readonly Unit[] Rows =
     [
         new("1", Dimension.Ratio, 1, Si),
@@ -141,6 +143,19 @@ internal static partial class UnitTable
         new("Sm3/h", Dimension.StandardVolumeFlow, 1 / Hour, Iso13443),
         new("Sm3/min", Dimension.StandardVolumeFlow, 1 / Minute, Iso13443),
         new("Sm3/s", Dimension.StandardVolumeFlow, 1, Iso13443),
+
+        new("m3/h(ref)", Dimension.ReferenceVolumeFlow, 1 / Hour, GivenReference),
+        new("m3/s(ref)", Dimension.ReferenceVolumeFlow, 1, GivenReference),
+        new("NL/h", Dimension.ReferenceVolumeFlow, 1e-3 / Hour, GivenReference),
+        new("NL/min", Dimension.ReferenceVolumeFlow, 1e-3 / Minute, GivenReference),
+        new("NL/s", Dimension.ReferenceVolumeFlow, 1e-3, GivenReference),
+        new("nlpm", Dimension.ReferenceVolumeFlow, 1e-3 / Minute, GivenReference),
+        new("SL/min", Dimension.ReferenceVolumeFlow, 1e-3 / Minute, GivenReference),
+        new("slpm", Dimension.ReferenceVolumeFlow, 1e-3 / Minute, GivenReference),
+        new("sccm", Dimension.ReferenceVolumeFlow, 1e-6 / Minute, GivenReference),
+        new("scfh", Dimension.ReferenceVolumeFlow, CubicFoot / Hour, GivenReference),
+        new("scfm", Dimension.ReferenceVolumeFlow, CubicFoot / Minute, GivenReference),
+        new("MMscfd", Dimension.ReferenceVolumeFlow, 1e6 * CubicFoot / (24 * Hour), GivenReference),
 
         new("kW", Dimension.HeatRate, 1e3, Si),
         new("W", Dimension.HeatRate, 1, Si),

@@ -97,7 +97,7 @@ public sealed class StationListParserTests
     [Theory]
     [InlineData("Ambient", "V=3 m/s", "V (velocity) is not taken here", "--list takes p, T, altitude")]
     [InlineData("Back", "T=20 degC", "T (static temperature) is not taken here", "--list takes p, dp, rise, p/p0, p/p1")]
-    [InlineData("At", "d=20 mm", "d (diameter) is not taken here", "--list takes p, p0, T, T0, h, h0, s, u, v, rho, x, moisture, superheat, subcooling, V, M")]
+    [InlineData("At", "d=20 mm", "d (diameter) is not taken here", "--list takes p, p0, T, T0, h, h0, s, u, v, rho, x, moisture, superheat, subcooling, V, M, humidity, dew-point, humidity-ratio")]
     public void A_list_names_what_it_takes(string list, string text, string reason, string next)
     {
         Refusal refusal = Refused("--list", Enum.Parse<StationLists>(list), text);

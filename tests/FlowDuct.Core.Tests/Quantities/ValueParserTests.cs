@@ -97,7 +97,7 @@ public sealed class ValueParserTests
     [InlineData("efficiency", "130 %", "efficiency 130 % is outside 0 to 100 %")]
     [InlineData("efficiency", "1.3", "efficiency 1.3 is outside 0 to 1")]
     [InlineData("efficiency", "0", "efficiency 0 is outside 0 (excluded) to 1")]
-    [InlineData("flow", "500 scfm", "500 scfm: scfm names no reference state (conventions differ by up to 8.7 %); write Nm3/h (0 degC) or Sm3/h (15 degC)")]
+    [InlineData("flow", "500 SCFM", "500 SCFM: SCFM names no reference state (conventions differ by up to 8.7 %); write scfm, NL/min or the like with --reference-state, or Nm3/h (0 degC) or Sm3/h (15 degC)")]
     [InlineData("flow", "500 cfm", "500 cfm: cfm is not a unit here; did you mean acfm?")]
     [InlineData("heat-loss", "30", "30 has no unit; write for example 30 kJ/kg")]
     [InlineData("heat", "--fluid", "--fluid is not a number; write for example 1.5 or 2e5")]
@@ -113,6 +113,7 @@ public sealed class ValueParserTests
     [InlineData("100 acfm", "VolumeFlow", 0.04719474432)]
     [InlineData("7200 Nm3/h", "NormalVolumeFlow", 2)]
     [InlineData("7200 Sm3/h", "StandardVolumeFlow", 2)]
+    [InlineData("100 scfm", "ReferenceVolumeFlow", 0.04719474432)]
     public void A_flow_tells_its_kind_by_its_unit(string text, string dimension, double si)
     {
         GivenValue given = ValueParser.Parse("--flow", QuantityCatalogue.Of(CaseOption.Flow), text, Ambient);

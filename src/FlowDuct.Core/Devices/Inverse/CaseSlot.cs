@@ -21,7 +21,7 @@ internal sealed record CaseSlot(string Name, QuantityRow Row, string Part, int S
 
         string part = name[..point];
         bool taken = part is "inlet" or "throat" or "exit" or "back";
-        return taken && QuantityCatalogue.TryFindStationQuantity(name.AsSpan(point + 1), out QuantityRow? row) && row.StationSlot is StationSymbol symbol
+        return taken && QuantityCatalogue.TryFindStationQuantity(name[(point + 1)..].Replace('_', '-'), out QuantityRow? row) && row.StationSlot is StationSymbol symbol
             ? new CaseSlot(name, row, part, (int)symbol)
             : null;
     }

@@ -55,6 +55,18 @@ public sealed class IdealGas : Fluid
     /// <summary>The gases in it with their mole fractions; a pure gas is its own only component.</summary>
     internal IReadOnlyList<GasComponent> Components => mixture?.Components ?? [new GasComponent(species, 1)];
 
+    /// <summary>Mole fraction of a gas by its formula; 0 where it is not in.</summary>
+    internal double FractionOf(string formula)
+    {
+        foreach (GasComponent gas in Components)
+        {
+            if (gas.Species.Formula == formula)
+                return gas.x;
+        }
+
+        return 0;
+    }
+
     /// <summary>What tells how far the real gas is from this one; null where one of its gases has no critical constants.</summary>
     internal SecondVirial? Virial => virial.Value;
 

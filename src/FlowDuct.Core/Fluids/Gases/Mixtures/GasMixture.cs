@@ -1,3 +1,4 @@
+using FlowDuct.Fluids.Gases.Coefficients;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Fluids.Gases;
@@ -8,13 +9,18 @@ public sealed class GasMixture
     // As many as a composition is ever printed with, and few enough to hide binary rounding.
     private const int Digits = 12;
 
+    private const string HumidAirName = "humid-air";
+
+    private const string HumidAirFormulation =
+        "NASA/TP-2002-211556 (2002), records Air, H2O, ideal-gas mixture; saturation of pure water by IAPWS R7-97(2012), below 0.01 degC over ice by R14-08(2011), no enhancement factor";
+
     private readonly GasComponent[] components;
 
-    private GasMixture(IReadOnlyList<GasFraction> given, FractionBasis basis, double sum, bool normalised)
+    private GasMixture(IReadOnlyList<GasFraction> given, FractionBasis basis, double sum, bool normalised, string? name = null)
     {
         (Basis, Sum, Normalised) = (basis, sum, normalised);
         components = [.. Moles(given, basis)];
-        Name = NameOf(given, basis);
+        Name = name ?? NameOf(given, basis);
         Gas = new IdealGas(this);
     }
 
@@ -36,8 +42,19 @@ public sealed class GasMixture
     /// <summary>The gases with their mole fractions, which add up to 1; gases of no fraction are left out.</summary>
     internal IReadOnlyList<GasComponent> Components => components;
 
+    /// <summary>True of air with water vapour, by the name of humid-air.</summary>
+    internal bool IsHumidAir => Name == HumidAirName;
+
+    /// <summary>Dry air, the record of the report.</summary>
+    internal static Species DryAir { get; } = Nasa9Records.Air();
+
+    /// <summary>
+    /// Water vapour, its heat capacity held below the fit as far down as that of air: it falls by 0.15 % from 200 K to 100 K (JANAF 1998, from memory).
+    /// </summary>
+    internal static Species Water { get; } = Nasa9Records.Find("H2O")! with { ContinuedDownTo = DryAir.ContinuedDownTo };
+
     /// <summary>The formulation, the basis of the fractions and whether they were normalised, in words.</summary>
-    internal string Formulation =>
+    internal string Formulation => IsHumidAir ? HumidAirFormulation :
         $"NASA/TP-2002-211556 (2002), records {string.Join(", ", components.Select(gas => gas.Species.Formula))}, ideal-gas mixture by {BasisWord(Basis)} fraction{NormalisedWords}";
 
     private string NormalisedWords => Normalised ? $"; the fractions add up to {NumberFormatter.Shortest(Sum, Digits)} and are normalised to 1" : string.Empty;
@@ -51,6 +68,10 @@ public sealed class GasMixture
             throw new ArgumentException("Fractions are not negative, each gas stands once, and together they are 1.", nameof(given));
         return new GasMixture(given, basis, sum.Value, sum.IsOff);
     }
+
+    /// <summary>Air with a mole fraction of water vapour, 0 to 1.</summary>
+    internal static GasMixture HumidAir(double x) =>
+        new([new GasFraction(DryAir, 1 - x), new GasFraction(Water, x)], FractionBasis.Mole, 1, false, HumidAirName);
 
     /// <summary>The word of a basis: mole or mass.</summary>
     internal static string BasisWord(FractionBasis basis) => basis == FractionBasis.Mass ? "mass" : "mole";

@@ -24,7 +24,7 @@ internal sealed class GasTransport
     /// <summary>The correlations of a mixture; null where one of its gases has none.</summary>
     internal static GasTransport? Of(IReadOnlyList<GasComponent> components)
     {
-        PureTransport?[] gases = [.. components.Select(gas => TransportRecords.Find(gas.Species.Formula))];
+        PureTransport?[] gases = [.. components.Select(gas => Pure(gas.Species.Formula))];
         return Array.Exists(gases, gas => gas is null) ? null : new GasTransport(components, gases!);
     }
 
@@ -37,6 +37,9 @@ internal sealed class GasTransport
         transport = factors is null ? Pure(T) : Mixed(T, factors);
         return true;
     }
+
+    private static PureTransport? Pure(string formula) =>
+        TransportRecords.Find(formula) is not PureTransport known ? null : formula == "H2O" ? new VapourTransport(known) : known;
 
     private Transport Pure(double T)
     {

@@ -17,6 +17,9 @@ internal static class Viscosity
         return Dilute(t) * Math.Exp(delta * PowerSum.Of((1 / t) - 1, delta - 1, WaterTables.ViscosityH1I, WaterTables.ViscosityH1J, WaterTables.ViscosityH1N)) * 1e-6;
     }
 
+    /// <summary>Viscosity of the vapour in the limit of zero density, Pa.s, from T, K. R12-08, Eq. (11).</summary>
+    internal static double OfDilute(double T) => Dilute(T / WaterConstants.Tc) * 1e-6;
+
     // Eq. (11): the limit of zero density.
     private static double Dilute(double t)
     {
