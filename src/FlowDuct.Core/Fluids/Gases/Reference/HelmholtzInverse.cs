@@ -1,0 +1,129 @@
+namespace FlowDuct.Fluids.Gases;
+
+/// <summary>A state from p and one property (h or s): Newton in density and temperature, with saturation and brackets as the safety net.</summary>
+internal static class HelmholtzInverse<TKind>
+    where TKind : struct, IHelmholtzKind
+{
+    private const int MostQuickSteps = 12;
+    private const int MostSteps = 100;
+
+    // Relative; a step this small is followed by one below the last digit.
+    private const double Closure = 1e-12;
+
+    // What a property may pass an end of the range by: rounding, times the sums it comes from.
+    private const double EndRounding = 1e-11;
+
+    internal static Outcome Solve(PhaseBoundary boundary, double p, double y, in FluidState near, out FluidState state)
+    {
+        state = default;
+        HelmholtzEquation of = boundary.Equation;
+        Outcome outcome = HelmholtzRange.OfPressure(of, p);
+        if (outcome != Outcome.Ok) return outcome;
+        if (!double.IsFinite(y)) return y > 0 ? Outcome.PairTooHigh : Outcome.PairTooLow;
+        if (near.Phase != Phase.Wet && TryQuick(boundary, p, y, near, out state)) return Outcome.Ok;
+        if (p >= boundary.pLeast && p < boundary.pc) return AcrossSaturation(boundary, p, y, out state);
+        PhaseSide side = p < boundary.pLeast ? PhaseSide.Vapour : PhaseSide.OnePhase;
+        return Between(boundary, p, y, side, HelmholtzRange.LeastTemperature(of, p), of.Parameters.Tmost, out state);
+    }
+
+    // Accepts only what is one phase beyond doubt.
+    private static bool TryQuick(PhaseBoundary boundary, double p, double y, in FluidState near, out FluidState state)
+    {
+        state = default;
+        HelmholtzEquation of = boundary.Equation;
+        double T = near.T, rho = near.Phase == Phase.None ? 0 : near.rho;
+        if (near.Phase == Phase.None) HelmholtzStart.FromPressure<TKind>(of, p, y, out rho, out T);
+        if (!Newton(of, p, y, rho, T, out HelmholtzPoint at)) return false;
+        if (!(at.T <= of.Parameters.Tmost && at.T >= HelmholtzRange.LeastTemperature(of, p)) || !boundary.IsClearlyStable(at)) return false;
+        state = HelmholtzState.Of(boundary, p, at);
+        return true;
+    }
+
+    private static Outcome AcrossSaturation(PhaseBoundary boundary, double p, double y, out FluidState state)
+    {
+        state = default;
+        HelmholtzEquation of = boundary.Equation;
+        if (!boundary.TryAtPressure(p, out HelmholtzPair pair)) return Outcome.NotConverged;
+        double liquid = TKind.Of(pair.Liquid), vapour = TKind.Of(pair.Vapour);
+        if (y > vapour) return Outside(boundary, p, y, pair.Vapour, PhaseSide.Vapour, pair.Vapour.T, of.Parameters.Tmost, out state);
+        if (y < liquid) return Outside(boundary, p, y, pair.Liquid, PhaseSide.Liquid, HelmholtzRange.LeastTemperature(of, p), pair.Liquid.T, out state);
+        double x = (y - liquid) / (vapour - liquid);
+        if (x is > 0 and < 1 && !boundary.IsPure) return Outcome.BetweenPhases;
+        state = HelmholtzState.Saturated(boundary, pair, double.IsNaN(x) ? 1 : Math.Clamp(x, 0, 1));
+        return Outcome.Ok;
+    }
+
+    // Beside saturation: Newton from the saturated state, accepted where it stays on its side.
+    private static Outcome Outside(PhaseBoundary boundary, double p, double y, in HelmholtzPoint edge, PhaseSide side, double Tlow, double Thigh, out FluidState state)
+    {
+        bool liquid = side == PhaseSide.Liquid;
+        if (Newton(boundary.Equation, p, y, edge.rho, edge.T, out HelmholtzPoint at)
+            && at.T >= Tlow && at.T <= Thigh && at.prho > 0 && (liquid ? at.rho >= edge.rho : at.rho <= edge.rho))
+        {
+            state = HelmholtzState.Of(boundary, p, at, side);
+            return Outcome.Ok;
+        }
+
+        return Between(boundary, p, y, side, Tlow, Thigh, out state);
+    }
+
+    // p and h or s of a thin gas are straight lines in the logarithms, those of a dense fluid in density and temperature themselves.
+    private static bool Newton(HelmholtzEquation of, double p, double y, double rho, double T, out HelmholtzPoint at)
+    {
+        at = default;
+        double scale = Math.Max(Math.Abs(y), TKind.Scale);
+        for (int i = 0; i < MostQuickSteps; i++)
+        {
+            at = of.At(rho, T);
+            bool thin = at.p > 0 && rho < of.rhoReducing;
+            double dp = thin ? at.p * Math.Log(p / at.p) : p - at.p, dy = y - TKind.Of(at);
+            double yrho = TKind.ByDensity(at), yT = TKind.ByTemperature(at), det = (at.prho * yT) - (at.pT * yrho);
+            double dT = ((at.prho * dy) - (dp * yrho)) / det, drho = ((dp * yT) - (at.pT * dy)) / det;
+            if (!(Math.Abs(dT) < T && Math.Abs(drho) < 3 * rho)) return false;
+            if (Math.Abs(drho) <= Closure * rho && Math.Abs(dT) <= Closure * T && Math.Abs(dy) <= Closure * scale) return true;
+            rho = thin ? rho * Math.Exp(Math.Clamp(drho / rho, -1, 1)) : Math.Max(rho + drho, rho / 2);
+            T = thin ? T * Math.Exp(Math.Clamp(dT / T, -0.5, 0.5)) : Math.Max(T + dT, T / 2);
+        }
+
+        return false;
+    }
+
+    // At constant p h and s rise with T: Newton in T inside a bracket, the density solved at each.
+    private static Outcome Between(PhaseBoundary boundary, double p, double y, PhaseSide side, double low, double high, out FluidState state)
+    {
+        double scale = Math.Max(Math.Abs(y), TKind.Scale), slack = EndRounding * scale;
+        HelmholtzPoint bottom = At(boundary, p, low, side), top = At(boundary, p, high, side);
+        (double atLow, double atHigh) = (TKind.Of(bottom) - y, TKind.Of(top) - y);
+        if (atLow >= 0) return End(boundary, p, bottom, side, atLow <= slack, Outcome.PairTooLow, out state);
+        if (atHigh <= 0) return End(boundary, p, top, side, atHigh >= -slack, Outcome.PairTooHigh, out state);
+        double T = low + ((high - low) * atLow / (atLow - atHigh));
+        HelmholtzPoint at = bottom;
+        for (int i = 0; i < MostSteps; i++)
+        {
+            at = At(boundary, p, T, side);
+            double excess = TKind.Of(at) - y;
+            if (Math.Abs(excess) <= 1e-15 * scale) break;
+            if (excess > 0) high = T;
+            else low = T;
+            double next = T - (excess / TKind.ByTemperatureAtPressure(at));
+            if (!(next > low && next < high)) next = (low + high) / 2;
+            if (Math.Abs(next - T) <= 2e-16 * T) break;
+            T = next;
+        }
+
+        state = HelmholtzState.Of(boundary, p, at, side);
+        return Outcome.Ok;
+    }
+
+    private static HelmholtzPoint At(PhaseBoundary boundary, double p, double T, PhaseSide side)
+    {
+        if (side == PhaseSide.OnePhase && T < boundary.Tc) side = boundary.SideOf(p, T);
+        return boundary.Equation.At(HelmholtzDensity.Of(boundary, p, T, side), T);
+    }
+
+    private static Outcome End(PhaseBoundary boundary, double p, in HelmholtzPoint at, PhaseSide side, bool within, Outcome otherwise, out FluidState state)
+    {
+        state = within ? HelmholtzState.Of(boundary, p, at, side) : default;
+        return within ? Outcome.Ok : otherwise;
+    }
+}
