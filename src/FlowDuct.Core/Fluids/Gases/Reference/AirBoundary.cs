@@ -2,8 +2,8 @@ namespace FlowDuct.Fluids.Gases;
 
 /// <summary>The bubble and the dew line of air, which are equations of their own: E. W. Lemmon et al., J. Phys. Chem. Ref. Data 29 (2000) 331-385.</summary>
 /// <remarks>
-/// The lines meet at the maxcondentherm (Tj, pj). The bubble line has its greatest pressure a little below that temperature: in the
-/// band of pressures between, both ends of the two-phase states lie on it.
+/// The lines meet at the maxcondentherm (Tj, pj). Between 132.1 K and there the bubble line stands up to 0.18 % above pj; pressures from pj on are
+/// taken as of one phase, which the equation of state is there: it has no loop above 132 K.
 /// </remarks>
 internal sealed class AirBoundary : PhaseBoundary
 {
@@ -12,18 +12,13 @@ internal sealed class AirBoundary : PhaseBoundary
 
     private const double Doubt = 1e-3;
     private const double LeastFactor = 0.2;
-    private readonly double Ttop;
 
     internal AirBoundary(HelmholtzEquation equation)
-        : base(equation)
-    {
-        Ttop = Top(equation);
-        (pc, pLeast) = (BubblePressure(Ttop), DewPressure(equation.Parameters.Tleast));
-    }
+        : base(equation) => pLeast = DewPressure(equation.Parameters.Tleast);
 
     internal override bool IsPure => false;
 
-    internal override double pc { get; }
+    internal override double pc => pj;
 
     internal override double pLeast { get; }
 
@@ -31,7 +26,7 @@ internal sealed class AirBoundary : PhaseBoundary
     {
         if (T >= Tc) return PhaseSide.OnePhase;
         if (p <= DewPressure(T)) return PhaseSide.Vapour;
-        return p >= BubblePressure(T) ? PhaseSide.Liquid : PhaseSide.Between;
+        return p >= Math.Min(BubblePressure(T), pj) ? PhaseSide.Liquid : PhaseSide.Between;
     }
 
     internal override bool IsClearlyStable(in HelmholtzPoint at)
@@ -43,13 +38,14 @@ internal sealed class AirBoundary : PhaseBoundary
             : at.p > BubblePressure(at.T) * (1 + Doubt) && at.rho > 0.98 * LiquidStart(at.T);
     }
 
-    // Rackett's form with the constants of the reducing point (common practice); a start only.
-    internal override double LiquidStart(double T) => Equation.rhoReducing * Math.Exp(1.26 * Math.Pow(Math.Max(1 - (T / Tc), 0), 2.0 / 7));
+    // Rackett's form (common practice) through the density at 1 atm; a start only.
+    internal override double LiquidStart(double T) => Equation.rhoReducing * Math.Exp(1.37 * Math.Pow(Math.Max(1 - (T / Tc), 0), 2.0 / 7));
+
+    internal override double LiquidFloor(double T) => T < 0.99 * Tc ? 0.9 * LiquidStart(T) : 0.5 * Equation.rhoReducing;
 
     internal override bool TryAtPressure(double p, out HelmholtzPair pair)
     {
-        double Tbubble = OnLine(p, bubble: true, Equation.Parameters.Tleast, Ttop);
-        double Tdew = p > pj ? OnLine(p, bubble: true, Ttop, Tc) : OnLine(p, bubble: false, Equation.Parameters.Tleast, Tc);
+        double Tbubble = OnLine(p, bubble: true), Tdew = OnLine(p, bubble: false);
         HelmholtzPoint liquid = Equation.At(HelmholtzDensity.Of(this, p, Tbubble, PhaseSide.Liquid), Tbubble);
         HelmholtzPoint vapour = Equation.At(HelmholtzDensity.Of(this, p, Tdew, PhaseSide.Vapour), Tdew);
         pair = new HelmholtzPair(p, Tdew, liquid, vapour);
@@ -62,35 +58,17 @@ internal sealed class AirBoundary : PhaseBoundary
     /// <summary>Pressure, Pa, at which gaseous air begins to condense at T, K.</summary>
     internal double DewPressure(double T) => pj * Math.Exp(Tc / T * Equation.Dew!.At(Math.Max(1 - (T / Tc), 0)));
 
-    // Bisection to the last bits: it runs beside saturation only.
-    private double OnLine(double p, bool bubble, double Trising, double Tend)
+    // Bisection to the last bits, from the cold end, where both lines rise: it runs beside saturation only.
+    private double OnLine(double p, bool bubble)
     {
-        (double low, double high) = (Trising, Tend);
-        bool rises = !(bubble && Tend == Tc);
+        (double low, double high) = (0.99 * Equation.Parameters.Tleast, Tc);
         for (int i = 0; i < 60 && high - low > 2e-16 * high; i++)
         {
             double T = (low + high) / 2;
-            if ((bubble ? BubblePressure(T) : DewPressure(T)) < p == rises) low = T;
+            if ((bubble ? BubblePressure(T) : DewPressure(T)) < p) low = T;
             else high = T;
         }
 
         return (low + high) / 2;
     }
-
-    // Golden section to the greatest pressure of the bubble line, which stands close to its end.
-    private static double Top(HelmholtzEquation of)
-    {
-        const double Golden = 0.6180339887498949;
-        (double a, double b) = (0.99 * of.Treducing, of.Treducing);
-        for (int i = 0; i < 60; i++)
-        {
-            double c = b - (Golden * (b - a)), d = a + (Golden * (b - a));
-            if (Rise(of, c) > Rise(of, d)) b = d;
-            else a = c;
-        }
-
-        return (a + b) / 2;
-    }
-
-    private static double Rise(HelmholtzEquation of, double T) => of.Treducing / T * of.Bubble!.At(1 - (T / of.Treducing));
 }

@@ -4,7 +4,10 @@ namespace FlowDuct.Fluids.Gases;
 internal static class HelmholtzDensity
 {
     private const int MostSteps = 200;
+
+    // Of density, and of pressure: rounding of the sums.
     private const double Closure = 1e-15;
+    private const double PressureClosure = 3e-15;
 
     // Reduced density beyond that of any state inside the ranges, up to their greatest pressures.
     private const double Most = 6;
@@ -15,7 +18,7 @@ internal static class HelmholtzDensity
         HelmholtzEquation of = boundary.Equation;
         double rhoc = of.rhoReducing, most = Most * rhoc, ideal = p / (of.R * T);
         if (side == PhaseSide.Vapour) return Newton(of, p, T, ideal, 0, rhoc);
-        if (side == PhaseSide.Liquid) return Newton(of, p, T, 1.01 * boundary.LiquidStart(T), 0.9 * rhoc, most);
+        if (side == PhaseSide.Liquid) return Newton(of, p, T, 1.01 * boundary.LiquidStart(T), boundary.LiquidFloor(T), most);
         return of.Pressure(rhoc, T, out _) >= p ? Newton(of, p, T, Math.Min(ideal, rhoc), 0, rhoc) : Newton(of, p, T, 1.5 * rhoc, rhoc, most);
     }
 
@@ -26,7 +29,7 @@ internal static class HelmholtzDensity
         for (int i = 0; i < MostSteps; i++)
         {
             double excess = of.Pressure(rho, T, out double slope) - p;
-            if (Math.Abs(excess) <= Closure * p) return rho;
+            if (Math.Abs(excess) <= PressureClosure * p || (slope > 0 && Math.Abs(excess) <= Closure * rho * slope)) return rho;
             if (excess > 0) high = Math.Min(high, rho);
             else low = Math.Max(low, rho);
             double next = slope > 0 ? rho - (excess / slope) : 0;

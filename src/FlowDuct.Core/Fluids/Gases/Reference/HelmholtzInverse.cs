@@ -1,17 +1,21 @@
+using FlowDuct.Flow;
+
 namespace FlowDuct.Fluids.Gases;
 
 /// <summary>A state from p and one property (h or s): Newton in density and temperature, with saturation and brackets as the safety net.</summary>
 internal static class HelmholtzInverse<TKind>
     where TKind : struct, IHelmholtzKind
 {
-    private const int MostQuickSteps = 12;
-    private const int MostSteps = 100;
+    private const int MostQuickSteps = 20;
 
     // Relative; a step this small is followed by one below the last digit.
     private const double Closure = 1e-12;
 
     // What a property may pass an end of the range by: rounding, times the sums it comes from.
     private const double EndRounding = 1e-11;
+
+    // Of temperature: what polishing may move.
+    private const double Polish = 1e-7;
 
     internal static Outcome Solve(PhaseBoundary boundary, double p, double y, in FluidState near, out FluidState state)
     {
@@ -88,7 +92,7 @@ internal static class HelmholtzInverse<TKind>
         return false;
     }
 
-    // At constant p h and s rise with T: Newton in T inside a bracket, the density solved at each.
+    // At constant p h and s rise with T: a bracketed search in T, the density solved at each.
     private static Outcome Between(PhaseBoundary boundary, double p, double y, PhaseSide side, double low, double high, out FluidState state)
     {
         double scale = Math.Max(Math.Abs(y), TKind.Scale), slack = EndRounding * scale;
@@ -96,23 +100,18 @@ internal static class HelmholtzInverse<TKind>
         (double atLow, double atHigh) = (TKind.Of(bottom) - y, TKind.Of(top) - y);
         if (atLow >= 0) return End(boundary, p, bottom, side, atLow <= slack, Outcome.PairTooLow, out state);
         if (atHigh <= 0) return End(boundary, p, top, side, atHigh >= -slack, Outcome.PairTooHigh, out state);
-        double T = low + ((high - low) * atLow / (atLow - atHigh));
-        HelmholtzPoint at = bottom;
-        for (int i = 0; i < MostSteps; i++)
-        {
-            at = At(boundary, p, T, side);
-            double excess = TKind.Of(at) - y;
-            if (Math.Abs(excess) <= 1e-15 * scale) break;
-            if (excess > 0) high = T;
-            else low = T;
-            double next = T - (excess / TKind.ByTemperatureAtPressure(at));
-            if (!(next > low && next < high)) next = (low + high) / 2;
-            if (Math.Abs(next - T) <= 2e-16 * T) break;
-            T = next;
-        }
+        var excess = new Excess(boundary, p, y, side);
+        HelmholtzPoint at = At(boundary, p, RootFinder.Find(ref excess, low, high, atLow, atHigh, 1e-15 * scale), side);
 
+        // Beside the critical point a temperature keeps too few digits to fix a state; density and temperature together do.
+        if (Newton(boundary.Equation, p, y, at.rho, at.T, out HelmholtzPoint polished) && Math.Abs(polished.T - at.T) <= Polish * at.T) at = polished;
         state = HelmholtzState.Of(boundary, p, at, side);
         return Outcome.Ok;
+    }
+
+    private readonly struct Excess(PhaseBoundary boundary, double p, double y, PhaseSide side) : IScalarFunction
+    {
+        public double At(double T) => TKind.Of(HelmholtzInverse<TKind>.At(boundary, p, T, side)) - y;
     }
 
     private static HelmholtzPoint At(PhaseBoundary boundary, double p, double T, PhaseSide side)

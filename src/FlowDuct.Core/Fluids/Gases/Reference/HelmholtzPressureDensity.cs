@@ -5,7 +5,7 @@ internal static class HelmholtzPressureDensity
 {
     private const int MostSteps = 100;
 
-    // What a pressure may pass an end of the range by: rounding, in a liquid many times that of the pressure itself.
+    // What a density may pass an end of the range by: rounding.
     private const double EndRounding = 1e-12;
 
     internal static Outcome Solve(PhaseBoundary boundary, double p, double rho, out FluidState state)
@@ -17,7 +17,8 @@ internal static class HelmholtzPressureDensity
         if (!(rho > 0)) return Outcome.PairTooHigh;
         if (!double.IsFinite(rho)) return Outcome.PairTooLow;
         (double low, double high) = (HelmholtzRange.LeastTemperature(of, p), of.Parameters.Tmost);
-        if (p < boundary.pLeast || p >= boundary.pc) return Between(boundary, p, rho, PhaseSide.OnePhase, low, high, out state);
+        if (p >= boundary.pc) return BesideCritical(boundary, p, rho, low, high, out state);
+        if (p < boundary.pLeast) return Between(boundary, p, rho, PhaseSide.Vapour, low, high, out state);
         if (!boundary.TryAtPressure(p, out HelmholtzPair pair)) return Outcome.NotConverged;
         if (rho > pair.Liquid.rho) return Between(boundary, p, rho, PhaseSide.Liquid, low, pair.Liquid.T, out state);
         if (rho < pair.Vapour.rho) return Between(boundary, p, rho, PhaseSide.Vapour, pair.Vapour.T, high, out state);
@@ -27,34 +28,45 @@ internal static class HelmholtzPressureDensity
         return Outcome.Ok;
     }
 
+    // The critical isotherm parts the dense states from the thin ones.
+    private static Outcome BesideCritical(PhaseBoundary boundary, double p, double rho, double low, double high, out FluidState state)
+    {
+        double Tc = boundary.Tc;
+        bool dense = low < Tc && rho > HelmholtzDensity.Of(boundary, p, Tc, PhaseSide.OnePhase);
+        return dense
+            ? Between(boundary, p, rho, PhaseSide.Liquid, low, Tc, out state)
+            : Between(boundary, p, rho, PhaseSide.OnePhase, Math.Max(low, Tc), high, out state);
+    }
+
+    // The line of constant density may leave the stable states at its cold end, so the search starts from the hot one.
     private static Outcome Between(PhaseBoundary boundary, double p, double rho, PhaseSide side, double low, double high, out FluidState state)
     {
         HelmholtzEquation of = boundary.Equation;
-        HelmholtzPoint bottom = of.At(rho, low), top = of.At(rho, high);
-        if (bottom.p >= p) return End(boundary, p, bottom, side, Outcome.PairTooLow, out state);
-        if (top.p <= p) return End(boundary, p, top, side, Outcome.PairTooHigh, out state);
-        double T = low + ((high - low) * (p - bottom.p) / (top.p - bottom.p));
-        HelmholtzPoint at = bottom;
+        double densest = HelmholtzDensity.Of(boundary, p, low, side);
+        if (rho >= densest * (1 - EndRounding)) return End(boundary, p, rho, densest, low, side, Outcome.PairTooLow, out state);
+        double thinnest = HelmholtzDensity.Of(boundary, p, high, side);
+        if (rho <= thinnest * (1 + EndRounding)) return End(boundary, p, rho, thinnest, high, side, Outcome.PairTooHigh, out state);
+        HelmholtzPoint at = of.At(rho, high);
+        double T = high;
         for (int i = 0; i < MostSteps; i++)
         {
-            at = of.At(rho, T);
             if (at.p > p) high = T;
             else low = T;
             double next = T - ((at.p - p) / at.pT);
-            if (!(next > low && next < high)) next = (low + high) / 2;
+            if (!(next >= low && next <= high)) next = (low + high) / 2;
             if (Math.Abs(next - T) <= 2e-16 * T) break;
             T = next;
+            at = of.At(rho, T);
         }
 
         state = HelmholtzState.Of(boundary, p, at, side);
         return Outcome.Ok;
     }
 
-    // Of a pressure that differs from the given one by rounding.
-    private static Outcome End(PhaseBoundary boundary, double p, in HelmholtzPoint at, PhaseSide side, Outcome otherwise, out FluidState state)
+    private static Outcome End(PhaseBoundary boundary, double p, double rho, double end, double T, PhaseSide side, Outcome otherwise, out FluidState state)
     {
-        bool within = Math.Abs(at.p - p) <= EndRounding * Math.Max(p, at.rho * at.prho);
-        state = within ? HelmholtzState.Of(boundary, p, at, side) : default;
+        bool within = Math.Abs(rho - end) <= EndRounding * end;
+        state = within ? HelmholtzState.Of(boundary, p, boundary.Equation.At(rho, T), side) : default;
         return within ? Outcome.Ok : otherwise;
     }
 }

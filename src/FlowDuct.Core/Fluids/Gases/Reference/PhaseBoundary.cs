@@ -45,4 +45,7 @@ internal abstract class PhaseBoundary(HelmholtzEquation equation)
 
     /// <summary>Density estimate, kg/m3, of the liquid next to saturation at T, K.</summary>
     internal abstract double LiquidStart(double T);
+
+    /// <summary>A density, kg/m3, that no stable liquid at T, K, has, yet above the states within the loop of the equation.</summary>
+    internal abstract double LiquidFloor(double T);
 }

@@ -56,6 +56,9 @@ internal sealed class SaturatedBoundary : PhaseBoundary
 
     internal override double LiquidStart(double T) => T < Tc ? HelmholtzSaturation.EstimateLiquid(Equation, T) : Equation.rhoReducing;
 
+    // Closer to the critical temperature the loop is narrower than the doubt about its end.
+    internal override double LiquidFloor(double T) => T < 0.999 * Tc ? 0.99 * LiquidStart(T) : Equation.rhoReducing;
+
     internal override bool TryAtPressure(double p, out HelmholtzPair pair)
     {
         if (p >= pBand) return Merged(p, Tc - ((pc - p) / critical.pT), out pair);
