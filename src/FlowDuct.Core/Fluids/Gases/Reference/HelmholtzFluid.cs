@@ -15,10 +15,13 @@ public sealed class HelmholtzFluid : Fluid
     private readonly PhaseBoundary boundary;
     private readonly Lazy<GasTransport?> transport;
 
-    internal HelmholtzFluid(string name, string formula, string equation, string paper, PhaseBoundary boundary)
+    internal HelmholtzFluid(string name, string formula, string authors, string paper, PhaseBoundary boundary)
     {
-        (Name, this.boundary, Paper) = (name, boundary, paper);
-        Formulation = $"{equation}, {paper}, reference equation of state";
+        (Name, this.boundary, Source) = (name, boundary, paper);
+        EquationParameters range = boundary.Equation.Parameters;
+        Formulation = string.Create(
+            CultureInfo.InvariantCulture,
+            $"{authors}, {paper}, reference equation of state, {range.Tleast} K to {range.Tmost} K, up to {range.pMost / 1e6} MPa");
         transport = new Lazy<GasTransport?>(() => GasTransport.OfGas(formula));
     }
 
@@ -36,8 +39,15 @@ public sealed class HelmholtzFluid : Fluid
     /// <inheritdoc/>
     public override bool HasSaturation => boundary.IsPure;
 
-    /// <summary>The paper, for messages.</summary>
-    internal string Paper { get; }
+    /// <inheritdoc/>
+    internal override string Source { get; }
+
+    /// <inheritdoc/>
+    internal override bool TryCriticalPoint(out double T, out double p)
+    {
+        (T, p) = (boundary.Tc, boundary.pc);
+        return true;
+    }
 
     /// <summary>The equation of state.</summary>
     internal HelmholtzEquation Equation => boundary.Equation;

@@ -7,7 +7,7 @@ internal readonly struct HelmholtzRefusal(HelmholtzFluid fluid)
 {
     private readonly HelmholtzEquation of = fluid.Equation;
     private readonly PhaseBoundary boundary = fluid.Boundary;
-    private readonly string source = fluid.Paper;
+    private readonly string source = fluid.Source;
 
     internal RangeViolation Of(Outcome outcome, StatePair pair, double first, double second) => outcome switch
     {
