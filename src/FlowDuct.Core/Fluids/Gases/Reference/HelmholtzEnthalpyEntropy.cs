@@ -39,7 +39,8 @@ internal static class HelmholtzEnthalpyEntropy
             double dh = h - at.h, ds = s - at.s, det = (at.hrho * at.sT) - (at.hT * at.srho);
             double drho = ((dh * at.sT) - (at.hT * ds)) / det, dT = ((at.hrho * ds) - (dh * at.srho)) / det;
             if (!(Math.Abs(dT) < T && Math.Abs(drho) < 5 * rho)) return false;
-            if (Math.Abs(drho) <= Closure * rho && Math.Abs(dT) <= Closure * T) return true;
+            bool still = Math.Abs(drho) <= Closure * rho && Math.Abs(dT) <= Closure * T;
+            if (still && Math.Abs(dh) <= Closure * Math.Max(Math.Abs(h), 1e3) && Math.Abs(ds) <= Closure * Math.Max(Math.Abs(s), 1)) return true;
             rho *= Math.Exp(Math.Clamp(drho / rho, -1, 1));
             T *= Math.Exp(Math.Clamp(dT / T, -0.5, 0.5));
         }

@@ -17,6 +17,9 @@ internal static class HelmholtzInverse<TKind>
     // Of temperature: what polishing may move.
     private const double Polish = 1e-7;
 
+    // Half-width of the loop in density at the edge of the band (SaturatedBoundary): 0.9 % for carbon dioxide.
+    private const double Sliver = 0.02;
+
     internal static Outcome Solve(PhaseBoundary boundary, double p, double y, in FluidState near, out FluidState state)
     {
         state = default;
@@ -48,13 +51,32 @@ internal static class HelmholtzInverse<TKind>
         state = default;
         HelmholtzEquation of = boundary.Equation;
         if (!boundary.TryAtPressure(p, out HelmholtzPair pair)) return Outcome.NotConverged;
+        if (pair.IsCritical && TryMerged(boundary, p, y, pair.Vapour, out state)) return Outcome.Ok;
         double liquid = TKind.Of(pair.Liquid), vapour = TKind.Of(pair.Vapour);
         if (y > vapour) return Outside(boundary, p, y, pair.Vapour, PhaseSide.Vapour, pair.Vapour.T, of.Parameters.Tmost, out state);
         if (y < liquid) return Outside(boundary, p, y, pair.Liquid, PhaseSide.Liquid, HelmholtzRange.LeastTemperature(of, p), pair.Liquid.T, out state);
         double x = (y - liquid) / (vapour - liquid);
-        if (x is > 0 and < 1 && !boundary.IsPure) return Outcome.BetweenPhases;
+        if (!boundary.IsPure) return OnEdge(boundary, p, y, pair, out state);
         state = HelmholtzState.Saturated(boundary, pair, double.IsNaN(x) ? 1 : Math.Clamp(x, 0, 1));
         return Outcome.Ok;
+    }
+
+    // A mixture has states on its two lines only; rounding may put one of them just inside.
+    private static Outcome OnEdge(PhaseBoundary boundary, double p, double y, in HelmholtzPair pair, out FluidState state)
+    {
+        double slack = EndRounding * Math.Max(Math.Abs(y), TKind.Scale);
+        bool vapour = TKind.Of(pair.Vapour) - y <= slack, liquid = y - TKind.Of(pair.Liquid) <= slack;
+        state = vapour ? HelmholtzState.Of(boundary, p, pair.Vapour, PhaseSide.Vapour) : liquid ? HelmholtzState.Of(boundary, p, pair.Liquid, PhaseSide.Liquid) : default;
+        return vapour || liquid ? Outcome.Ok : Outcome.BetweenPhases;
+    }
+
+    // Where the phases are taken as one, the equation goes on through the sliver of its loop that is left.
+    private static bool TryMerged(PhaseBoundary boundary, double p, double y, in HelmholtzPoint critical, out FluidState state)
+    {
+        bool found = Newton(boundary.Equation, p, y, critical.rho, critical.T, out HelmholtzPoint at)
+            && (at.prho > 0 || Math.Abs(at.rho - critical.rho) < Sliver * critical.rho);
+        state = found ? HelmholtzState.Of(boundary, p, at) : default;
+        return found;
     }
 
     // Beside saturation: Newton from the saturated state, accepted where it stays on its side.

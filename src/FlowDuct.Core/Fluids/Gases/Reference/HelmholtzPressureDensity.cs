@@ -8,6 +8,9 @@ internal static class HelmholtzPressureDensity
     // What a density may pass an end of the range by: rounding.
     private const double EndRounding = 1e-12;
 
+    // What a density may differ by from that of a line of air at the same pressure.
+    private const double EdgeRounding = 1e-11;
+
     internal static Outcome Solve(PhaseBoundary boundary, double p, double rho, out FluidState state)
     {
         state = default;
@@ -23,16 +26,24 @@ internal static class HelmholtzPressureDensity
         if (rho > pair.Liquid.rho) return Between(boundary, p, rho, PhaseSide.Liquid, low, pair.Liquid.T, out state);
         if (rho < pair.Vapour.rho) return Between(boundary, p, rho, PhaseSide.Vapour, pair.Vapour.T, high, out state);
         double x = ((1 / rho) - pair.Liquid.v) / (pair.Vapour.v - pair.Liquid.v);
-        if (x is > 0 and < 1 && !boundary.IsPure) return Outcome.BetweenPhases;
+        if (!boundary.IsPure) return OnEdge(boundary, p, rho, pair, out state);
         state = HelmholtzState.Saturated(boundary, pair, double.IsNaN(x) ? 1 : Math.Clamp(x, 0, 1));
         return Outcome.Ok;
     }
 
-    // The critical isotherm parts the dense states from the thin ones.
+    // A mixture has states on its two lines only; rounding may put one of them just inside.
+    private static Outcome OnEdge(PhaseBoundary boundary, double p, double rho, in HelmholtzPair pair, out FluidState state)
+    {
+        bool vapour = rho <= pair.Vapour.rho * (1 + EdgeRounding), liquid = rho >= pair.Liquid.rho * (1 - EdgeRounding);
+        state = vapour ? HelmholtzState.Of(boundary, p, pair.Vapour, PhaseSide.Vapour) : liquid ? HelmholtzState.Of(boundary, p, pair.Liquid, PhaseSide.Liquid) : default;
+        return vapour || liquid ? Outcome.Ok : Outcome.BetweenPhases;
+    }
+
+    // The critical isotherm parts the dense states from the thin ones: at constant density p rises with T.
     private static Outcome BesideCritical(PhaseBoundary boundary, double p, double rho, double low, double high, out FluidState state)
     {
         double Tc = boundary.Tc;
-        bool dense = low < Tc && rho > HelmholtzDensity.Of(boundary, p, Tc, PhaseSide.OnePhase);
+        bool dense = low < Tc && boundary.Equation.Pressure(rho, Tc, out _) > p;
         return dense
             ? Between(boundary, p, rho, PhaseSide.Liquid, low, Tc, out state)
             : Between(boundary, p, rho, PhaseSide.OnePhase, Math.Max(low, Tc), high, out state);
@@ -42,9 +53,10 @@ internal static class HelmholtzPressureDensity
     private static Outcome Between(PhaseBoundary boundary, double p, double rho, PhaseSide side, double low, double high, out FluidState state)
     {
         HelmholtzEquation of = boundary.Equation;
-        double densest = HelmholtzDensity.Of(boundary, p, low, side);
+        bool coldEnd = low > boundary.Tc || low == HelmholtzRange.LeastTemperature(of, p), hotEnd = high == of.Parameters.Tmost;
+        double densest = coldEnd ? HelmholtzDensity.Of(boundary, p, low, side) : double.PositiveInfinity;
         if (rho >= densest * (1 - EndRounding)) return End(boundary, p, rho, densest, low, side, Outcome.PairTooLow, out state);
-        double thinnest = HelmholtzDensity.Of(boundary, p, high, side);
+        double thinnest = hotEnd ? HelmholtzDensity.Of(boundary, p, high, side) : 0;
         if (rho <= thinnest * (1 + EndRounding)) return End(boundary, p, rho, thinnest, high, side, Outcome.PairTooHigh, out state);
         HelmholtzPoint at = of.At(rho, high);
         double T = high;
