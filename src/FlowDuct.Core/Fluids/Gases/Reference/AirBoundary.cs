@@ -13,6 +13,9 @@ internal sealed class AirBoundary : PhaseBoundary
     private const double Doubt = 1e-3;
     private const double LeastFactor = 0.2;
 
+    // Of Tj: where both lines end, rounding must not put a state between them.
+    private const double CornerRounding = 1e-9;
+
     internal AirBoundary(HelmholtzEquation equation)
         : base(equation) => pLeast = DewPressure(equation.Parameters.Tleast);
 
@@ -32,7 +35,7 @@ internal sealed class AirBoundary : PhaseBoundary
     internal override bool IsClearlyStable(in HelmholtzPoint at)
     {
         if (!(at.prho > 0)) return false;
-        if (at.T >= Tc) return true;
+        if (at.T >= Tc * (1 - CornerRounding)) return true;
         return at.rho < Equation.rhoReducing
             ? at.p < DewPressure(at.T) * (1 - Doubt) && at.p > LeastFactor * at.rho * Equation.R * at.T
             : at.p > BubblePressure(at.T) * (1 + Doubt) && at.rho > 0.98 * LiquidStart(at.T);

@@ -3,7 +3,7 @@ namespace FlowDuct.Fluids.Gases;
 /// <summary>A state from h and s: Newton in density and temperature, else along the isentrope in pressure, where dh = v dp.</summary>
 internal static class HelmholtzEnthalpyEntropy
 {
-    private const int MostQuickSteps = 12;
+    private const int MostQuickSteps = 20;
     private const int MostSteps = 120;
     private const double Closure = 1e-12;
 

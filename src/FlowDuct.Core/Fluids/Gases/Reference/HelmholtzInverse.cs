@@ -14,6 +14,9 @@ internal static class HelmholtzInverse<TKind>
     // What a property may pass an end of the range by: rounding, times the sums it comes from.
     private const double EndRounding = 1e-11;
 
+    // What it may pass a line of air by.
+    private const double EdgeRounding = 2e-13;
+
     // Of temperature: what polishing may move.
     private const double Polish = 1e-7;
 
@@ -64,7 +67,7 @@ internal static class HelmholtzInverse<TKind>
     // A mixture has states on its two lines only; rounding may put one of them just inside.
     private static Outcome OnEdge(PhaseBoundary boundary, double p, double y, in HelmholtzPair pair, out FluidState state)
     {
-        double slack = EndRounding * Math.Max(Math.Abs(y), TKind.Scale);
+        double slack = EdgeRounding * Math.Max(Math.Abs(y), TKind.Scale);
         bool vapour = TKind.Of(pair.Vapour) - y <= slack, liquid = y - TKind.Of(pair.Liquid) <= slack;
         state = vapour ? HelmholtzState.Of(boundary, p, pair.Vapour, PhaseSide.Vapour) : liquid ? HelmholtzState.Of(boundary, p, pair.Liquid, PhaseSide.Liquid) : default;
         return vapour || liquid ? Outcome.Ok : Outcome.BetweenPhases;
