@@ -36,6 +36,7 @@ internal static class Kernels
         [
             (GasCatalogue.Air, Grid(GasCatalogue.Air, 150, 1500)),
             (WaterFluid.Instance, Grid(WaterFluid.Instance, 300, 1000)),
+            (ReferenceEquations.Nitrogen, Grid(ReferenceEquations.Nitrogen, 150, 600)),
         ];
         Dictionary<(string, string), List<double>> times = [];
         double sink = 0;

@@ -24,6 +24,9 @@ internal static class Nozzles
         ("superheated steam: shock in the divergence", Inlets(WaterFluid.Instance, (u, w) => Superheated(3e5 + (u * 20e5), 150 + (w * 100))), Shock),
         ("air: exit and choked throat", Inlets(GasCatalogue.Air, (u, w) => At(GasCatalogue.Air, 3e5 + (u * 20e5), 300 + (w * 300))), Convergent),
         ("air: shock in the divergence", Inlets(GasCatalogue.Air, (u, w) => At(GasCatalogue.Air, 3e5 + (u * 20e5), 400 + (w * 300))), Shock),
+        ("nitrogen by its reference equation: exit and choked throat", Inlets(ReferenceEquations.Nitrogen, (u, w) => At(ReferenceEquations.Nitrogen, 10e5 + (u * 190e5), 250 + (w * 250))), Convergent),
+        ("nitrogen by its reference equation: shock in the divergence", Inlets(ReferenceEquations.Nitrogen, (u, w) => At(ReferenceEquations.Nitrogen, 10e5 + (u * 190e5), 300 + (w * 200))), Shock),
+        ("wet carbon dioxide by its reference equation: exit and choked throat", Inlets(ReferenceEquations.CarbonDioxide, (u, w) => Moist(15e5 + (u * 40e5), 0.85 + (w * 0.14))), WetConvergent),
     ];
 
     internal static int Run(string[] args)
@@ -89,6 +92,10 @@ internal static class Nozzles
     private static RatingOutcome Convergent(in RatingInlet inlet, double u, out NozzleRating rating) =>
         ConvergentNozzle.Rate(inlet, s_convergent, (0.1 + (0.3 * u)) * inlet.p0, out rating);
 
+    // Below 0.4 of p0 most of these would freeze.
+    private static RatingOutcome WetConvergent(in RatingInlet inlet, double u, out NozzleRating rating) =>
+        ConvergentNozzle.Rate(inlet, s_convergent, (0.4 + (0.1 * u)) * inlet.p0, out rating);
+
     // 1.8 times the throat area: a shock stands inside from about 0.54 to 0.92 of p0.
     private static RatingOutcome Shock(in RatingInlet inlet, double u, out NozzleRating rating)
     {
@@ -117,6 +124,12 @@ internal static class Nozzles
     private static FluidState Wet(double p, double x)
     {
         WaterFluid.Instance.FromPX(p, x, out FluidState at);
+        return at;
+    }
+
+    private static FluidState Moist(double p, double x)
+    {
+        ReferenceEquations.CarbonDioxide.FromPX(p, x, out FluidState at);
         return at;
     }
 

@@ -33,7 +33,7 @@ internal sealed class CaseBinder
     {
         string name = _arguments.Value("--fluid")!;
         FractionBasis basis = Choice("--fractions", FractionBasis.Mole, ("mole", FractionBasis.Mole), ("mass", FractionBasis.Mass));
-        if (FluidCatalogue.Find(name, basis) is Fluid fluid) return RefuseIdleFractions(fluid);
+        if (FluidCatalogue.Find(name, basis) is Fluid fluid) return ByEquation(name, RefuseIdleFractions(fluid));
         string? near = Usage.Nearest(name, FluidCatalogue.Words);
         throw Usage.Refuse("--fluid", $"{Echo.Ascii(name)} is not a fluid of this version", near is null ? "flowduct fluids lists them" : $"did you mean {near}?");
     }
@@ -144,6 +144,16 @@ internal sealed class CaseBinder
     private Fluid RefuseIdleFractions(Fluid fluid) => !_arguments.Has("--fractions") || fluid is IdealGas { Mixture.IsHumidAir: false }
         ? fluid
         : throw Usage.Refuse("--fractions", $"{fluid.Name} is no mixture and has no fractions", "leave it out, or give --fluid such as N2=0.72,CO2=0.13,H2O=0.15");
+
+    private Fluid ByEquation(string name, Fluid fluid)
+    {
+        EquationOfState chosen = Choice("--equation-of-state", EquationOfState.Ideal, ("ideal", EquationOfState.Ideal), ("reference", EquationOfState.Reference));
+        if (!_arguments.Has("--equation-of-state")) return fluid;
+        if (fluid is not IdealGas) throw Usage.Refuse("--equation-of-state", $"{fluid.Name} has one equation of state here, {fluid.Source}", "leave it out");
+        if (chosen == EquationOfState.Ideal) return fluid;
+        return ReferenceEquations.Find(name) ?? throw Usage.Refuse(
+            "--equation-of-state", $"{Echo.Ascii(name)} has no reference equation of state here", $"leave it out for an ideal gas; {string.Join(", ", ReferenceEquations.Names)} have one");
+    }
 
     private void ReadAmbient()
     {

@@ -1,5 +1,6 @@
 using FlowDuct.Cli.Rendering;
 using FlowDuct.Fluids;
+using FlowDuct.Fluids.Gases;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Cli.CommandLine;
@@ -19,6 +20,7 @@ internal static class Listings
             TextWrap.Write(to, "  what        ", row.Description, 14);
             TextWrap.Write(to, "  properties  ", fluid.Formulation, 14);
             TextWrap.Write(to, "  range       ", fluid.RangeText, 14);
+            if (ReferenceEquations.Find(row.Name) is HelmholtzFluid real) TextWrap.Write(to, "  reference   ", $"--equation-of-state reference: {real.Source}, {real.RangeText}", 14);
         }
     }
 

@@ -1,6 +1,7 @@
 using FlowDuct.Devices;
 using FlowDuct.Devices.Inverse;
 using FlowDuct.Fluids;
+using FlowDuct.Fluids.Gases;
 using FlowDuct.Quantities;
 
 namespace FlowDuct.Errors;
@@ -54,8 +55,8 @@ internal static class Refusals
     {
         if (outcome == Outcome.NoSaturation && !fluid.HasSaturation)
         {
-            return NoAnswer(
-                PlaceOf(station), $"{fluid.Name} is an ideal gas here and has no saturation line", "give p with T, h, s or rho");
+            string why = fluid is HelmholtzFluid ? "is taken as one pure fluid by this equation, which has no quality between its dew and bubble lines" : "is an ideal gas here and has no saturation line";
+            return NoAnswer(PlaceOf(station), $"{fluid.Name} {why}", "give p with T, h, s or rho");
         }
 
         return NoAnswer(PlaceOf(station), Describe(fluid.Explain(outcome, pair.Call, first, second)), $"valid range: {fluid.RangeText}");

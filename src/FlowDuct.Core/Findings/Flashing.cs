@@ -12,7 +12,7 @@ internal static class Flashing
         bool liquid = a.Inlet.State.Phase is Phase.Liquid or Phase.SaturatedLiquid;
         if (!liquid || a.Exit.State.Phase != Phase.Wet) return null;
         double x = a.Exit.State.x;
-        return new Finding("flashing", Severity.Caution, x, 0, "IAPWS R7-97(2012), equilibrium", text =>
+        return new Finding("flashing", Severity.Caution, x, 0, $"{a.Fluid.Source}, equilibrium", text =>
             $"the liquid flashes: {text.Text(x, Dimension.Ratio, 3)} of the mass leaves as vapour at equilibrium; a short nozzle passes more, unflashed");
     }
 }

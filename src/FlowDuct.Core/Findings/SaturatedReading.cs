@@ -11,7 +11,7 @@ internal static class SaturatedReading
     {
         if (!a.SaturatedReading) return null;
         a.Fluid.TrySaturationTemperature(a.Exit.State.p, out double Tsat);
-        return new Finding("saturated-reading", Severity.Caution, a.Exit.State.T, Tsat, "IAPWS R7-97(2012), saturation line", text => Message(a, Tsat, text));
+        return new Finding("saturated-reading", Severity.Caution, a.Exit.State.T, Tsat, $"{a.Fluid.Source}, saturation line", text => Message(a, Tsat, text));
     }
 
     private static string Message(DeviceAnswer a, double Tsat, IQuantityText text)

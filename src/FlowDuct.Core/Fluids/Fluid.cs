@@ -21,6 +21,16 @@ public abstract class Fluid
     /// <summary>True where the fluid has a liquid and a saturation line.</summary>
     public abstract bool HasSaturation { get; }
 
+    /// <summary>The publication alone, short, for the standing of a finding.</summary>
+    internal virtual string Source => Formulation;
+
+    /// <summary>Critical temperature, K, and pressure, Pa; false where the model has no critical point.</summary>
+    internal virtual bool TryCriticalPoint(out double T, out double p)
+    {
+        (T, p) = (0, 0);
+        return false;
+    }
+
     /// <summary>Least pressure of the formulation, Pa (a positive floor for brackets).</summary>
     internal abstract double LeastPressure { get; }
 

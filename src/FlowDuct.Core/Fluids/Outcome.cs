@@ -27,6 +27,9 @@ internal enum Outcome
     /// <summary>The fluid has no saturation line, or none at this pressure or temperature.</summary>
     NoSaturation,
 
+    /// <summary>Between the bubble and the dew line of a mixture that is taken as one pure fluid: no state there.</summary>
+    BetweenPhases,
+
     /// <summary>Quality outside 0 to 1.</summary>
     QualityOutsideRange,
 

@@ -6,7 +6,7 @@ public enum Phase
     /// <summary>No state was computed.</summary>
     None,
 
-    /// <summary>Ideal gas: the model knows no other phase.</summary>
+    /// <summary>Ideal gas, where the model knows no other phase; or a real gas above its critical temperature and below its critical pressure.</summary>
     Gas,
 
     /// <summary>Liquid below its saturation temperature (subcooled).</summary>

@@ -19,6 +19,11 @@ internal static class ReferenceVolume
     internal static double? Density(Fluid fluid, Dimension flow) =>
         Density(fluid, Pressure, flow == Dimension.NormalVolumeFlow ? NormalTemperature : StandardTemperature);
 
-    /// <summary>Mass of a cubic metre of ideal gas at p, Pa, and T, K; kg/m3; null where the fluid is no ideal gas.</summary>
-    internal static double? Density(Fluid fluid, double p, double T) => fluid is IdealGas gas ? p / (gas.R * T) : null;
+    /// <summary>Mass of a cubic metre of ideal gas at p, Pa, and T, K; kg/m3; null where the fluid is no gas. A real gas is counted as the ideal one of its molar mass.</summary>
+    internal static double? Density(Fluid fluid, double p, double T) => fluid switch
+    {
+        IdealGas gas => p / (gas.R * T),
+        HelmholtzFluid real => p * real.Equation.Parameters.M / (IdealGas.MolarGasConstant * T),
+        _ => null,
+    };
 }

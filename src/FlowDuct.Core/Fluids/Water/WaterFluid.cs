@@ -28,6 +28,14 @@ public sealed class WaterFluid : Fluid
     /// <inheritdoc/>
     public override bool HasSaturation => true;
 
+    internal override string Source => "IAPWS R7-97(2012)";
+
+    internal override bool TryCriticalPoint(out double T, out double p)
+    {
+        (T, p) = (WaterConstants.Tc, WaterConstants.pc);
+        return true;
+    }
+
     internal override double LeastPressure => WaterConstants.pLeast;
 
     internal override double GreatestPressure => WaterConstants.pMost;

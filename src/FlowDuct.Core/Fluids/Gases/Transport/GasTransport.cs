@@ -28,6 +28,9 @@ internal sealed class GasTransport
         return Array.Exists(gases, gas => gas is null) ? null : new GasTransport(components, gases!);
     }
 
+    /// <summary>The correlation of one gas by its formula; null where it has none.</summary>
+    internal static GasTransport? OfGas(string formula) => TransportRecords.Find(formula) is PureTransport gas ? new GasTransport([], [gas]) : null;
+
     /// <summary>Viscosity, Pa.s, and conductivity, W/(m.K), at T, K; false outside the fits.</summary>
     internal bool TryAt(double T, out Transport transport)
     {
