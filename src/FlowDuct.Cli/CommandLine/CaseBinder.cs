@@ -180,8 +180,8 @@ internal sealed class CaseBinder
             GivenValue value = ValueParser.Parse(name, row, text, AmbientPressure);
             double size = option switch
             {
-                CaseOption.Flow => AmountToMass(fluid, value.Unit.Dimension),
-                CaseOption.Heat or CaseOption.HeatLoss when value.Unit.Dimension == Dimension.HeatRate => 1 / MassFlow(name, slots, volume),
+                CaseOption.Flow => OptionRules.MassOfAmount("--flow", fluid, value.Unit.Dimension),
+                CaseOption.Heat or CaseOption.HeatLoss when value.Unit.Dimension == Dimension.HeatRate => 1 / OptionRules.MassFlowBeside(name, slots, volume),
                 _ => 1,
             };
             volume |= option == CaseOption.Flow && value.Unit.Dimension == Dimension.VolumeFlow;
@@ -189,27 +189,7 @@ internal sealed class CaseBinder
             slots.Set((int)option, value.Si * size, value.HalfWidth * size);
         }
 
-        RefuseRecoveryAboveOne(slots);
+        OptionRules.RequireRecovery("--recovery", slots, _arguments.Value("--recovery-basis") == "dynamic");
         return (slots, volume, difference);
     }
-
-    // On the stagnation head a recovery of one stops the flow; on the dynamic head compressibility adds a little.
-    private void RefuseRecoveryAboveOne(in GivenSlots slots)
-    {
-        bool dynamic = _arguments.Value("--recovery-basis") == "dynamic";
-        if (!dynamic && slots.Has((int)CaseOption.Recovery) && slots.Value((int)CaseOption.Recovery) > 1)
-            throw Usage.Refuse("--recovery", $"{_arguments.Value("--recovery")} is above 1, the recovery of a flow brought to rest without loss", "give a ratio up to 1, or --recovery-basis dynamic");
-    }
-
-    private static double AmountToMass(Fluid fluid, Dimension dimension)
-    {
-        if (dimension is not (Dimension.NormalVolumeFlow or Dimension.StandardVolumeFlow)) return 1;
-        return ReferenceVolume.Density(fluid, dimension) ?? throw Usage.Refuse(
-            "--flow", $"normal and standard volumes are amounts of ideal gas, and {fluid.Name} is none", "give a mass flow, or an actual volume flow in m3/h");
-    }
-
-    // Options come in the order of the catalogue, in which the flow stands before the heat.
-    private static double MassFlow(string name, in GivenSlots slots, bool volume) => slots.Has((int)CaseOption.Flow) && !volume
-        ? slots.Value((int)CaseOption.Flow)
-        : throw Usage.Refuse(name, "a heat rate needs the mass flow that takes it", "add --flow in kg/s, or give the heat in kJ/kg");
 }
