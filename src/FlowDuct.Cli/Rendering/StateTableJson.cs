@@ -12,7 +12,7 @@ internal static class StateTableJson
     {
         using var json = new Utf8JsonWriter(to, JsonNumbers.Options);
         json.WriteStartObject();
-        JsonHead.Write(json, FindingRules.Pass(table.Findings, options.Strict) ? "pass" : "fail", table.Fluid);
+        JsonHead.Write(json, FindingRules.Pass(table.Findings, options.Strict) ? "pass" : "fail", table.Fluid, null);
         Case(json, table);
         json.WriteStartObject("units");
         JsonStation.WriteUnits(json);
