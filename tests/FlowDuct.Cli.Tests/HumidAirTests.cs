@@ -43,6 +43,18 @@ public class HumidAirTests
         Assert.Contains("inlet.dew_point", run.Output, StringComparison.Ordinal);
     }
 
+    // The velocity in the pipe follows from throat and pressures, and with it the static state that the humidity belongs to.
+    [Theory]
+    [InlineData("p0=3 bar, T0=60 degC, d=40 mm", "--back \"p=2.8 bar\"")]
+    [InlineData("p=3 bar, T=60 degC, d=40 mm", "--flow \"1200 Nm3/h dry\"")]
+    public void A_venturi_takes_it_too(string inlet, string flow)
+    {
+        using JsonDocument json = JsonDocument.Parse(CommandRun.RunLine($"flowduct venturi --fluid humid-air --inlet \"{inlet}, humidity=60%\" --throat \"d=30 mm\" --exit \"d=60 mm\" {flow} --format json").Output);
+        JsonElement at = json.RootElement.GetProperty("stations").GetProperty("inlet");
+        Assert.Equal(0.6, at.GetProperty("humidity").GetDouble(), 1e-9);
+        Assert.True(at.GetProperty("V").GetDouble() > 50);
+    }
+
     [Theory]
     [InlineData(2, State + "\"p=1 bar, T=20 degC\"", "--at: nothing says how humid the air is\n  add one of humidity, dew-point, humidity-ratio, for example humidity=60%; --fluid air is dry")]
     [InlineData(2, State + "\"p=1 bar, T=20 degC, humidity=50%, dew-point=9 degC\"", "--at: humidity, dew-point say the same twice\n  keep one of them")]

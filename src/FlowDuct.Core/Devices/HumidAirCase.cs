@@ -27,7 +27,10 @@ internal static class HumidAirCase
     internal static Fluid Resolve(Fluid fluid, in GivenSlots slots, Func<Fluid, FluidState> solve) =>
         GivenHumidity.Read(fluid, slots, Station.At) is GivenHumidity given ? Find(given, solve) : fluid;
 
-    private static FluidState InletState(DeviceCase c) => Rating.NozzleGeometryReader.Asks(c) ? Rating.RatedInlet.Solve(c).Inlet.State : Inlet.Solve(c).State;
+    private static FluidState InletState(DeviceCase c) =>
+        c.Device == DeviceKind.Venturi ? Venturis.VenturiSolver.Stations(c).Inlet.State
+        : Rating.NozzleGeometryReader.Asks(c) ? Rating.RatedInlet.Solve(c).Inlet.State
+        : Inlet.Solve(c).State;
 
     // A reference volume is an amount of gas: its mass goes with the composition.
     private static DeviceCase With(DeviceCase c, IdealGas gas)

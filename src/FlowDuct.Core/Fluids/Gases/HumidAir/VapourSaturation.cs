@@ -4,7 +4,7 @@ using FlowDuct.Fluids.Water;
 namespace FlowDuct.Fluids.Gases;
 
 /// <summary>Saturation of pure water vapour: over liquid from the triple point up, over ice below it, 50 K to the critical temperature.</summary>
-/// <remarks>IAPWS R7-97(2012), Eqs. (30) and (31), and R14-08(2011), Eq. (6). Both have 611.657 Pa at 273.16 K within 3e-8 of it.</remarks>
+/// <remarks>IAPWS R7-97(2012), Eqs. (30) and (31), and R14-08(2011), Eq. (6). At 273.16 K both have 611.657 Pa, to 2e-11 of it.</remarks>
 internal static class VapourSaturation
 {
     /// <summary>Least temperature, K, of the sublimation line.</summary>
