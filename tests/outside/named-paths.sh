@@ -5,9 +5,9 @@ cd "$(dirname "$0")/../.."
 
 # named FILE: the words in backticks that hold a slash or end like a file of this repository.
 named() {
-    # Blocks between fences are commands; a pattern or an option is no path.
+    # Blocks between fences are commands; a pattern, an option or a unit of flow is no path.
     awk '/^```/ { fenced = !fenced; next } !fenced' "$1" | grep -oE '`[^`]+`' | tr -d '`' |
-        grep -E '^[A-Za-z0-9._/-]+$' | grep -E '^\.?[A-Za-z]+.*/|\.(md|sln|props|json|editorconfig)$' | grep -vE '^J/' | sort -u || true
+        grep -E '^[A-Za-z0-9._/-]+$' | grep -E '^\.?[A-Za-z]+.*/|\.(md|sln|props|json|editorconfig)$' | grep -vE '^J/|^[A-Za-z0-9]{1,3}/(s|h|min)$' | sort -u || true
 }
 
 checked=0
