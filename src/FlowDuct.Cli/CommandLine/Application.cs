@@ -1,3 +1,4 @@
+using FlowDuct.Cli.Batch;
 using FlowDuct.Cli.Rendering;
 using FlowDuct.Devices;
 using FlowDuct.Devices.Inverse;
@@ -17,13 +18,17 @@ internal static class Application
     /// <param name="stdout">Takes the answer, written once.</param>
     /// <param name="stderr">Takes refusals.</param>
     /// <param name="terminal">True where the answer is shown on a terminal.</param>
+    /// <param name="stdin">Opens the standard input, where a sheet comes from it; null where there is none.</param>
+    /// <param name="errorTerminal">True where progress may be shown on stderr.</param>
     /// <returns>The documented exit status.</returns>
-    internal static int Run(string[] args, Stream stdout, Stream stderr, bool terminal)
+    internal static int Run(string[] args, Stream stdout, Stream stderr, bool terminal, Func<Stream>? stdin = null, bool errorTerminal = false)
     {
         try
         {
             using var memory = new MemoryStream(4096);
             Arguments arguments = Arguments.Read(args);
+            if (arguments is { Command: CommandName.Run, WantsHelp: false, WantsVersion: false })
+                return BatchCommand.Run(arguments, new Streams(stdin ?? (() => Stream.Null), stdout, stderr, errorTerminal));
             int status = Answer(arguments, memory, terminal);
             Deliver(arguments, memory, stdout);
             return status;
@@ -118,12 +123,11 @@ internal static class Application
         }
         catch (Exception failure) when (failure is IOException or UnauthorizedAccessException or NotSupportedException or ArgumentException)
         {
-            string place = file is null ? "standard output" : "--output " + file;
-            throw new FlowDuctException(new Refusal(RefusalKind.NotWritten, place, $"could not be written: {OutputFile.Reason(failure)}", "free some space or name another file"));
+            throw OutputFile.NotWritten(file, failure);
         }
     }
 
-    private static void Complain(Stream stderr, string text)
+    internal static void Complain(Stream stderr, string text)
     {
         using var memory = new MemoryStream();
         using (StreamWriter to = Output.WriterOn(memory))

@@ -6,6 +6,9 @@ namespace FlowDuct.Cli.CommandLine;
 /// <summary>What was typed: the command, the value of each option, and words beside them.</summary>
 internal sealed class Arguments
 {
+    /// <summary>The word that stands for the standard input where a file is asked for.</summary>
+    internal const string StandardInput = "-";
+
     private readonly Dictionary<string, string> _values = [];
 
     internal CommandName Command { get; private init; }
@@ -48,7 +51,7 @@ internal sealed class Arguments
 
         var configuration = new ParserConfiguration { EnablePosixBundling = false, ResponseFileTokenReplacer = null };
         // The parser drops a leading [word] as a directive and a leading repetition of the command: such words are taken before.
-        int leading = Array.FindIndex(args, 1, word => word.StartsWith('-')) is int first and > 0 ? first : args.Length;
+        int leading = Array.FindIndex(args, 1, word => word.StartsWith('-') && word != StandardInput) is int first and > 0 ? first : args.Length;
         ParseResult result = CommandLineParser.Parse(command, args[leading..], configuration);
         var arguments = new Arguments
         {
@@ -76,13 +79,20 @@ internal sealed class Arguments
 
         if (twice is not null) throw Usage.Twice(twice);
 
-        if (Command != CommandName.Units && Words.Count > 0) throw Usage.UnknownOption(Words[0], Command);
-        if (Words.FirstOrDefault(word => word.StartsWith('-')) is string stray) throw Usage.UnknownOption(stray, Command);
+        if (Words.Count > MostWords(Command)) throw Usage.UnknownOption(Words[MostWords(Command)], Command);
+        if (Words.FirstOrDefault(word => word.StartsWith('-') && word != StandardInput) is string stray) throw Usage.UnknownOption(stray, Command);
         foreach ((OptionRow row, _) in options)
         {
             if (row.IsRequired && !Has(row.Name)) throw Usage.Missing(row);
         }
     }
+
+    private static int MostWords(CommandName command) => command switch
+    {
+        CommandName.Units => int.MaxValue,
+        CommandName.Run => 1,
+        _ => 0,
+    };
 
     // A forgotten value leaves nothing, or makes the next option look like one.
     private static string ValueOf(OptionRow row, OptionResult given)

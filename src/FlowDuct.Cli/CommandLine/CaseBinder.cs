@@ -206,7 +206,7 @@ internal sealed class CaseBinder
             double size = option switch
             {
                 CaseOption.Flow => massPerVolume,
-                CaseOption.Heat or CaseOption.HeatLoss when value.Unit.Dimension == Dimension.HeatRate => 1 / MassFlow(name, slots, volume),
+                CaseOption.Heat or CaseOption.HeatLoss when value.Unit.Dimension == Dimension.HeatRate => 1 / OptionRules.MassFlowBeside(name, slots, volume),
                 _ => 1,
             };
             volume |= option == CaseOption.Flow && value.Unit.Dimension == Dimension.VolumeFlow;
@@ -214,16 +214,8 @@ internal sealed class CaseBinder
             slots.Set((int)option, value.Si * size, value.HalfWidth * size);
         }
 
-        RefuseRecoveryAboveOne(slots);
+        OptionRules.RequireRecovery("--recovery", slots, _arguments.Value("--recovery-basis") == "dynamic");
         return (slots, volume, difference);
-    }
-
-    // On the stagnation head a recovery of one stops the flow; on the dynamic head compressibility adds a little.
-    private void RefuseRecoveryAboveOne(in GivenSlots slots)
-    {
-        bool dynamic = _arguments.Value("--recovery-basis") == "dynamic";
-        if (!dynamic && slots.Has((int)CaseOption.Recovery) && slots.Value((int)CaseOption.Recovery) > 1)
-            throw Usage.Refuse("--recovery", $"{_arguments.Value("--recovery")} is above 1, the recovery of a flow brought to rest without loss", "give a ratio up to 1, or --recovery-basis dynamic");
     }
 
     // The mass that goes with a reference volume of humid air is known only once the inlet is.
@@ -236,9 +228,4 @@ internal sealed class CaseBinder
                 throw Usage.Refuse(option, "a heat rate needs the mass flow that takes it, and that of humid air by volume follows from its humidity", "give --flow in kg/s, or the heat in kJ/kg");
         }
     }
-
-    // Options come in the order of the catalogue, in which the flow stands before the heat.
-    private static double MassFlow(string name, in GivenSlots slots, bool volume) => slots.Has((int)CaseOption.Flow) && !volume
-        ? slots.Value((int)CaseOption.Flow)
-        : throw Usage.Refuse(name, "a heat rate needs the mass flow that takes it", "add --flow in kg/s, or give the heat in kJ/kg");
 }

@@ -25,6 +25,9 @@ internal enum CommandName
     /// <summary>The printed check values of the formulations, computed here.</summary>
     SelfCheck = 32,
 
+    /// <summary>Every row of a sheet.</summary>
+    Run = 128,
+
     /// <summary>A nozzle followed by a diffuser.</summary>
     Venturi = 64,
 
@@ -41,5 +44,5 @@ internal enum CommandName
     Answering = State | Devices,
 
     /// <summary>All commands.</summary>
-    All = Answering | Fluids | Units | SelfCheck,
+    All = Answering | Fluids | Units | SelfCheck | Run,
 }

@@ -1,4 +1,5 @@
 using System.Text;
+using Microsoft.Win32.SafeHandles;
 
 namespace FlowDuct.Cli.CommandLine;
 
@@ -17,8 +18,21 @@ internal static class Output
         return descriptor == 1 ? Console.OpenStandardOutput() : Console.OpenStandardError();
     }
 
-    /// <summary>True where the answer is shown on a terminal.</summary>
-    internal static bool IsTerminal() => OperatingSystem.IsWindows() ? !Console.IsOutputRedirected : DescriptorStream.IsTerminal(1);
+    /// <summary>The standard input, unbuffered.</summary>
+    internal static Stream StandardInput() => OperatingSystem.IsWindows()
+        ? Console.OpenStandardInput()
+        : OpenInput();
+
+#pragma warning disable CA2000 // The stream owns the handle, and the handle does not own the descriptor.
+    private static FileStream OpenInput() => new(new SafeFileHandle(0, ownsHandle: false), FileAccess.Read, bufferSize: 0);
+#pragma warning restore CA2000
+
+    /// <summary>True where a descriptor, 1 or 2, is shown on a terminal.</summary>
+    internal static bool IsTerminal(int descriptor)
+    {
+        if (!OperatingSystem.IsWindows()) return DescriptorStream.IsTerminal(descriptor);
+        return descriptor == 1 ? !Console.IsOutputRedirected : !Console.IsErrorRedirected;
+    }
 
     /// <summary>A writer into memory with the line ends of this program.</summary>
     internal static StreamWriter WriterOn(Stream memory) => new(memory, new UTF8Encoding(false), leaveOpen: true) { NewLine = "\n" };

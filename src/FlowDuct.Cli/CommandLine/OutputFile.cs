@@ -1,4 +1,5 @@
 using System.Globalization;
+using FlowDuct.Errors;
 
 namespace FlowDuct.Cli.CommandLine;
 
@@ -11,6 +12,23 @@ internal static class OutputFile
         // A rename puts a plain file in the place of whatever stood there: for root that includes the devices of the machine.
         if (!OperatingSystem.IsWindows() && File.Exists(path) && TryWriteInto(path, bytes)) return;
         Replace(Followed(path), bytes);
+    }
+
+    /// <summary>A path that is no plain file (a pipe, a device), opened to be written into; null for a plain file or where nothing stands yet.</summary>
+    internal static Stream? OpenSpecial(string path)
+    {
+        if (OperatingSystem.IsWindows() || !File.Exists(path)) return null;
+        var stream = new FileStream(path, FileMode.Open, FileAccess.Write, FileShare.ReadWrite, bufferSize: 0);
+        if (!IsPlain(stream)) return stream;
+        stream.Dispose();
+        return null;
+    }
+
+    /// <summary>The refusal for an answer that could not be written; null for the standard output.</summary>
+    internal static FlowDuctException NotWritten(string? path, Exception failure)
+    {
+        string place = path is null ? "standard output" : "--output " + path;
+        return new FlowDuctException(new Refusal(RefusalKind.NotWritten, place, $"could not be written: {Reason(failure)}", "free some space or name another file"));
     }
 
     /// <summary>Why a file could not be written or read, in words: the texts of the runtime are left out of the native binary.</summary>
@@ -47,7 +65,7 @@ internal static class OutputFile
     }
 
     // A link that leads nowhere yet is followed too; a path at which nothing stands has no link to ask for.
-    private static string Followed(string path) =>
+    internal static string Followed(string path) =>
         new FileInfo(path).LinkTarget is null ? path : File.ResolveLinkTarget(path, returnFinalTarget: true)!.FullName;
 
     private static void Replace(string path, ReadOnlySpan<byte> bytes)

@@ -12,10 +12,10 @@ internal static class JsonAnswer
 {
     internal static void Write(Stream to, DeviceAnswer answer, PathTable? path, RenderOptions options)
     {
-        using var json = new Utf8JsonWriter(to, JsonNumbers.Options);
+        using var json = new Utf8JsonWriter(to, JsonNumbers.OptionsOf(options));
         json.WriteStartObject();
-        JsonHead.Write(json, answer.Passes(options.Strict) ? "pass" : "fail", answer.Fluid);
-        Case(json, answer);
+        JsonHead.Write(json, answer.Passes(options.Strict) ? "pass" : "fail", answer.Fluid, options.Row);
+        Case(json, answer, options.Row);
         Units(json);
         json.WriteStartObject("stations");
         JsonStation.Write(json, "inlet", answer.Fluid, answer.Inlet);
@@ -32,12 +32,11 @@ internal static class JsonAnswer
         to.WriteByte((byte)'\n');
     }
 
-    private static void Case(Utf8JsonWriter json, DeviceAnswer answer)
+    private static void Case(Utf8JsonWriter json, DeviceAnswer answer, JsonRow? ofSheet)
     {
         DeviceCase c = answer.Case;
         json.WriteStartObject("case");
-        json.WriteNull("tag");
-        json.WriteNull("name");
+        JsonHead.WriteName(json, ofSheet);
         json.WriteString("device", DeviceWords.Of(c.Device));
         json.WriteString("fluid", c.Fluid.Name);
         json.WriteStartObject("given");

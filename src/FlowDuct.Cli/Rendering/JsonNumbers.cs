@@ -13,4 +13,7 @@ internal static class JsonNumbers
 
     /// <summary>Options of every JSON writer here: indented by two, one line end everywhere, ASCII.</summary>
     internal static JsonWriterOptions Options => new() { Indented = true, NewLine = "\n" };
+
+    /// <summary>The options of an answer: a row of a sheet takes one line.</summary>
+    internal static JsonWriterOptions OptionsOf(RenderOptions options) => options.Row is null ? Options : default;
 }

@@ -9,12 +9,11 @@ internal static class StateJson
 {
     internal static void Write(Stream to, StateAnswer answer, RenderOptions options)
     {
-        using var json = new Utf8JsonWriter(to, JsonNumbers.Options);
+        using var json = new Utf8JsonWriter(to, JsonNumbers.OptionsOf(options));
         json.WriteStartObject();
-        JsonHead.Write(json, FindingRules.Pass(answer.Findings, options.Strict) ? "pass" : "fail", answer.Fluid);
+        JsonHead.Write(json, FindingRules.Pass(answer.Findings, options.Strict) ? "pass" : "fail", answer.Fluid, options.Row);
         json.WriteStartObject("case");
-        json.WriteNull("tag");
-        json.WriteNull("name");
+        JsonHead.WriteName(json, options.Row);
         json.WriteString("device", "state");
         json.WriteString("fluid", answer.Fluid.Name);
         json.WriteStartObject("given");

@@ -39,6 +39,9 @@ internal struct GivenSlots
     internal readonly double Second(StationSymbol shape) =>
         Has(shape) ? _seconds[shape == StationSymbol.Rectangle ? 0 : 1] : throw new InvalidOperationException("A shape was read that was never given.");
 
+    /// <summary>Forgets every figure; the numbers stay behind unread.</summary>
+    internal void Empty() => _mask = 0;
+
     /// <summary>Sets a figure of a station list as it was read.</summary>
     internal void Set(in StationItem item)
     {

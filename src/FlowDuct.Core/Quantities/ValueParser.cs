@@ -73,8 +73,8 @@ internal static class ValueParser
         throw context.WrongUnit(text, spelling);
     }
 
-    // x=1 means saturated vapour and an efficiency of 1 no loss: the end of a fraction is no reading that was rounded.
-    private static bool IsAnEnd(QuantityRow row, double si) =>
+    /// <summary>True for the end of a fraction: x=1 means saturated vapour and an efficiency of 1 no loss, no reading that was rounded.</summary>
+    internal static bool IsAnEnd(QuantityRow row, double si) =>
         row.Dimension == Dimension.Ratio && (si == row.Limits.Greatest || (row.Limits.IncludesLeast && si == row.Limits.Least));
 
     private static GivenValue Finish(

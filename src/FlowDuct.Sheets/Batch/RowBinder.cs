@@ -1,0 +1,121 @@
+using System.Text;
+using CsvHelper;
+using FlowDuct.Devices;
+using FlowDuct.Devices.Coefficients;
+using FlowDuct.Errors;
+using FlowDuct.Fluids.Gases;
+using FlowDuct.Quantities;
+
+namespace FlowDuct.Sheets.Batch;
+
+/// <summary>Turns the cells of a record into a case. One to a worker: it keeps what rows have in common.</summary>
+internal sealed class RowBinder(SheetPlan plan)
+{
+    private readonly FluidCells _fluids = new();
+    private UnitBasis? _basis;
+
+    /// <summary>The case of the record read last.</summary>
+    internal CaseDraft Draft { get; } = new();
+
+    /// <summary>A cell without spaces around it.</summary>
+    internal static ReadOnlySpan<byte> Cell(CsvReader record, int index) => index < 0 ? default : record.GetSpan(index).Trim((byte)' ');
+
+    /// <summary>Reads the cells of a record into the draft.</summary>
+    /// <exception cref="FlowDuctException">A cell is refused, or does not suit the device; kind NotUnderstood.</exception>
+    internal void Read(CsvReader record)
+    {
+        Draft.Begin();
+        Draft.Device = DeviceOf(Cell(record, plan.Device));
+        foreach (int index in plan.Choices) Choose(plan.Columns[index], Cell(record, index));
+        Draft.Frame.Fluid = _fluids.Find(Cell(record, plan.Fluid), Fractions());
+        Draft.Frame.Device = Draft.Device == SheetDevice.Diffuser ? DeviceKind.Diffuser : DeviceKind.Nozzle;
+        _basis = BasisOf(Cell(record, plan.Basis));
+        ReadAmbient(record);
+        foreach (FigureCell figure in plan.Stations) ReadStation(figure, Cell(record, figure.Index));
+        foreach (FigureCell figure in plan.Options) ReadOption(figure, Cell(record, figure.Index));
+        OptionRules.RequireRecovery("recovery", Draft.Options, Draft.Frame.RecoveryBasis == RecoveryBasis.Dynamic);
+        DeviceColumns.Require(plan, Draft);
+    }
+
+    private static SheetDevice DeviceOf(ReadOnlySpan<byte> cell)
+    {
+        if (cell.SequenceEqual("nozzle"u8)) return SheetDevice.Nozzle;
+        if (cell.SequenceEqual("diffuser"u8)) return SheetDevice.Diffuser;
+        return cell.SequenceEqual("state"u8) ? SheetDevice.State : throw CellRefusals.NoDevice(Encoding.UTF8.GetString(cell));
+    }
+
+    private static UnitBasis? BasisOf(ReadOnlySpan<byte> cell)
+    {
+        if (cell.IsEmpty) return null;
+        if (cell.SequenceEqual("absolute"u8)) return UnitBasis.Absolute;
+        return cell.SequenceEqual("gauge"u8) ? UnitBasis.Gauge : throw CellRefusals.NotOneOf("pressure-basis", Encoding.UTF8.GetString(cell), ["absolute", "gauge"]);
+    }
+
+    private FractionBasis? Fractions() =>
+        (Draft.Choices >> (int)ChoiceColumn.Fractions & 1) == 0 ? null : _massFractions ? FractionBasis.Mass : FractionBasis.Mole;
+
+    private bool _massFractions;
+
+    private void Choose(SheetColumn column, ReadOnlySpan<byte> cell)
+    {
+        if (cell.IsEmpty) return;
+        string text = Encoding.UTF8.GetString(cell);
+        string[] words = ChoiceWords.Of(column.Choice);
+        int word = Array.IndexOf(words, text);
+        if (word < 0) throw CellRefusals.NotOneOf(column.Heading.Trim(), text, words);
+        Draft.Choices |= 1 << (int)column.Choice;
+        switch (column.Choice)
+        {
+            case ChoiceColumn.Shape: Draft.Frame.Shape = word == 0 ? NozzleShape.Convergent : NozzleShape.ConvergentDivergent; break;
+            case ChoiceColumn.Branch: Draft.Frame.Branch = word == 0 ? Branch.Subsonic : Branch.Supersonic; break;
+            case ChoiceColumn.Expansion: Draft.Frame.Expansion = (ExpansionModel)word; break;
+            case ChoiceColumn.RecoveryBasis: Draft.Frame.RecoveryBasis = (RecoveryBasis)word; break;
+            default: _massFractions = word == 1; break;
+        }
+    }
+
+    private void ReadAmbient(CsvReader record)
+    {
+        foreach (FigureCell figure in plan.Ambient)
+        {
+            ReadOnlySpan<byte> cell = Cell(record, figure.Index);
+            if (!cell.IsEmpty) Draft.Ambient.Set(figure.Slot, figure.Read(cell, null, Draft.Frame.AmbientPressure).Si);
+        }
+
+        if (Draft.Ambient.Mask != 0) AmbientCells.Apply(Draft.Ambient, ref Draft.Frame);
+    }
+
+    private void ReadStation(FigureCell figure, ReadOnlySpan<byte> cell)
+    {
+        if (cell.IsEmpty) return;
+        FigureValue value = figure.Read(cell, _basis, Draft.Frame.AmbientPressure);
+        Draft.Of(figure.Column.List).Set(figure.Slot, value.Si, value.HalfWidth);
+        Draft.Frame.UsesGauge |= value.WasGauge;
+    }
+
+    private void ReadOption(FigureCell figure, ReadOnlySpan<byte> cell)
+    {
+        if (cell.IsEmpty) return;
+        var option = (CaseOption)figure.Slot;
+        if (option == CaseOption.DischargeCoefficient && char.IsAsciiLetter((char)cell[0]))
+        {
+            Draft.Frame.Correlation = CorrelationOf(figure, Encoding.UTF8.GetString(cell));
+            return;
+        }
+
+        FigureValue value = figure.Read(cell, _basis, Draft.Frame.AmbientPressure);
+        double size = SizeOf(figure, option, value.Dimension);
+        Draft.Frame.FlowIsVolume |= option == CaseOption.Flow && value.Dimension == Dimension.VolumeFlow;
+        Draft.Options.Set(figure.Slot, value.Si * size, value.HalfWidth * size);
+    }
+
+    private double SizeOf(FigureCell figure, CaseOption option, Dimension dimension) => option switch
+    {
+        CaseOption.Flow => OptionRules.MassOfAmount(figure.Place, Draft.Frame.Fluid!, dimension),
+        CaseOption.Heat or CaseOption.HeatLoss when dimension == Dimension.HeatRate => 1 / OptionRules.MassFlowBeside(figure.Place, Draft.Options, Draft.Frame.FlowIsVolume),
+        _ => 1,
+    };
+
+    private static CriticalFlowCd CorrelationOf(FigureCell figure, string text) =>
+        CriticalFlowCd.Find(text) ?? throw CellRefusals.NotOneOf(figure.Place, text, ["a number", .. CriticalFlowCd.All.Select(row => row.Name)]);
+}

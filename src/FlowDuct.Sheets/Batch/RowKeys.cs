@@ -1,0 +1,44 @@
+using System.Numerics;
+
+namespace FlowDuct.Sheets.Batch;
+
+/// <summary>
+/// Keys (tag and case) that occurred, to find one that occurs again. Only their 64-bit hashes are kept, so that memory has a bound; behind
+/// the first <see cref="Most"/> rows with a key no more are taken in.
+/// </summary>
+internal sealed class RowKeys
+{
+    /// <summary>Keys that are kept.</summary>
+    internal const int Most = 1 << 18;
+
+    private readonly Dictionary<ulong, long> _rows = [];
+
+    /// <summary>True where no more keys are taken in.</summary>
+    internal bool IsFull => _rows.Count == Most;
+
+    /// <summary>The earlier row of a key, or 0; a key that is new is kept. A key of 0 is none.</summary>
+    internal long EarlierRow(ulong key, long row)
+    {
+        if (key == 0) return 0;
+        if (_rows.TryGetValue(key, out long earlier)) return earlier;
+        if (!IsFull) _rows.Add(key, row);
+        return 0;
+    }
+
+    /// <summary>Hash of a tag and a case; 0 where both are empty.</summary>
+    internal static ulong Hash(ReadOnlySpan<byte> tag, ReadOnlySpan<byte> @case)
+    {
+        if (tag.IsEmpty && @case.IsEmpty) return 0;
+        ulong hash = Mix(Mix(0x9E3779B97F4A7C15, tag), "\n"u8);
+        hash = Mix(hash, @case);
+        hash = (hash ^ (hash >> 32)) * 0xD6E8FEB86659FD93;
+        hash ^= hash >> 32;
+        return hash == 0 ? 1 : hash;
+    }
+
+    private static ulong Mix(ulong hash, ReadOnlySpan<byte> bytes)
+    {
+        foreach (byte value in bytes) hash = BitOperations.RotateLeft((hash ^ value) * 0xFF51AFD7ED558CCD, 29);
+        return hash;
+    }
+}

@@ -1,0 +1,14 @@
+namespace FlowDuct.Sheets;
+
+/// <summary>What a row asks about.</summary>
+internal enum SheetDevice
+{
+    /// <summary>A nozzle.</summary>
+    Nozzle,
+
+    /// <summary>A diffuser.</summary>
+    Diffuser,
+
+    /// <summary>One state of a fluid.</summary>
+    State,
+}
