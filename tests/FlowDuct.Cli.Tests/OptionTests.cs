@@ -18,7 +18,7 @@ public class OptionTests
     [InlineData("flowduct state --fluid @plant --at \"p=1 bar, T=300 K\"", "--fluid: @plant is not a fluid of this version\n  flowduct fluids lists them")]
     [InlineData("flowduct state --fluid [x] --at \"p=1 bar, T=300 K\"", "--fluid: [x] is not a fluid of this version\n  flowduct fluids lists them")]
     [InlineData("flowduct --hepl", "--hepl is not an option\n  did you mean --help?")]
-    [InlineData("flowduct --fluid air", "--fluid comes before a command\n  begin with one of state, nozzle, diffuser, venturi, selfcheck, fluids, units")]
+    [InlineData("flowduct --fluid air", "--fluid comes before a command\n  begin with one of state, nozzle, diffuser, venturi, sweep, run, selfcheck, fluids, units")]
     [InlineData(Nozzle + " --chart \"p=1 bar\"", "--chart is not an option\n  flowduct nozzle --help lists the options")]
     [InlineData(Nozzle + " --effciency 90%", "--effciency is not an option\n  did you mean --efficiency?")]
     [InlineData(Nozzle + " -qs", "-qs is not an option\n  flowduct nozzle --help lists the options")]

@@ -28,7 +28,7 @@ public class RefusalTests
     [InlineData(2, Steam + "\"p=9 bar, T=230 degC\" --exit \"p=3 bar\" --exit \"p=2 bar\"", "--exit: is given twice\n  keep one of them")]
     [InlineData(2, Steam + "\"p=9 bar, T=230 degC\" --exit \"p=3 bar\" --recovery 0.5", "--recovery is not an option of nozzle\n  it belongs to diffuser")]
     [InlineData(2, Steam + "@plant --exit \"p=3 bar\"", "--inlet: @plant has no equals sign\n  write symbol=value, for example p=9 bar")]
-    [InlineData(2, "flowduct [diagram] nozzle", "[diagram] is not a command\n  write one of state, nozzle, diffuser, venturi, selfcheck, fluids, units")]
+    [InlineData(2, "flowduct [diagram] nozzle", "[diagram] is not a command\n  write one of state, nozzle, diffuser, venturi, sweep, run, selfcheck, fluids, units")]
     [InlineData(2, Steam + "p=9 bar --exit \"p=3 bar\"", "bar belongs to no option\n  quote lists that hold spaces: --inlet \"p=9 bar, T=230 degC\"")]
     [InlineData(2, "flowduct nozzel --fluid steam", "nozzel is not a command\n  did you mean nozzle?")]
     [InlineData(2, "flowduct nozzle --inlet \"p=9 bar, T=230 degC\"", "--fluid: is missing\n  write for example --fluid steam")]

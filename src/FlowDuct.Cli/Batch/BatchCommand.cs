@@ -19,7 +19,7 @@ internal static class BatchCommand
     {
         var binder = new CaseBinder(arguments);
         RenderOptions options = RenderBinder.Bind(arguments, binder, terminal: false);
-        BatchFormat format = binder.Choice("--format", BatchFormat.Csv, ("csv", BatchFormat.Csv), ("jsonl", BatchFormat.JsonLines), ("json", BatchFormat.Json));
+        BatchFormat format = Format(binder);
         bool comma = binder.Choice("--decimal", false, ("point", false), ("comma", true));
         int jobs = arguments.Value("--jobs") is string text ? WholeNumber.Read("--jobs", text, 1, MostJobs, Environment.ProcessorCount) : Environment.ProcessorCount;
         Shard shard = arguments.Value("--shard") is string share ? Shard.Parse(share) : Shard.Whole;
@@ -30,7 +30,7 @@ internal static class BatchCommand
         SheetPlan plan = SheetPlan.Compile(source.Headings, source.Dialect.DecimalMark, place);
         IReadOnlyList<ResultColumn> results = arguments.Value("--show") is string list ? ResultSet.Parse(list, options.Units) : ResultSet.Default(plan.Columns, options.Units);
         if (format == BatchFormat.Csv) plan.RequireFree(CsvRows.Titles(results), place);
-        RowRenderer renderer = Renderer(format, source, results, options);
+        RowRenderer renderer = Renderer(format, source.Dialect, source.RawHeading, results, options);
         using var stop = new StopSignals();
         var progress = new ProgressLine(streams.Error, sheet.CanSeek ? sheet.Length : 0);
         var request = new BatchRequest
@@ -53,9 +53,14 @@ internal static class BatchCommand
         if (streams.ErrorIsTerminal) progress.Show(target.SafeRow, source.Position);
     }
 
-    private static RowRenderer Renderer(BatchFormat format, RecordSource source, IReadOnlyList<ResultColumn> results, RenderOptions options) => format switch
+    /// <summary>The format of the results.</summary>
+    internal static BatchFormat Format(CaseBinder binder) =>
+        binder.Choice("--format", BatchFormat.Csv, ("csv", BatchFormat.Csv), ("jsonl", BatchFormat.JsonLines), ("json", BatchFormat.Json));
+
+    /// <summary>What writes the results in a format.</summary>
+    internal static RowRenderer Renderer(BatchFormat format, SheetDialect dialect, ReadOnlyMemory<byte> heading, IReadOnlyList<ResultColumn> results, RenderOptions options) => format switch
     {
-        BatchFormat.Csv => new CsvRows(source.Dialect, source.RawHeading, results, options.Digits ?? CsvRows.UsualDigits),
+        BatchFormat.Csv => new CsvRows(dialect, heading, results, options.Digits ?? CsvRows.UsualDigits),
         _ => new JsonRows(format == BatchFormat.JsonLines, options),
     };
 
@@ -73,20 +78,9 @@ internal static class BatchCommand
 
     private static BatchEnd Finish(Arguments arguments, Streams streams, BatchRun run, string settings, ProgressLine progress)
     {
-        string? output = arguments.Value("--output");
-        bool resume = arguments.Has("--resume");
-        if (resume && output is null) throw Usage.Refuse("--resume", "there is no file to go on with", "give the --output of the broken run");
         try
         {
-            if (output is null) return run.Run(new StreamTarget(bytes => Output.WriteAll(streams.Out, bytes.Span)));
-            using Stream? special = OutputFile.OpenSpecial(output);
-            if (special is not null) return run.Run(new StreamTarget(bytes => Output.WriteAll(special, bytes.Span)));
-            using var part = new PartFile(OutputFile.Followed(output), $"{ToolVersion.Version}+{ToolVersion.Commit}", settings, resume);
-            return run.Run(part);
-        }
-        catch (Exception failure) when (failure is IOException or UnauthorizedAccessException or NotSupportedException or ArgumentException)
-        {
-            throw OutputFile.NotWritten(output, failure);
+            return ResultTargets.Use(arguments, streams, settings, run.Run);
         }
         finally
         {

@@ -24,7 +24,7 @@ internal sealed class BatchReport(string name, Stream stderr, bool quiet)
     internal void Tell(BatchEnd end)
     {
         BatchTally tally = end.Tally;
-        if (tally.FirstDate is string date) Say($"{tally.Dates} tags look like dates, which a spreadsheet may have made of them; the first in {date}");
+        if (tally.FirstDate is string date) Say($"tags that look like dates, which a spreadsheet may have made of them: {tally.Dates}; the first in {date}");
         if (end.KeysDropped) Say($"tag and case were compared for the first {RowKeys.Most} rows only");
         if (tally[RowVerdict.Impossible] > 0) Say($"{tally[RowVerdict.Impossible]} of {tally.Rows} rows hold figures that are impossible");
         long unsolved = tally[RowVerdict.Unsolved] + tally[RowVerdict.NotUnderstood] + tally[RowVerdict.Defect];

@@ -27,8 +27,12 @@ internal static class Application
         {
             using var memory = new MemoryStream(4096);
             Arguments arguments = Arguments.Read(args);
-            if (arguments is { Command: CommandName.Run, WantsHelp: false, WantsVersion: false })
-                return BatchCommand.Run(arguments, new Streams(stdin ?? (() => Stream.Null), stdout, stderr, errorTerminal));
+            if (arguments is { Command: CommandName.Run or CommandName.Sweep, WantsHelp: false, WantsVersion: false })
+            {
+                var streams = new Streams(stdin ?? (() => Stream.Null), stdout, stderr, errorTerminal);
+                return arguments.Command == CommandName.Run ? BatchCommand.Run(arguments, streams) : SweepCommand.Run(arguments, streams);
+            }
+
             int status = Answer(arguments, memory, terminal);
             Deliver(arguments, memory, stdout);
             return status;

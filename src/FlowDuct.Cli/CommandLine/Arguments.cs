@@ -10,6 +10,7 @@ internal sealed class Arguments
     internal const string StandardInput = "-";
 
     private readonly Dictionary<string, string> _values = [];
+    private string[] _repeated = [];
 
     internal CommandName Command { get; private init; }
 
@@ -19,6 +20,21 @@ internal sealed class Arguments
 
     /// <summary>Words after the command that belong to no option.</summary>
     internal IReadOnlyList<string> Words { get; private init; } = [];
+
+    /// <summary>The device of a sweep; None for every other command.</summary>
+    internal CommandName Device { get; private init; }
+
+    /// <summary>The values of the option that may be repeated, in the order given.</summary>
+    internal IReadOnlyList<string> Repeated => _repeated;
+
+    /// <summary>The same with other values of some options.</summary>
+    internal Arguments With(IEnumerable<KeyValuePair<string, string>> values)
+    {
+        var changed = new Arguments { Command = Command, Device = Device, Words = Words };
+        foreach ((string option, string value) in _values) changed._values[option] = value;
+        foreach ((string option, string value) in values) changed._values[option] = value;
+        return changed;
+    }
 
     internal string? Value(string option) => _values.GetValueOrDefault(option);
 
@@ -40,10 +56,13 @@ internal sealed class Arguments
         // Only the options of this command are built: start-up time is part of the contract.
         var command = new Command(row.Word) { TreatUnmatchedTokensAsErrors = false };
         List<(OptionRow Row, Option Option)> options = [];
-        foreach (OptionRow option in OptionTable.Of(row.Name))
+        CommandName device = row.Name == CommandName.Sweep ? DeviceOfSweep(args) : CommandName.None;
+        foreach (OptionRow option in device == CommandName.None ? OptionTable.Of(row.Name) : OptionTable.OfSweep(device))
         {
             // A switch of type bool would take "--quiet false" for a value and count as given.
-            var parsed = new Option<string>(option.Name) { Arity = option.IsSwitch ? ArgumentArity.Zero : ArgumentArity.ZeroOrOne };
+            Option parsed = option.IsRepeatable
+                ? new Option<string[]>(option.Name) { Arity = ArgumentArity.ZeroOrMore }
+                : new Option<string>(option.Name) { Arity = option.IsSwitch ? ArgumentArity.Zero : ArgumentArity.ZeroOrOne };
             if (option.Name == "--help") parsed.Aliases.Add("-h");
             command.Options.Add(parsed);
             options.Add((option, parsed));
@@ -56,6 +75,7 @@ internal sealed class Arguments
         var arguments = new Arguments
         {
             Command = row.Name,
+            Device = device,
             WantsHelp = IsGiven(result, "--help"),
             WantsVersion = IsGiven(result, "--version"),
             Words = [.. args[1..leading], .. result.UnmatchedTokens],
@@ -73,8 +93,9 @@ internal sealed class Arguments
         foreach ((OptionRow row, Option option) in options)
         {
             if (result.GetResult(option) is not OptionResult given || given.Implicit) continue;
-            if (given.IdentifierTokenCount > 1) twice ??= row;
+            if (given.IdentifierTokenCount > 1 && !row.IsRepeatable) twice ??= row;
             _values[row.Name] = row.IsSwitch ? string.Empty : ValueOf(row, given);
+            if (row.IsRepeatable) _repeated = ValuesOf(row, given);
         }
 
         if (twice is not null) throw Usage.Twice(twice);
@@ -83,16 +104,29 @@ internal sealed class Arguments
         if (Words.FirstOrDefault(word => word.StartsWith('-') && word != StandardInput) is string stray) throw Usage.UnknownOption(stray, Command);
         foreach ((OptionRow row, _) in options)
         {
-            if (row.IsRequired && !Has(row.Name)) throw Usage.Missing(row);
+            // What a sweep varies need not be given too.
+            if (row.IsRequired && !Has(row.Name) && (Device == CommandName.None || row.Name == "--vary")) throw Usage.Missing(row);
         }
     }
 
     private static int MostWords(CommandName command) => command switch
     {
         CommandName.Units => int.MaxValue,
-        CommandName.Run => 1,
+        CommandName.Run or CommandName.Sweep => 1,
         _ => 0,
     };
+
+    private static string[] ValuesOf(OptionRow row, OptionResult given) =>
+        given.Tokens.Count < given.IdentifierTokenCount ? throw Usage.NoValue(row) : [.. given.Tokens.Select(token => token.Value)];
+
+    // The word behind sweep decides which options there are, so it is read before them.
+    private static CommandName DeviceOfSweep(string[] args)
+    {
+        string word = args.Length > 1 ? args[1] : string.Empty;
+        if (word is "--help" or "-h" or "--version") return CommandName.Nozzle;
+        CommandRow? device = Array.Find(CommandTable.All, row => row.Word == word && (row.Name & CommandName.Answering) != 0);
+        return device?.Name ?? throw Usage.NotOneOf("sweep", word.StartsWith('-') ? "(nothing)" : word, [.. CommandTable.All.Where(row => (row.Name & CommandName.Answering) != 0).Select(row => row.Word)]);
+    }
 
     // A forgotten value leaves nothing, or makes the next option look like one.
     private static string ValueOf(OptionRow row, OptionResult given)

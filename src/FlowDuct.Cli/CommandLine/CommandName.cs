@@ -28,6 +28,12 @@ internal enum CommandName
     /// <summary>Every row of a sheet.</summary>
     Run = 128,
 
+    /// <summary>One case with inputs that vary.</summary>
+    Sweep = 256,
+
+    /// <summary>Both that answer row after row.</summary>
+    Batch = Run | Sweep,
+
     /// <summary>A nozzle followed by a diffuser.</summary>
     Venturi = 64,
 
@@ -44,5 +50,5 @@ internal enum CommandName
     Answering = State | Devices,
 
     /// <summary>All commands.</summary>
-    All = Answering | Fluids | Units | SelfCheck | Run,
+    All = Answering | Fluids | Units | SelfCheck | Batch,
 }

@@ -12,4 +12,7 @@ internal sealed record OptionRow(
     string Name, string Value, string Help, string Example, CommandName Commands, bool IsRequired = false, bool OfTheCase = true)
 {
     internal bool IsSwitch => Value.Length == 0;
+
+    /// <summary>True where it may be given more than once.</summary>
+    internal bool IsRepeatable { get; init; }
 }

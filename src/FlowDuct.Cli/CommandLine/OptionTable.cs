@@ -44,19 +44,21 @@ internal static class OptionTable
         new("--path", "N", "States in N sections from inlet to exit, of a nozzle given by its sections.", "21", CommandName.Nozzle),
         new("--wall", "FILE", "Sections of your own instead: a CSV with the columns position [unit], diameter [unit].", "wall.csv", CommandName.Nozzle),
         new("--show", "LIST", "More columns of the states along a nozzle: quantities of a station, or p/p0, T/T0, rho/rho0, A/At.", "\"rho, p/p0\"", CommandName.Nozzle, OfTheCase: false),
+        new("--vary", "NAME=VALUES", "An input and its values: A..B UNIT by STEP, A..B UNIT in N points (log), or a list A,B,C UNIT; may be given again.", "\"inlet.p=4..12 bar by 0.5 bar\"", CommandName.Sweep, IsRequired: true) { IsRepeatable = true },
+        new("--dry-run", "", "Print how many points there are, and answer none.", "", CommandName.Sweep, OfTheCase: false),
         new("--format", "FORMAT", "text (the default), json (coherent SI whatever the units); with --path, --wall or a range also csv.", "json", CommandName.Answering | CommandName.SelfCheck, OfTheCase: false),
-        new("--format", "FORMAT", "csv (the default), jsonl (a JSON answer to the line) or json (an array of them).", "jsonl", CommandName.Run, OfTheCase: false),
-        new("--output", "FILE", "Write to a file, whole or not at all.", "answer.txt", CommandName.Answering | CommandName.SelfCheck | CommandName.Run, OfTheCase: false),
-        new("--show", "LIST", "Results to write, each with its unit if it is not the usual one.", "\"exit.T [degC], exit.x, regime, mass_flow [kg/h]\"", CommandName.Run, OfTheCase: false),
+        new("--format", "FORMAT", "csv (the default), jsonl (a JSON answer to the line) or json (an array of them).", "jsonl", CommandName.Batch, OfTheCase: false),
+        new("--output", "FILE", "Write to a file, whole or not at all.", "answer.txt", CommandName.Answering | CommandName.SelfCheck | CommandName.Batch, OfTheCase: false),
+        new("--show", "LIST", "Results to write, each with its unit if it is not the usual one.", "\"exit.T [degC], exit.x, regime, mass_flow [kg/h]\"", CommandName.Batch, OfTheCase: false),
         new("--jobs", "N", "Workers; as many as there are processors if not given. The results are the same bytes.", "2", CommandName.Run, OfTheCase: false),
         new("--shard", "I/N", "Only the rows I, I+N, I+2N, ...: one of N shares.", "2/8", CommandName.Run, OfTheCase: false),
         new("--resume", "", "Go on with a broken run into the same --output.", "", CommandName.Run, OfTheCase: false),
         new("--decimal", "MARK", "Decimal mark of the numbers in the sheet and in the results: point (the default) or comma.", "comma", CommandName.Run, OfTheCase: false),
-        new("--units", "SYSTEM", "metric (the default) or us.", "us", CommandName.Answering | CommandName.Run, OfTheCase: false),
-        new("--show-in", "LIST", "Units of your own for some quantities.", "\"T=degF, p=inH2O(g)\"", CommandName.Answering | CommandName.Run, OfTheCase: false),
-        new("--digits", "N", "Significant digits, 1 to 15; of run 7 if not given.", "7", CommandName.Answering | CommandName.Run, OfTheCase: false),
-        new("--quiet", "", "Leave notes and assumptions out; of selfcheck the values that are met; of run the summary and warnings.", "", CommandName.Answering | CommandName.SelfCheck | CommandName.Run, OfTheCase: false),
-        new("--strict", "", "A caution fails the answer: exit status 1.", "", CommandName.Answering | CommandName.Run, OfTheCase: false),
+        new("--units", "SYSTEM", "metric (the default) or us.", "us", CommandName.Answering | CommandName.Batch, OfTheCase: false),
+        new("--show-in", "LIST", "Units of your own for some quantities.", "\"T=degF, p=inH2O(g)\"", CommandName.Answering | CommandName.Batch, OfTheCase: false),
+        new("--digits", "N", "Significant digits, 1 to 15; of run 7 if not given.", "7", CommandName.Answering | CommandName.Batch, OfTheCase: false),
+        new("--quiet", "", "Leave notes and assumptions out; of selfcheck the values that are met; of run the summary and warnings.", "", CommandName.Answering | CommandName.SelfCheck | CommandName.Batch, OfTheCase: false),
+        new("--strict", "", "A caution fails the answer: exit status 1.", "", CommandName.Answering | CommandName.Batch, OfTheCase: false),
         new("--color", "WHEN", "auto (the default), always or never; NO_COLOR is honoured.", "never", CommandName.Answering, OfTheCase: false),
         new("--help", "", "This help; also -h.", "", CommandName.All, OfTheCase: false),
         new("--version", "", "Version and commit of flowduct.", "", CommandName.All, OfTheCase: false),
@@ -64,6 +66,10 @@ internal static class OptionTable
 
     /// <summary>The options of a command, in the order of help.</summary>
     internal static IEnumerable<OptionRow> Of(CommandName command) => All.Where(row => (row.Commands & command) != 0);
+
+    /// <summary>The options of a sweep over a device: its own, and those of the device's case that ask for one answer.</summary>
+    internal static IEnumerable<OptionRow> OfSweep(CommandName device) => All.Where(row =>
+        (row.Commands & CommandName.Sweep) != 0 || (row.OfTheCase && (row.Commands & device) != 0 && row.Name is not ("--find" or "--target" or "--path" or "--wall")));
 
     /// <summary>The value placeholder and help of a numeric option stand in the catalogue of quantities.</summary>
     private static OptionRow Of(CaseOption option, string value, CommandName commands)

@@ -6,6 +6,9 @@ namespace FlowDuct.Devices;
 /// <summary>The whole answer to a case.</summary>
 internal sealed record DeviceAnswer : IStations
 {
+    // In a box of its own: an answer is copied several times while it grows, and most have none.
+    private readonly System.Runtime.CompilerServices.StrongBox<Rating.NozzleRating>? _rating;
+
     internal required DeviceCase Case { get; init; }
 
     internal required StationAnswer Inlet { get; init; }
@@ -38,7 +41,11 @@ internal sealed record DeviceAnswer : IStations
     internal IReadOnlyList<string> Assumptions { get; init; } = [];
 
     /// <summary>The rating behind the answer, where sections and a back pressure were given; else null.</summary>
-    internal Rating.NozzleRating? Rating { get; init; }
+    internal Rating.NozzleRating? Rating
+    {
+        get => _rating?.Value;
+        init => _rating = value is Rating.NozzleRating rating ? new(rating) : null;
+    }
 
     /// <summary>Form, shock and loss of a diffuser; null of a nozzle.</summary>
     internal Diffusers.DiffuserAnswer? Diffuser { get; init; }
@@ -68,8 +75,9 @@ internal sealed record DeviceAnswer : IStations
     /// <inheritdoc/>
     public StationAnswer? StationWith(Notices notice)
     {
-        StationAnswer?[] stations = [Inlet, Throat, Exit];
-        return Array.Find(stations, at => at is not null && (at.State.Notices & notice) != 0);
+        if ((Inlet.State.Notices & notice) != 0) return Inlet;
+        if (Throat is not null && (Throat.State.Notices & notice) != 0) return Throat;
+        return (Exit.State.Notices & notice) != 0 ? Exit : null;
     }
 
     /// <inheritdoc/>

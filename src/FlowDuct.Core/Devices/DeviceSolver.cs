@@ -13,16 +13,16 @@ internal static class DeviceSolver
     internal const double LimitTolerance = 1e-6;
 
     /// <summary>The whole answer, or a refusal.</summary>
-    internal static DeviceAnswer Solve(DeviceCase c)
+    internal static DeviceAnswer Solve(DeviceCase c, Extent extent = Extent.Full)
     {
-        DeviceAnswer answer = Stations(c);
+        DeviceAnswer answer = Stations(c, extent);
         answer = answer with { Audit = Auditor.Judge(answer) };
         answer = answer with { Performance = Performances.Of(answer) };
         return answer with { Findings = FindingRules.Apply(answer) };
     }
 
     /// <summary>The stations alone; the audit moves the figures by their rounding and asks again.</summary>
-    internal static DeviceAnswer Stations(DeviceCase c)
+    internal static DeviceAnswer Stations(DeviceCase c, Extent extent = Extent.Full)
     {
         if (c.Has(CaseOption.Heat) && c.Has(CaseOption.HeatLoss)) throw Refusals.HeatTwice();
         c = HumidAirCase.Resolve(c);
@@ -54,12 +54,17 @@ internal static class DeviceSolver
         FluidState state = recipe.Solve(context);
         StationAnswer exit = state.h - h0 > EnergyFloor(h0)
             ? new StationAnswer { State = state }
-            : StationAnswer.From(c.Fluid, state, Energy.Velocity(h0, state.h));
+            : ExitAt(c, state, Energy.Velocity(h0, state.h), extent);
         return Assemble(c, inlet, given, exit, recipe, saturated: false);
     }
 
     /// <summary>True where the figures of the exit imply its loss, rather than take it as given or as none.</summary>
     internal static bool Implies(DeviceCase c, Inlet inlet, StationFigures given) => ReadsSaturation(c, given) || Recipe(c, inlet, given).Recipe.Implies;
+
+    private static StationAnswer ExitAt(DeviceCase c, in FluidState state, double V, Extent extent) =>
+        extent == Extent.WithoutExitHead && c.Device == DeviceKind.Nozzle
+            ? new StationAnswer { State = state, Velocity = V }
+            : StationAnswer.From(c.Fluid, state, V);
 
     // Below this two enthalpies are the same number: the closure of the property inverses.
     internal static double EnergyFloor(double h0) => 1e-10 * Math.Max(Math.Abs(h0), 1e3);

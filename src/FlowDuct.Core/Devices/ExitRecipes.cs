@@ -22,7 +22,15 @@ internal static class ExitRecipes
     internal static readonly ExitRecipe[] All = [.. OnLossPath(), .. Measured(), .. AtKnownVelocity(), .. WithoutPressure()];
 
     /// <summary>The row for a set of figures, or null.</summary>
-    internal static ExitRecipe? Find(Figure figures) => Array.Find(All, row => row.Required == figures);
+    internal static ExitRecipe? Find(Figure figures)
+    {
+        foreach (ExitRecipe row in All)
+        {
+            if (row.Required == figures) return row;
+        }
+
+        return null;
+    }
 
     // One figure picks the point on the isentrope, or on the path of a given loss.
     private static IEnumerable<ExitRecipe> OnLossPath()

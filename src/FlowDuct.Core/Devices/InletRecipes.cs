@@ -31,8 +31,16 @@ internal static class InletRecipes
     internal static readonly InletRecipe[] All = [.. StaticPairs(), .. PitotPairs(), .. Mixed(), .. Plenums()];
 
     /// <summary>The row for a set of figures, or null.</summary>
-    internal static InletRecipe? Find(Figure figures, bool velocityKnown) => Array.Find(
-        All, row => row.Required == figures && row.Velocity != (velocityKnown ? VelocityNeed.Follows : VelocityNeed.Required));
+    internal static InletRecipe? Find(Figure figures, bool velocityKnown)
+    {
+        VelocityNeed unmet = velocityKnown ? VelocityNeed.Follows : VelocityNeed.Required;
+        foreach (InletRecipe row in All)
+        {
+            if (row.Required == figures && row.Velocity != unmet) return row;
+        }
+
+        return null;
+    }
 
     private static IEnumerable<InletRecipe> StaticPairs() => StatePairs.All.Select(pair => new InletRecipe(
         pair.Mask,

@@ -8,9 +8,8 @@ internal static class NozzlePerformance
     internal static Performance Add(DeviceAnswer a, Performance performance)
     {
         double total = Auditor.TotalEnthalpyAtExit(a), p2 = a.Exit.State.p, p01 = a.Inlet.Stagnation!.Value.p;
-        if (a.ExpandingFluid.FromPS(p2, a.Inlet.State.s, default, out FluidState ideal) != Outcome.Ok) return performance;
-        double drop = total - ideal.h;
-        double Vs = Flow.Energy.Velocity(total, ideal.h);
+        if (!TryIdealDrop(a, total, out double drop)) return performance;
+        double Vs = Flow.Energy.Velocity(drop, 0);
         double? efficiency = drop > DeviceSolver.EnergyFloor(total) && a.Exit.Velocity is double V ? V * V / 2 / drop : null;
         bool isLossless = performance.EntropyRise == 0 && a.Case.Heat == 0;
         performance = performance with
@@ -21,6 +20,17 @@ internal static class NozzlePerformance
             LossCoefficient = a.Exit.Stagnation is FluidState rest && rest.p > p2 ? (isLossless ? 0 : (p01 - rest.p) / (rest.p - p2)) : null,
         };
         return a.SaturatedReading ? WithRanges(a, performance, total, drop) : performance;
+    }
+
+    // A given efficiency fixes the drop by its definition; otherwise the isentropic exit is asked for.
+    private static bool TryIdealDrop(DeviceAnswer a, double total, out double drop)
+    {
+        bool given = a.Rating is null && !a.EfficiencyImplied && a.Case.Heat == 0 && a.Exit.Velocity is not null;
+        drop = given && a.Case.GivenEfficiency is double eta ? (total - a.Exit.State.h) / eta : 0;
+        if (drop > 0) return true;
+        bool solved = a.ExpandingFluid.FromPS(a.Exit.State.p, a.Inlet.State.s, default, out FluidState ideal) == Outcome.Ok;
+        drop = total - ideal.h;
+        return solved;
     }
 
     // The driest state that energy allows is the slowest, the wettest that entropy allows the fastest.

@@ -13,7 +13,7 @@ internal static class NozzleThroat
         FluidState inlet = a.Inlet.State;
         if (a.Inlet.Velocity >= inlet.w) return a with { Performance = a.Performance with { Regime = "fully-expanded", Choked = false } };
         FluidState rest = a.Inlet.Stagnation!.Value;
-        if (!Choking.TryFind(a.Fluid, rest.h, rest.s, rest.p, out FluidState critical, out bool atKink)) return a;
+        if (!Choking.TryFind(a.Fluid, rest, out FluidState critical, out bool atKink)) return a;
 
         double p2 = a.Exit.State.p, band = DeviceSolver.LimitTolerance * rest.p;
         bool below = p2 < critical.p - band;
@@ -35,7 +35,7 @@ internal static class NozzleThroat
         };
         bool hasThroat = shape == NozzleShape.ConvergentDivergent && below;
         StationAnswer? throat = hasThroat
-            ? StationAnswer.From(a.Fluid, critical, Energy.Velocity(rest.h, critical.h)).Carrying(a.Performance.MassFlow / a.Case.ValueOr(CaseOption.DischargeCoefficient, 1))
+            ? new StationAnswer { State = critical, Velocity = Energy.Velocity(rest.h, critical.h), Stagnation = rest }.Carrying(a.Performance.MassFlow / a.Case.ValueOr(CaseOption.DischargeCoefficient, 1))
             : null;
         return a with { Throat = throat, Performance = performance, Assumptions = assumptions };
     }

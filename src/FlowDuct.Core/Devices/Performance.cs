@@ -3,6 +3,10 @@ namespace FlowDuct.Devices;
 /// <summary>The figures of the device as a whole, SI. Null is "cannot be known from what was given".</summary>
 internal sealed record Performance
 {
+    // In boxes of their own: the figures are copied several times while they grow, and most have neither.
+    private readonly System.Runtime.CompilerServices.StrongBox<Rating.ShockAnswer>? _shock;
+    private readonly System.Runtime.CompilerServices.StrongBox<Rating.MetastableAnswer>? _metastable;
+
     internal string? Regime { get; init; }
 
     internal bool? Choked { get; init; }
@@ -43,14 +47,22 @@ internal sealed record Performance
 
     internal Rating.BackPressureLimits Limits { get; init; }
 
-    internal Rating.ShockAnswer? Shock { get; init; }
+    internal Rating.ShockAnswer? Shock
+    {
+        get => _shock?.Value;
+        init => _shock = value is Rating.ShockAnswer shock ? new(shock) : null;
+    }
 
     /// <summary>Stagnation pressure behind the shock over that before it.</summary>
     internal double? ShockStagnationPressureRatio { get; init; }
 
     internal Rating.JetAnswer? Jet { get; init; }
 
-    internal Rating.MetastableAnswer? Metastable { get; init; }
+    internal Rating.MetastableAnswer? Metastable
+    {
+        get => _metastable?.Value;
+        init => _metastable = value is Rating.MetastableAnswer held ? new(held) : null;
+    }
 
     internal double? EntropyRise { get; init; }
 

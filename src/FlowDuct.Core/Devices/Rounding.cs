@@ -37,7 +37,7 @@ internal static class Rounding
             set(copy, to);
             try
             {
-                return result(DeviceSolver.Stations(copy)) is double there ? Math.Abs(there - now) : 0;
+                return result(DeviceSolver.Stations(copy, Extent.WithoutExitHead)) is double there ? Math.Abs(there - now) : 0;
             }
             catch (FlowDuctException)
             {

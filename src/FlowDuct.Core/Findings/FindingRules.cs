@@ -46,8 +46,16 @@ internal static class FindingRules
     ];
 
     /// <summary>True where no finding is an error and, if strict, none is a caution either.</summary>
-    internal static bool Pass(IReadOnlyList<Finding> findings, bool strict) =>
-        findings.All(f => f.Severity < (strict ? Severity.Caution : Severity.Error));
+    internal static bool Pass(IReadOnlyList<Finding> findings, bool strict)
+    {
+        Severity least = strict ? Severity.Caution : Severity.Error;
+        for (int i = 0; i < findings.Count; i++)
+        {
+            if (findings[i].Severity >= least) return false;
+        }
+
+        return true;
+    }
 
     /// <summary>The rules that speak of a state alone.</summary>
     internal static readonly Func<Fluid, IStations, Finding?>[] OfStates = [Icing.Check, NearCritical.Check, Condensation.Check, RealGas.Check, Extrapolated.Check];
@@ -57,6 +65,22 @@ internal static class FindingRules
         [.. OfStates.Select(rule => rule(answer.Fluid, answer)).OfType<Finding>().OrderByDescending(finding => finding.Severity)];
 
     /// <summary>The findings of an answer, gravest first.</summary>
-    internal static IReadOnlyList<Finding> Apply(DeviceAnswer answer) =>
-        [.. All.Select(rule => rule(answer)).OfType<Finding>().OrderByDescending(finding => finding.Severity)];
+    internal static IReadOnlyList<Finding> Apply(DeviceAnswer answer)
+    {
+        List<Finding>? found = null;
+        foreach (Func<DeviceAnswer, Finding?> rule in All)
+        {
+            if (rule(answer) is Finding finding) Place(found ??= [], finding);
+        }
+
+        return found ?? (IReadOnlyList<Finding>)[];
+    }
+
+    // Behind those that are as grave or graver: few findings, so no sorting.
+    private static void Place(List<Finding> found, Finding finding)
+    {
+        int at = found.Count;
+        while (at > 0 && found[at - 1].Severity < finding.Severity) at--;
+        found.Insert(at, finding);
+    }
 }

@@ -23,6 +23,14 @@ internal static class Choking
         return TryQuick(fluid, h0, s, p0, out throat) || TryThorough(fluid, h0, s, p0, out throat, out atKink);
     }
 
+    /// <summary>The same from the state at rest, which saves asking for it.</summary>
+    internal static bool TryFind(Fluid fluid, in FluidState rest, out FluidState throat, out bool atKink)
+    {
+        atKink = false;
+        throat = rest;
+        return Secant(fluid, rest.h, rest.s, rest.p, ref throat) || TryThorough(fluid, rest.h, rest.s, rest.p, out throat, out atKink);
+    }
+
     /// <summary>The subsonic pressure, Pa, at which the isentrope carries the flux G, kg/(m2.s), between p* and p0.</summary>
     internal static double SubsonicPressure(Fluid fluid, double h0, double s, double G, double pThroat, double p0)
     {

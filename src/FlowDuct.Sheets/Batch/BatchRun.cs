@@ -11,7 +11,7 @@ internal sealed class BatchRun
     private readonly SheetPlan _plan;
     private readonly RowRenderer _renderer;
     private readonly RecordCheck _check = new();
-    private readonly RowKeys _keys = new();
+    private readonly RowKeys _keys;
     private readonly Queue<uint> _checks = new();
     private readonly BatchTally _tally = new();
     private bool _isSameSheet;
@@ -20,7 +20,7 @@ internal sealed class BatchRun
     /// <summary>Opens a sheet and compiles its heading.</summary>
     /// <exception cref="FlowDuctException">The sheet or its heading is refused; kind NotUnderstood.</exception>
     internal BatchRun(RecordSource source, BatchRequest request, SheetPlan plan, RowRenderer renderer) =>
-        (_source, _request, _plan, _renderer) = (source, request, plan, renderer);
+        (_source, _request, _plan, _renderer, _keys) = (source, request, plan, renderer, new RowKeys(plan.Tag >= 0 || plan.Case >= 0));
 
     /// <summary>Rows that were read so far, among them those of other shares.</summary>
     internal long RowsRead { get; private set; }

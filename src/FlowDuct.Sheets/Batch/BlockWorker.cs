@@ -14,7 +14,7 @@ namespace FlowDuct.Sheets.Batch;
 /// <param name="settings">Which rows are wanted.</param>
 internal sealed class BlockWorker(SheetPlan plan, CsvReaderOptions options, RowRenderer renderer, RowSettings settings)
 {
-    private readonly RowSolver _solver = new(plan);
+    private readonly RowSolver _solver = new(plan, renderer.Extent);
 
     /// <summary>Fills the block's output, keys and tally.</summary>
     internal void Process(RowBlock block)

@@ -82,6 +82,7 @@ internal sealed class CaseDraft
         AmbientGiven = _frame.AmbientGiven,
         AmbientAltitude = _frame.Altitude,
         FlowIsVolume = _frame.FlowIsVolume,
+        OnsetIsDifference = _frame.OnsetIsDifference,
         UsesGauge = _frame.UsesGauge,
     };
 }

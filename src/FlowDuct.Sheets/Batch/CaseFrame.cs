@@ -21,7 +21,7 @@ internal record struct CaseFrame
 
     internal ExpansionModel Expansion { get; set; }
 
-    internal CriticalFlowCd? Correlation { get; set; }
+    internal DischargeCorrelation? Correlation { get; set; }
 
     internal RecoveryBasis RecoveryBasis { get; set; }
 
@@ -34,6 +34,8 @@ internal record struct CaseFrame
     internal AmbientAltitude? Altitude { get; set; }
 
     internal bool FlowIsVolume { get; set; }
+
+    internal bool OnsetIsDifference { get; set; }
 
     internal bool UsesGauge { get; set; }
 }

@@ -15,6 +15,8 @@ internal sealed class CsvRows(SheetDialect dialect, ReadOnlyMemory<byte> heading
     private readonly byte[] _separator = [dialect.Separator];
     private readonly bool _quoteNumbers = dialect.Separator == dialect.DecimalMark;
 
+    internal override Extent Extent { get; } = results.Any(result => result.NeedsExitHead) ? Extent.Full : Extent.WithoutExitHead;
+
     /// <summary>The names that this adds behind the columns of the sheet.</summary>
     internal static string[] Titles(IEnumerable<ResultColumn> results) => [.. results.Select(result => "calc " + result.Title), "row", "status", "findings"];
 

@@ -5,7 +5,8 @@ namespace FlowDuct.Sheets.Batch;
 /// <summary>Which figures a device takes: what it does not take is refused, never left unread.</summary>
 internal static class DeviceColumns
 {
-    private const int NozzleOptions = 1 << (int)CaseOption.DischargeCoefficient | 1 << (int)CaseOption.ConvergentAngle | 1 << (int)CaseOption.DivergentAngle;
+    private const int NozzleOptions = 1 << (int)CaseOption.DischargeCoefficient | 1 << (int)CaseOption.ConvergentAngle | 1 << (int)CaseOption.DivergentAngle
+        | 1 << (int)CaseOption.Onset;
     private const int NozzleChoices = 1 << (int)ChoiceColumn.Shape | 1 << (int)ChoiceColumn.Expansion;
     private const int StateChoices = 1 << (int)ChoiceColumn.Fractions;
 

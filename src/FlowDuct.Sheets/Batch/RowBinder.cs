@@ -106,6 +106,7 @@ internal sealed class RowBinder(SheetPlan plan)
         FigureValue value = figure.Read(cell, _basis, Draft.Frame.AmbientPressure);
         double size = SizeOf(figure, option, value.Dimension);
         Draft.Frame.FlowIsVolume |= option == CaseOption.Flow && value.Dimension == Dimension.VolumeFlow;
+        Draft.Frame.OnsetIsDifference |= option == CaseOption.Onset && value.Dimension == Dimension.TemperatureDifference;
         Draft.Options.Set(figure.Slot, value.Si * size, value.HalfWidth * size);
     }
 
@@ -116,6 +117,6 @@ internal sealed class RowBinder(SheetPlan plan)
         _ => 1,
     };
 
-    private static CriticalFlowCd CorrelationOf(FigureCell figure, string text) =>
-        CriticalFlowCd.Find(text) ?? throw CellRefusals.NotOneOf(figure.Place, text, ["a number", .. CriticalFlowCd.All.Select(row => row.Name)]);
+    private static DischargeCorrelation CorrelationOf(FigureCell figure, string text) =>
+        DischargeCorrelation.Find(text) ?? throw CellRefusals.NotOneOf(figure.Place, text, ["a number", .. DischargeCorrelation.All.Select(row => row.Name)]);
 }

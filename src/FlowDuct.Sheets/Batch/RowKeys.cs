@@ -11,7 +11,11 @@ internal sealed class RowKeys
     /// <summary>Keys that are kept.</summary>
     internal const int Most = 1 << 18;
 
-    private readonly Dictionary<ulong, long> _rows = [];
+    private readonly Dictionary<ulong, long> _rows;
+
+    /// <summary>A set of the size that the sheet may need, so that it never moves.</summary>
+    /// <param name="used">False for a sheet without keys.</param>
+    internal RowKeys(bool used) => _rows = new Dictionary<ulong, long>(used ? Most : 0);
 
     /// <summary>True where no more keys are taken in.</summary>
     internal bool IsFull => _rows.Count == Most;

@@ -6,6 +6,9 @@ namespace FlowDuct.Sheets.Batch;
 /// <summary>Writes the results of a run in one of its formats. Used by several workers at once, so it keeps nothing of a row.</summary>
 internal abstract class RowRenderer
 {
+    /// <summary>How much of an answer it needs.</summary>
+    internal virtual Devices.Extent Extent => Devices.Extent.Full;
+
     /// <summary>Writes what stands before the first row.</summary>
     internal abstract void Begin(ByteSink to);
 

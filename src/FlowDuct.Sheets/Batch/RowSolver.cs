@@ -5,7 +5,9 @@ using FlowDuct.Errors;
 namespace FlowDuct.Sheets.Batch;
 
 /// <summary>Answers a record of a sheet by the same solver as a single command.</summary>
-internal sealed class RowSolver(SheetPlan plan)
+/// <param name="plan">The heading, compiled.</param>
+/// <param name="extent">How much of an answer the results need.</param>
+internal sealed class RowSolver(SheetPlan plan, Extent extent)
 {
     private readonly RowBinder _binder = new(plan);
 
@@ -18,7 +20,7 @@ internal sealed class RowSolver(SheetPlan plan)
         try
         {
             _binder.Read(record);
-            return Solve(Draft);
+            return Solve(Draft, extent);
         }
         catch (FlowDuctException refused)
         {
@@ -34,7 +36,7 @@ internal sealed class RowSolver(SheetPlan plan)
 
     /// <summary>The answer of a case.</summary>
     /// <exception cref="FlowDuctException">There is none.</exception>
-    internal static RowAnswer Solve(CaseDraft draft) => draft.Device == SheetDevice.State
+    internal static RowAnswer Solve(CaseDraft draft, Extent extent) => draft.Device == SheetDevice.State
         ? RowAnswer.Of(StateAnswer.Solve(draft.Frame.Fluid!, draft.At))
-        : RowAnswer.Of(DeviceSolver.Solve(draft.Case()));
+        : RowAnswer.Of(DeviceSolver.Solve(draft.Case(), extent));
 }

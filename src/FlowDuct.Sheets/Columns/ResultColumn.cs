@@ -30,6 +30,9 @@ internal sealed class ResultColumn
     /// <summary>The unit, compiled.</summary>
     internal UnitScale Scale { get; }
 
+    /// <summary>True where it follows from the exit brought to rest.</summary>
+    internal bool NeedsExitHead => Name is "exit.p0" or "exit.T0" or "stagnation_pressure_ratio" or "loss_coefficient";
+
     /// <summary>The name with its unit, the basis of a pressure visible: exit.p [bar(a)].</summary>
     internal string Title => Row.IsText || Row.Dimension is Dimension.Ratio or Dimension.Count ? Name : $"{Name} [{Unit.Spelling}{(PressureBasis.IsOpen(Unit) ? "(a)" : string.Empty)}]";
 

@@ -4,9 +4,11 @@ namespace FlowDuct.Sheets.Csv;
 internal static class CellText
 {
     /// <summary>Writes a text as one cell.</summary>
-    internal static void Write(ByteSink to, string text, byte separator)
+    internal static void Write(ByteSink to, string text, byte separator) => WriteQuoted(to, Guarded(text), separator);
+
+    /// <summary>The same for a text that was typed by the reader, such as a negative number.</summary>
+    internal static void WriteQuoted(ByteSink to, string safe, byte separator)
     {
-        string safe = Guarded(text);
         bool quoted = safe.AsSpan().ContainsAny(['"', '\n', '\r', (char)separator]);
         if (!quoted)
         {
