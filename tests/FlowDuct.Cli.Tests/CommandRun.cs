@@ -17,6 +17,15 @@ internal sealed record CommandRun(int Status, string Output, string Error)
         return new CommandRun(status, Encoding.UTF8.GetString(output.ToArray()), Encoding.UTF8.GetString(error.ToArray()));
     }
 
+    /// <summary>Runs with a sheet on the standard input.</summary>
+    internal static CommandRun RunOn(string sheet, params string[] args)
+    {
+        using var output = new MemoryStream();
+        using var error = new MemoryStream();
+        int status = Application.Run(args, output, error, terminal: false, () => new MemoryStream(Encoding.UTF8.GetBytes(sheet)));
+        return new CommandRun(status, Encoding.UTF8.GetString(output.ToArray()), Encoding.UTF8.GetString(error.ToArray()));
+    }
+
     /// <summary>Runs a line as a shell would split it: words at spaces, double quotes kept together, a backslash joins lines.</summary>
     internal static CommandRun RunLine(string line) => Run([.. Words(line).Skip(1)]);
 

@@ -125,7 +125,7 @@ internal sealed class Arguments
         string word = args.Length > 1 ? args[1] : string.Empty;
         if (word is "--help" or "-h" or "--version") return CommandName.Nozzle;
         CommandRow? device = Array.Find(CommandTable.All, row => row.Word == word && (row.Name & CommandName.Answering) != 0);
-        return device?.Name ?? throw Usage.NotOneOf("sweep", word.StartsWith('-') ? "(nothing)" : word, [.. CommandTable.All.Where(row => (row.Name & CommandName.Answering) != 0).Select(row => row.Word)]);
+        return device?.Name ?? throw Usage.NotOneOf("sweep", word.Length == 0 || word.StartsWith('-') ? "(nothing)" : word, [.. CommandTable.All.Where(row => (row.Name & CommandName.Answering) != 0).Select(row => row.Word)]);
     }
 
     // A forgotten value leaves nothing, or makes the next option look like one.
