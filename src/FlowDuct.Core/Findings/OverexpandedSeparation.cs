@@ -8,7 +8,10 @@ namespace FlowDuct.Findings;
 /// <summary>The exit plane lies so far below the back pressure that the flow may leave the wall inside.</summary>
 internal static class OverexpandedSeparation
 {
-    internal static Finding? Check(DeviceAnswer a)
+    // What a message will need is set aside where its method begins, so that method begins only for a rated nozzle.
+    internal static Finding? Check(DeviceAnswer a) => a.Rating is null ? null : OfRated(a);
+
+    private static Finding? OfRated(DeviceAnswer a)
     {
         if (a.Performance.Jet is not JetAnswer jet || Separation.Of(a) is not Separation separation) return null;
         bool near = separation.AreaRatio is not null;

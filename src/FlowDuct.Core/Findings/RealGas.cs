@@ -15,9 +15,11 @@ internal static class RealGas
     // Below this compressibility factor the series of one term stands for no gas.
     private const double LeastFactor = 0.5;
 
-    internal static Finding? Check(Fluid fluid, IStations stations)
+    // What a message will need is set aside where its method begins, so that method begins only for a gas.
+    internal static Finding? Check(Fluid fluid, IStations stations) => fluid is IdealGas { Virial: SecondVirial virial } gas ? OfGas(virial, gas, stations) : null;
+
+    private static Finding? OfGas(SecondVirial virial, IdealGas gas, IStations stations)
     {
-        if (fluid is not IdealGas { Virial: SecondVirial virial } gas) return null;
         double M = gas.MolarMass / 1000;
         RealGasEstimate estimate = Worst(virial, M, stations, out FluidState at);
         double? flux = FluxDeviation(virial, M, gas, stations);

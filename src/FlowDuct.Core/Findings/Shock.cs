@@ -7,7 +7,10 @@ namespace FlowDuct.Findings;
 /// <summary>A normal shock stands in the divergence or in the exit plane.</summary>
 internal static class Shock
 {
-    internal static Finding? Check(DeviceAnswer a)
+    // What a message will need is set aside where its method begins, so that method begins only for a rated nozzle.
+    internal static Finding? Check(DeviceAnswer a) => a.Rating is null ? null : OfRated(a);
+
+    private static Finding? OfRated(DeviceAnswer a)
     {
         if (a.Performance.Shock is not ShockAnswer shock) return null;
         double M = shock.V1 / shock.Upstream.w;

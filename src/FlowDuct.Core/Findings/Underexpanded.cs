@@ -7,7 +7,10 @@ namespace FlowDuct.Findings;
 /// <summary>The jet leaves above the back pressure and goes on expanding outside.</summary>
 internal static class Underexpanded
 {
-    internal static Finding? Check(DeviceAnswer a)
+    // What a message will need is set aside where its method begins, so that method begins only for a rated nozzle.
+    internal static Finding? Check(DeviceAnswer a) => a.Rating is null ? null : OfRated(a);
+
+    private static Finding? OfRated(DeviceAnswer a)
     {
         if (a.Performance.Jet is not JetAnswer { PressureRatio: > 1 } jet) return null;
         string turning = jet.TurningAngle is null ? " beyond what the fluid's range holds" : string.Empty;

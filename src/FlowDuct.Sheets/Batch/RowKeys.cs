@@ -11,21 +11,32 @@ internal sealed class RowKeys
     /// <summary>Keys that are kept.</summary>
     internal const int Most = 1 << 18;
 
-    private readonly Dictionary<ulong, long> _rows;
+    // Open addressing at half load: a key is found or placed within a step or two.
+    private const int Slots = 2 * Most;
 
-    /// <summary>A set of the size that the sheet may need, so that it never moves.</summary>
+    private readonly ulong[] _keys;
+    private readonly long[] _rows;
+    private int _count;
+
+    /// <summary>A set of the size that a sheet may need, so that it never moves.</summary>
     /// <param name="used">False for a sheet without keys.</param>
-    internal RowKeys(bool used) => _rows = new Dictionary<ulong, long>(used ? Most : 0);
+    internal RowKeys(bool used) => (_keys, _rows) = (new ulong[used ? Slots : 0], new long[used ? Slots : 0]);
 
     /// <summary>True where no more keys are taken in.</summary>
-    internal bool IsFull => _rows.Count == Most;
+    internal bool IsFull => _count == Most;
 
     /// <summary>The earlier row of a key, or 0; a key that is new is kept. A key of 0 is none.</summary>
     internal long EarlierRow(ulong key, long row)
     {
         if (key == 0) return 0;
-        if (_rows.TryGetValue(key, out long earlier)) return earlier;
-        if (!IsFull) _rows.Add(key, row);
+        int slot = (int)(key % Slots);
+        while (_keys[slot] != 0)
+        {
+            if (_keys[slot] == key) return _rows[slot];
+            slot = (slot + 1) % Slots;
+        }
+
+        if (!IsFull) (_keys[slot], _rows[slot], _count) = (key, row, _count + 1);
         return 0;
     }
 
