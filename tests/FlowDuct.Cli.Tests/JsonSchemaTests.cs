@@ -49,6 +49,19 @@ public class JsonSchemaTests
         Assert.False(s_schema.Evaluate(answer.RootElement).IsValid);
     }
 
+    [Fact]
+    public void Rows_of_a_sheet_keep_it_too()
+    {
+        var unsolved = JsonSchema.FromFile(Path.Combine(AppContext.BaseDirectory, "schema", "unsolved-1.json"));
+        CommandRun run = CommandRun.RunOn(
+            "tag,device,fluid,inlet.p [bar(a)],inlet.T [degC],exit.p [bar(a)],at.p [bar(a)],at.T [degC]\n"
+            + "N-1,nozzle,steam,9,230,3.2,,\nN-2,state,air,,,,1,20\nN-3,nozzle,steam,9,230,12,,\nN-4,nozzle,steam,9,x,3,,\n",
+            "run", "-", "--format", "jsonl", "--quiet");
+        JsonElement[] rows = [.. run.Output.TrimEnd('\n').Split('\n').Select(line => JsonDocument.Parse(line).RootElement)];
+        Assert.Equal([true, true, false, false], rows.Select(row => s_schema.Evaluate(row).IsValid));
+        Assert.Equal([false, false, true, true], rows.Select(row => unsolved.Evaluate(row).IsValid));
+    }
+
     private static JsonDocument Answer(string line)
     {
         CommandRun run = CommandRun.RunLine(line + " --format json");

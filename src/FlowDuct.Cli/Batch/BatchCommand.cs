@@ -45,6 +45,7 @@ internal static class BatchCommand
         foreach ((string heading, string near) in plan.NearMisses) report.NearMiss(heading, near);
         BatchEnd end = Finish(arguments, streams, new BatchRun(source, request, plan, renderer), Settings(source, renderer, format, shard, options), progress);
         report.Tell(end);
+        if (stop.Status != 0 && arguments.Value("--output") is string output) report.TellKept(output);
         return stop.Status != 0 ? stop.Status : BatchReport.StatusOf(end.Tally.Gravest);
     }
 

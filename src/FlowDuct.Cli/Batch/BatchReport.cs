@@ -31,6 +31,13 @@ internal sealed class BatchReport(string name, Stream stderr, bool quiet)
         if (unsolved > 0) Say($"{unsolved} of {tally.Rows} rows have no answer{(tally.FirstFailure is string first ? "; the first is " + first : string.Empty)}");
     }
 
+    /// <summary>Tells what an interrupted run has left; nothing where it left nothing.</summary>
+    internal void TellKept(string output)
+    {
+        string part = PartFile.PartName(output);
+        if (File.Exists(PartFile.MarksName(output))) Say($"the results so far are kept in {Echo.Ascii(part)}; the same command with --resume goes on from there");
+    }
+
     private void Say(string text)
     {
         if (!quiet) Application.Complain(stderr, $"{name}: {text}");
