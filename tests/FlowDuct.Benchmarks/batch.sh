@@ -27,14 +27,14 @@ timed() { # name, output, command...
 
 for _ in $(seq "$runs"); do
     timed mlr /dev/null mlr --csv put "$trivial" "$work/rows.csv"
-    timed "run, one worker" "$work/one.csv" "$native" run "$work/rows.csv" --jobs 1 --show "$show"
-    timed "run, two workers" "$work/two.csv" "$native" run "$work/rows.csv" --jobs 2 --show "$show"
+    timed "run, one worker" "$work/one.csv" "$native" run "$work/rows.csv" --jobs 1 --quiet --show "$show"
+    timed "run, two workers" "$work/two.csv" "$native" run "$work/rows.csv" --jobs 2 --quiet --show "$show"
     cmp "$work/one.csv" "$work/two.csv"
 done
 
 for n in 100000 "$many"; do
     python3 tests/FlowDuct.Benchmarks/steam_rows.py "$n" > "$work/rows.csv"
-    timed "memory, $n rows, two workers" /dev/null "$native" run "$work/rows.csv" --jobs 2 --show "$show"
+    timed "memory, $n rows, two workers" /dev/null "$native" run "$work/rows.csv" --jobs 2 --quiet --show "$show"
 done
 
 python3 - "$work/times" "$rows" > "$result" <<'PY'
@@ -44,16 +44,16 @@ runs = collections.defaultdict(list)
 for line in open(sys.argv[1]):
     name, *cells = line.strip().rsplit(",", 4)
     runs[name].append([float(cell) for cell in cells])
-base = statistics.median(row[0] for row in runs["mlr"])
+base, work = (statistics.median(row[0] for row in runs["mlr"]), statistics.median(row[1] + row[2] for row in runs["mlr"]))
 model = next(line.split(":")[1].strip() for line in open("/proc/cpuinfo") if line.startswith("model name"))
 print(f"# made: {time.strftime('%Y-%m-%d %H:%M', time.gmtime())} UTC")
 print(f"# machine: {model}; {os.cpu_count()} processors; load {os.getloadavg()[0]:.1f} at the end; {platform.system()} {platform.machine()}")
-print(f"# {sys.argv[2]} rows of steam nozzles, ten columns in, ten results out; medians; mlr put of ten trivial columns in the same run")
-print("job,runs,wall_s,wall_to_mlr,user_s,system_s,peak_kB")
+print(f"# {sys.argv[2]} rows of steam nozzles, ten columns in, ten results out; medians; mlr put of ten trivial columns in the same run; on a shared machine trust processor times")
+print("job,runs,wall_s,wall_to_mlr,processor_s,processor_to_mlr,peak_kB")
 for name, rows in runs.items():
-    wall, user, system, peak = (statistics.median(row[i] for row in rows) for i in range(4))
-    ratio = "" if name.startswith("memory") else f"{wall / base:.3f}"
+    wall, used, peak = (statistics.median(values) for values in zip(*((row[0], row[1] + row[2], row[3]) for row in rows)))
+    ratio, share = ("", "") if name.startswith("memory") else (f"{wall / base:.3f}", f"{used / work:.3f}")
     quoted = f'"{name}"' if "," in name else name
-    print(f"{quoted},{len(rows)},{wall:.2f},{ratio},{user:.2f},{system:.2f},{peak:.0f}")
+    print(f"{quoted},{len(rows)},{wall:.2f},{ratio},{used:.2f},{share},{peak:.0f}")
 PY
 cat "$result"
