@@ -2,6 +2,8 @@ using System.Globalization;
 using System.Text.Json;
 using FlowDuct.Cli.CommandLine;
 using FlowDuct.Quantities;
+using FlowDuct.Sheets;
+using FlowDuct.Sheets.Batch;
 using Xunit;
 
 namespace FlowDuct.Cli.Tests;
@@ -26,6 +28,8 @@ public class BatchTests
         { "inlet.p0 [bar(a)],inlet.moisture [%],exit.p/p0,flow [kg/s]", "12,2,0.35,1.4", "nozzle --fluid steam", "--inlet \"p0=12 bar, moisture=2%\" --exit \"p/p0=0.35\" --flow \"1.4 kg/s\"" },
         { "inlet.p0 [bar(a)],inlet.T0 [degC],throat.d [mm],back.p [bar(a)],expansion,onset [K]", "6,165,18,1.1,supersaturated,30", "nozzle --fluid steam", "--inlet \"p0=6 bar, T0=165 degC\" --throat \"d=18 mm\" --back \"p=1.1 bar\" --expansion supersaturated --onset \"30 K\"" },
         { "inlet.p [bar(a)],inlet.T [K],inlet.V [m/s],exit.p [bar(a)],exit.T [K],heat-loss [kW],flow [kg/s]", "5,300,60,4.8,295,5,2", "nozzle --fluid N2", "--inlet \"p=5 bar, T=300 K, V=60 m/s\" --exit \"p=4.8 bar, T=295 K\" --heat-loss \"5 kW\" --flow \"2 kg/s\"" },
+        { "inlet.p [bar(a)],inlet.T [degC],inlet.d [mm],throat.d [mm],throat.dp [kPa],exit.d [mm],loss-coefficient,included-angle [deg]", "6,40,100,60,25,100,idelchik,8", "venturi --fluid air", "--inlet \"p=6 bar, T=40 degC, d=100 mm\" --throat \"d=60 mm, dp=25 kPa\" --exit \"d=100 mm\" --loss-coefficient idelchik --included-angle \"8 deg\"" },
+        { "inlet.p [bar(a)],inlet.T [degC],inlet.V [m/s],inlet.rect [mm],exit.rect,length [mm],loss-coefficient", "1,20,90,600x400,900x400 mm,1200,best-planar", "diffuser --fluid air", "--inlet \"p=1 bar, T=20 degC, V=90 m/s, rect=600x400 mm\" --exit \"rect=900x400 mm\" --length \"1200 mm\" --loss-coefficient best-planar" },
         { "inlet.p [barg],inlet.T [degC],inlet.V [m/s],exit.rise [mbar],ambient.altitude [m]", "0.02,20,90,30,1500", "diffuser --fluid air", "--inlet \"p=0.02 barg, T=20 degC, V=90 m/s\" --exit \"rise=30 mbar\" --ambient \"altitude=1500 m\"" },
     };
 
@@ -58,6 +62,24 @@ public class BatchTests
         string[] left = few.Split('\n')[1].Split(','), right = more.Split('\n')[1].Split(',');
         Assert.Equal(left[..^3], right[..^4]);
         Assert.Equal(left[^3..], right[^3..]);
+    }
+
+    // Sheets know what a device takes without the command line; both tables say the same.
+    [Fact]
+    public void A_sheet_takes_of_a_device_what_its_command_takes()
+    {
+        (SheetDevice Device, CommandName Command)[] devices =
+            [(SheetDevice.Nozzle, CommandName.Nozzle), (SheetDevice.Diffuser, CommandName.Diffuser), (SheetDevice.Venturi, CommandName.Venturi), (SheetDevice.State, CommandName.State)];
+        foreach ((SheetDevice device, CommandName command) in devices)
+        {
+            string[] options = [.. OptionTable.Of(command).Select(row => row.Name)];
+            foreach (CaseOption option in Enum.GetValues<CaseOption>())
+                Assert.True(options.Contains("--" + QuantityCatalogue.Of(option).Word) == DeviceColumns.Takes(device, option), $"{device} {option}");
+            foreach ((ChoiceColumn choice, string name, _) in ChoiceWords.All)
+                Assert.True(options.Contains("--" + name) == DeviceColumns.Takes(device, choice), $"{device} {name}");
+            foreach (StationLists list in new[] { StationLists.Inlet, StationLists.Throat, StationLists.Exit, StationLists.Back, StationLists.At })
+                Assert.True(options.Contains("--" + StationWords.Of(list)) == DeviceColumns.Takes(device, list), $"{device} {list}");
+        }
     }
 
     [Theory]

@@ -55,9 +55,9 @@ public class SweepTests
     }
 
     [Theory]
-    [InlineData("flowduct sweep", "sweep: (nothing) is not one of state, nozzle, diffuser")]
-    [InlineData("flowduct sweep --vary \"inlet.p=1,2 bar\"", "sweep: (nothing) is not one of state, nozzle, diffuser")]
-    [InlineData("flowduct sweep nozle --fluid air", "sweep: nozle is not one of state, nozzle, diffuser\n  did you mean nozzle?")]
+    [InlineData("flowduct sweep", "sweep: (nothing) is not one of state, nozzle, diffuser, venturi")]
+    [InlineData("flowduct sweep --vary \"inlet.p=1,2 bar\"", "sweep: (nothing) is not one of state, nozzle, diffuser, venturi")]
+    [InlineData("flowduct sweep nozle --fluid air", "sweep: nozle is not one of state, nozzle, diffuser, venturi\n  did you mean nozzle?")]
     [InlineData(Steam + "--vary \"inlet.p=1..2 bar\"", "--vary: inlet.p: the range does not say its points")]
     [InlineData(Steam + "--inlet \"p=3 bar, T=230 degC\" --vary \"exti=1,2\"", "--vary: exti is no input of this device")]
     public void A_slip_is_told(string line, string message)

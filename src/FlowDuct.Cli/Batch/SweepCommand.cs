@@ -123,13 +123,20 @@ internal static class SweepCommand
             var binder = new CaseBinder(arguments.With(SweepPoint.Options(arguments, grid, indices)));
             ambient = binder.AmbientPressure;
             if (arguments.Device == CommandName.State) return RowAnswer.Of(StateAnswer.Solve(binder.Fluid(), binder.At()));
-            return RowAnswer.Of(DeviceSolver.Solve(binder.Device(arguments.Device == CommandName.Nozzle ? DeviceKind.Nozzle : DeviceKind.Diffuser)));
+            return RowAnswer.Of(DeviceSolver.Solve(binder.Device(KindOf(arguments.Device))));
         }
         catch (FlowDuctException refused)
         {
             return RowAnswer.Of(refused.Refusal);
         }
     }
+
+    private static DeviceKind KindOf(CommandName device) => device switch
+    {
+        CommandName.Nozzle => DeviceKind.Nozzle,
+        CommandName.Diffuser => DeviceKind.Diffuser,
+        _ => DeviceKind.Venturi,
+    };
 
     private static byte[] Record(SweepGrid grid, int[] indices)
     {

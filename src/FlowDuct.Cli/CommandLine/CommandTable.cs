@@ -16,7 +16,7 @@ internal static class CommandTable
             "flowduct diffuser --fluid air --inlet \"p=14.2 psi, T=70 degF, V=540 ft/s\" --exit \"V=120 ft/s\" --recovery 0.72"),
         new(CommandName.Venturi, "venturi", "A nozzle followed by a diffuser as one device: flow, throat, recovery, permanent pressure loss and choking of a metering throat.",
             "flowduct venturi --fluid air --inlet \"p=6 bar, T=40 degC, d=100 mm\" --throat \"d=60 mm, dp=25 kPa\" --exit \"d=100 mm\" --loss-coefficient idelchik --included-angle \"8 deg\""),
-        new(CommandName.Sweep, "sweep", "Answers one case again and again while inputs vary: sweep nozzle, sweep diffuser or sweep state, with the options of that command; a row of CSV to the point, several --vary make a grid of which the last varies fastest.",
+        new(CommandName.Sweep, "sweep", "Answers one case again and again while inputs vary: sweep nozzle, diffuser, venturi or state, with the options of that command; a row of CSV to the point, several --vary make a grid of which the last varies fastest.",
             "flowduct sweep nozzle --fluid steam --inlet \"T=230 degC\" --exit \"p=1 bar\" --vary \"inlet.p=4..12 bar by 2 bar\""),
         new(CommandName.Run, "run", "Answers every row of a sheet (CSV, a file or - for the standard input): devices, fluids and units may be mixed; results stand behind the cells of each row, errors in their row.",
             "flowduct run cases.csv --output results.csv"),

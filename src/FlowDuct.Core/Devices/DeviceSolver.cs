@@ -33,7 +33,7 @@ internal static class DeviceSolver
         if (c.Has(CaseOption.Onset)) throw Refusals.OnsetWithoutHeldPhase();
         Inlet inlet = Inlet.Solve(c);
         if (inlet.Station.Stagnation is null) throw Refusals.NoSuchInlet(inlet.Given.Given);
-        return c.Device == DeviceKind.Diffuser ? Diffusers.DiffuserSolver.Stations(c, inlet) : Expand(c, inlet, inlet, ExitFigures.Read(c, inlet));
+        return c.Device == DeviceKind.Diffuser ? Diffusers.DiffuserSolver.Stations(c, inlet) : Expand(c, inlet, inlet, ExitFigures.Read(c, inlet), extent);
     }
 
     /// <summary>The exit from its figures.</summary>
@@ -41,7 +41,8 @@ internal static class DeviceSolver
     /// <param name="inlet">The inlet.</param>
     /// <param name="passed">The station from which the exit is reached: the inlet, or what lies behind a shock in it.</param>
     /// <param name="given">The figures of the exit and its loss.</param>
-    internal static DeviceAnswer Expand(DeviceCase c, Inlet inlet, Inlet passed, StationFigures given)
+    /// <param name="extent">How much of the answer is wanted.</param>
+    internal static DeviceAnswer Expand(DeviceCase c, Inlet inlet, Inlet passed, StationFigures given, Extent extent = Extent.Full)
     {
         double gravity = c.ValueOr(CaseOption.Gravity, Energy.StandardGravity);
         double h0 = inlet.Station.StagnationEnthalpy!.Value + c.Heat + (gravity * (inlet.Given.Elevation - given.Elevation));

@@ -76,6 +76,7 @@ internal sealed class CaseDraft
         Branch = _frame.Branch,
         Expansion = _frame.Expansion,
         DischargeCorrelation = _frame.Correlation,
+        LossWord = _frame.LossWord,
         RecoveryBasis = _frame.RecoveryBasis,
         AmbientPressure = _frame.AmbientPressure,
         AmbientTemperature = _frame.AmbientTemperature,

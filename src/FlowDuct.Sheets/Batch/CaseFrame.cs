@@ -23,6 +23,8 @@ internal record struct CaseFrame
 
     internal DischargeCorrelation? Correlation { get; set; }
 
+    internal string? LossWord { get; set; }
+
     internal RecoveryBasis RecoveryBasis { get; set; }
 
     internal double AmbientPressure { get; set; } = 101325;

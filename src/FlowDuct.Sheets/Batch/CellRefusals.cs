@@ -7,8 +7,8 @@ namespace FlowDuct.Sheets.Batch;
 internal static class CellRefusals
 {
     internal static FlowDuctException NoDevice(string text) => text.Length == 0
-        ? Refuse("device", "it is empty", "write nozzle, diffuser or state")
-        : NotOneOf("device", text, ["nozzle", "diffuser", "state"]);
+        ? Refuse("device", "it is empty", "write nozzle, diffuser, venturi or state")
+        : NotOneOf("device", text, ["nozzle", "diffuser", "venturi", "state"]);
 
     internal static FlowDuctException NoFluid(string text) => text.Length == 0
         ? Refuse("fluid", "it is empty", "write for example steam")
@@ -44,6 +44,7 @@ internal static class CellRefusals
     {
         SheetDevice.Nozzle => "nozzle",
         SheetDevice.Diffuser => "diffuser",
+        SheetDevice.Venturi => "venturi",
         _ => "property question (device state)",
     };
 

@@ -54,6 +54,15 @@ internal sealed class FigureCell
         return new FigureValue(si, ValueParser.IsAnEnd(Row, si) ? 0 : scale.IntervalToSi(half), Column.Unit!.Value.Dimension, scale.NeedsAmbient);
     }
 
+    /// <summary>Reads the two sides of a shape, such as 600x400 or 900x500 mm.</summary>
+    /// <exception cref="FlowDuctException">The cell is refused; kind NotUnderstood.</exception>
+    internal StationItem ReadPair(ReadOnlySpan<byte> cell)
+    {
+        string text = Encoding.UTF8.GetString(cell);
+        if (char.IsAsciiDigit(text[^1]) && Column.Unit is UnitReading unit) text += " " + unit.Spelling;
+        return StationListParser.Parse(Place, Column.List, $"{Row.Key}={text}", 0)[0];
+    }
+
     private bool IsCustomBesideGauge(UnitBasis? basis) =>
         basis == UnitBasis.Gauge && Column.Unit is UnitReading unit && PressureBasis.IsOpen(unit) && PressureBasis.IsAbsoluteByCustom(unit);
 

@@ -2,6 +2,7 @@ using System.Text;
 using CsvHelper;
 using FlowDuct.Devices;
 using FlowDuct.Devices.Coefficients;
+using FlowDuct.Devices.Diffusers;
 using FlowDuct.Errors;
 using FlowDuct.Fluids.Gases;
 using FlowDuct.Quantities;
@@ -28,7 +29,7 @@ internal sealed class RowBinder(SheetPlan plan)
         Draft.Device = DeviceOf(Cell(record, plan.Device));
         foreach (int index in plan.Choices) Choose(plan.Columns[index], Cell(record, index));
         Draft.Frame.Fluid = _fluids.Find(Cell(record, plan.Fluid), Fractions());
-        Draft.Frame.Device = Draft.Device == SheetDevice.Diffuser ? DeviceKind.Diffuser : DeviceKind.Nozzle;
+        Draft.Frame.Device = Draft.Device switch { SheetDevice.Diffuser => DeviceKind.Diffuser, SheetDevice.Venturi => DeviceKind.Venturi, _ => DeviceKind.Nozzle };
         _basis = BasisOf(Cell(record, plan.Basis));
         ReadAmbient(record);
         foreach (FigureCell figure in plan.Stations) ReadStation(figure, Cell(record, figure.Index));
@@ -41,6 +42,7 @@ internal sealed class RowBinder(SheetPlan plan)
     {
         if (cell.SequenceEqual("nozzle"u8)) return SheetDevice.Nozzle;
         if (cell.SequenceEqual("diffuser"u8)) return SheetDevice.Diffuser;
+        if (cell.SequenceEqual("venturi"u8)) return SheetDevice.Venturi;
         return cell.SequenceEqual("state"u8) ? SheetDevice.State : throw CellRefusals.NoDevice(Encoding.UTF8.GetString(cell));
     }
 
@@ -82,12 +84,18 @@ internal sealed class RowBinder(SheetPlan plan)
             if (!cell.IsEmpty) Draft.Ambient.Set(figure.Slot, figure.Read(cell, null, Draft.Frame.AmbientPressure).Si);
         }
 
-        if (Draft.Ambient.Mask != 0) AmbientCells.Apply(Draft.Ambient, ref Draft.Frame);
+        if (!Draft.Ambient.IsEmpty) AmbientCells.Apply(Draft.Ambient, ref Draft.Frame);
     }
 
     private void ReadStation(FigureCell figure, ReadOnlySpan<byte> cell)
     {
         if (cell.IsEmpty) return;
+        if (figure.Row.IsPair)
+        {
+            Draft.Of(figure.Column.List).Set(figure.ReadPair(cell));
+            return;
+        }
+
         FigureValue value = figure.Read(cell, _basis, Draft.Frame.AmbientPressure);
         Draft.Of(figure.Column.List).Set(figure.Slot, value.Si, value.HalfWidth);
         Draft.Frame.UsesGauge |= value.WasGauge;
@@ -97,17 +105,24 @@ internal sealed class RowBinder(SheetPlan plan)
     {
         if (cell.IsEmpty) return;
         var option = (CaseOption)figure.Slot;
-        if (option == CaseOption.DischargeCoefficient && char.IsAsciiLetter((char)cell[0]))
-        {
-            Draft.Frame.Correlation = CorrelationOf(figure, Encoding.UTF8.GetString(cell));
-            return;
-        }
+        if (char.IsAsciiLetter((char)cell[0]) && TakesWord(figure, option, cell)) return;
 
         FigureValue value = figure.Read(cell, _basis, Draft.Frame.AmbientPressure);
         double size = SizeOf(figure, option, value.Dimension);
         Draft.Frame.FlowIsVolume |= option == CaseOption.Flow && value.Dimension == Dimension.VolumeFlow;
         Draft.Frame.OnsetIsDifference |= option == CaseOption.Onset && value.Dimension == Dimension.TemperatureDifference;
         Draft.Options.Set(figure.Slot, value.Si * size, value.HalfWidth * size);
+    }
+
+    // A name stands where a number could.
+    private bool TakesWord(FigureCell figure, CaseOption option, ReadOnlySpan<byte> cell)
+    {
+        string text = Encoding.UTF8.GetString(cell);
+        if (option == CaseOption.DischargeCoefficient) Draft.Frame.Correlation = CorrelationOf(figure, text);
+        else if (option == CaseOption.LossCoefficient && Draft.Device != SheetDevice.Nozzle)
+            Draft.Frame.LossWord = DiffuserLoss.Words.Contains(text) ? text : throw CellRefusals.NotOneOf(figure.Place, text, ["a number", .. DiffuserLoss.Words]);
+        else return false;
+        return true;
     }
 
     private double SizeOf(FigureCell figure, CaseOption option, Dimension dimension) => option switch

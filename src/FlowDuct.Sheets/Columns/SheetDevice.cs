@@ -9,6 +9,9 @@ internal enum SheetDevice
     /// <summary>A diffuser.</summary>
     Diffuser,
 
+    /// <summary>A nozzle followed by a diffuser.</summary>
+    Venturi,
+
     /// <summary>One state of a fluid.</summary>
     State,
 }

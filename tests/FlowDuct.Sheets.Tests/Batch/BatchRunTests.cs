@@ -134,13 +134,13 @@ public class BatchRunTests
     }
 
     [Theory]
-    [InlineData("diffuser,air,1,40,100,,,0.02,", "throat.d [m]: a diffuser does not take it")]
+    [InlineData("diffuser,air,1,40,100,,,0.02,convergent", "shape: a diffuser does not take it")]
     [InlineData("state,air,,,,1,40,0.02,", "throat.d [m]: a property question (device state) does not take it")]
     [InlineData("nozzle,air,7,40,,1,40,,", "at.p [bar(a)]: a nozzle does not take it")]
     [InlineData("diffuser,air,1,40,100,,,,convergent", "shape: a diffuser does not take it")]
     [InlineData("nozzle,air,7,40,,,,,conical", "shape: conical is not one of convergent, convergent-divergent")]
-    [InlineData("venturi,air,7,40,,,,,", "device: venturi is not one of nozzle, diffuser, state")]
-    [InlineData(",air,7,40,,,,,", "device: it is empty; write nozzle, diffuser or state")]
+    [InlineData("ventury,air,7,40,,,,,", "device: ventury is not one of nozzle, diffuser, venturi, state; did you mean venturi?")]
+    [InlineData(",air,7,40,,,,,", "device: it is empty; write nozzle, diffuser, venturi or state")]
     [InlineData("nozzle,,7,40,,,,,", "fluid: it is empty; write for example steam")]
     [InlineData("nozzle,steem,7,40,,,,,", "fluid: steem is not a fluid of this version; did you mean steam?")]
     public void What_a_device_does_not_take_is_refused_and_never_left_unread(string row, string words)
