@@ -77,7 +77,10 @@ internal sealed class BlockPipeline(int jobs, Func<BlockWorker> worker)
         var thread = new Thread(() =>
         {
             foreach (Ticket ticket in queue.GetConsumingEnumerable()) ticket.Work(own);
-        }) { IsBackground = true };
+        })
+        {
+            IsBackground = true,
+        };
         thread.Start();
         return thread;
     }

@@ -14,6 +14,7 @@ internal sealed class RowBinder(SheetPlan plan)
 {
     private readonly FluidCells _fluids = new();
     private UnitBasis? _basis;
+    private bool _massFractions;
 
     /// <summary>The case of the record read last.</summary>
     internal CaseDraft Draft { get; } = new();
@@ -55,8 +56,6 @@ internal sealed class RowBinder(SheetPlan plan)
 
     private FractionBasis? Fractions() =>
         (Draft.Choices >> (int)ChoiceColumn.Fractions & 1) == 0 ? null : _massFractions ? FractionBasis.Mass : FractionBasis.Mole;
-
-    private bool _massFractions;
 
     private void Choose(SheetColumn column, ReadOnlySpan<byte> cell)
     {
