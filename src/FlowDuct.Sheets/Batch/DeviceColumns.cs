@@ -39,7 +39,7 @@ internal static class DeviceColumns
     /// <summary>True where a device takes a choice.</summary>
     internal static bool Takes(SheetDevice device, ChoiceColumn choice) => choice switch
     {
-        ChoiceColumn.Fractions => true,
+        ChoiceColumn.Fractions or ChoiceColumn.EquationOfState => true,
         ChoiceColumn.Branch => device != SheetDevice.State,
         ChoiceColumn.RecoveryBasis => device == SheetDevice.Diffuser,
         _ => device == SheetDevice.Nozzle,

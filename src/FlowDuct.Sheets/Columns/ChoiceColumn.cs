@@ -17,6 +17,9 @@ internal enum ChoiceColumn
 
     /// <summary>mole or mass.</summary>
     Fractions,
+
+    /// <summary>ideal or reference.</summary>
+    EquationOfState,
 }
 
 /// <summary>The words of choice columns, in the order of the values they stand for.</summary>
@@ -29,6 +32,7 @@ internal static class ChoiceWords
         (ChoiceColumn.Expansion, "expansion", ["equilibrium", "supersaturated", "single-phase"]),
         (ChoiceColumn.RecoveryBasis, "recovery-basis", ["stagnation", "dynamic"]),
         (ChoiceColumn.Fractions, "fractions", ["mole", "mass"]),
+        (ChoiceColumn.EquationOfState, "equation-of-state", ["ideal", "reference"]),
     ];
 
     /// <summary>The words of a column.</summary>

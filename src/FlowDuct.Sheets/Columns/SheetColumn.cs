@@ -94,6 +94,7 @@ internal sealed record SheetColumn(string Heading, ColumnKind Kind)
         "device" => ColumnKind.Device,
         "fluid" => ColumnKind.Fluid,
         "pressure-basis" => ColumnKind.PressureBasis,
+        "reference-state" => ColumnKind.ReferenceState,
         "waiver" => ColumnKind.Waiver,
         _ => ColumnKind.PassThrough,
     };

@@ -149,6 +149,28 @@ public class BatchRunTests
         Assert.Contains(words, run.Lines[1], StringComparison.Ordinal);
     }
 
+    [Theory]
+    [InlineData("300 scfm", "", "flow: 300 scfm names no reference state (conventions differ by up to 8.7 %)")]
+    [InlineData("3 kg/s", "\"T=60 degF, p=1 atm\"", "reference-state: nothing is counted at it")]
+    [InlineData("", "\"T=60 degF, p=1 atm\"", "reference-state: nothing is counted at it")]
+    [InlineData("3 kg/s dry", "", "flow: 3 kg/s dry: a mass flow and an actual volume flow are of the whole gas")]
+    [InlineData("300 scfm", "T=60 degF", "reference-state: p is missing: a reference state has both")]
+    public void A_volume_of_gas_says_where_it_is_counted(string flow, string state, string words)
+    {
+        SheetRun run = SheetRun.Of($"device,fluid,inlet.p [bar(a)],inlet.T [degC],exit.p [bar(a)],flow,reference-state\nnozzle,air,7,40,5,{flow},{state}\n", "mass_flow");
+        Assert.Contains(words, run.Lines[1], StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("water", "reference", "equation-of-state: water has one equation of state here")]
+    [InlineData("argon", "reference", "equation-of-state: argon has no reference equation of state here; leave the cell empty for an ideal gas; air, nitrogen, carbon-dioxide have one")]
+    [InlineData("air", "real", "equation-of-state: real is not one of ideal, reference")]
+    public void An_equation_of_state_is_one_that_the_fluid_has(string fluid, string equation, string words)
+    {
+        SheetRun run = SheetRun.Of($"device,fluid,at.p [bar(a)],at.T [degC],equation-of-state\nstate,{fluid},7,240,{equation}\n", "at.rho");
+        Assert.Contains(words, run.Lines[1], StringComparison.Ordinal);
+    }
+
     [Fact]
     public void Impossible_figures_are_marked_and_counted()
     {
