@@ -30,6 +30,9 @@ public class BatchTests
         { "inlet.p [bar(a)],inlet.T [K],inlet.V [m/s],exit.p [bar(a)],exit.T [K],heat-loss [kW],flow [kg/s]", "5,300,60,4.8,295,5,2", "nozzle --fluid N2", "--inlet \"p=5 bar, T=300 K, V=60 m/s\" --exit \"p=4.8 bar, T=295 K\" --heat-loss \"5 kW\" --flow \"2 kg/s\"" },
         { "inlet.p [bar(a)],inlet.T [degC],inlet.d [mm],throat.d [mm],throat.dp [kPa],exit.d [mm],loss-coefficient,included-angle [deg]", "6,40,100,60,25,100,idelchik,8", "venturi --fluid air", "--inlet \"p=6 bar, T=40 degC, d=100 mm\" --throat \"d=60 mm, dp=25 kPa\" --exit \"d=100 mm\" --loss-coefficient idelchik --included-angle \"8 deg\"" },
         { "inlet.p [bar(a)],inlet.T [degC],inlet.V [m/s],inlet.rect [mm],exit.rect,length [mm],loss-coefficient", "1,20,90,600x400,900x400 mm,1200,best-planar", "diffuser --fluid air", "--inlet \"p=1 bar, T=20 degC, V=90 m/s, rect=600x400 mm\" --exit \"rect=900x400 mm\" --length \"1200 mm\" --loss-coefficient best-planar" },
+        { "inlet.p0 [barg],inlet.T0 [degC],exit.p [barg],flow [scfm],reference-state", "7,40,0.2,300,\"T=60 degF, p=14.696 psi\"", "nozzle --fluid air", "--inlet \"p0=7 barg, T0=40 degC\" --exit \"p=0.2 barg\" --flow \"300 scfm\" --reference-state \"T=60 degF, p=14.696 psi\"" },
+        { "inlet.p [bar(a)],inlet.T [degC],inlet.humidity [%],exit.p [bar(a)],flow [Nm3/h]", "1.2,30,60,1.1,900 Nm3/h dry", "nozzle --fluid humid-air", "--inlet \"p=1.2 bar, T=30 degC, humidity=60%\" --exit \"p=1.1 bar\" --flow \"900 Nm3/h dry\"" },
+        { "inlet.p [bar(a)],inlet.T [degC],exit.p [bar(a)],equation-of-state", "80,40,50,reference", "nozzle --fluid nitrogen", "--inlet \"p=80 bar, T=40 degC\" --exit \"p=50 bar\" --equation-of-state reference" },
         { "inlet.p [barg],inlet.T [degC],inlet.V [m/s],exit.rise [mbar],ambient.altitude [m]", "0.02,20,90,30,1500", "diffuser --fluid air", "--inlet \"p=0.02 barg, T=20 degC, V=90 m/s\" --exit \"rise=30 mbar\" --ambient \"altitude=1500 m\"" },
     };
 

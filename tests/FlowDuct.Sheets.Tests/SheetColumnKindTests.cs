@@ -25,6 +25,9 @@ public class SheetColumnKindTests
     [InlineData("expect findings", nameof(ColumnKind.Expected))]
     [InlineData("within exit.T [K]", nameof(ColumnKind.Within))]
     [InlineData("within mass_flow [%]", nameof(ColumnKind.Within))]
+    [InlineData("flow [scfm]", nameof(ColumnKind.Figure))]
+    [InlineData("reference-state", nameof(ColumnKind.ReferenceState))]
+    [InlineData("equation-of-state", nameof(ColumnKind.Choice))]
     [InlineData("waiver", nameof(ColumnKind.Waiver))]
     [InlineData("expected life", nameof(ColumnKind.PassThrough))]
     [InlineData("calculated by", nameof(ColumnKind.PassThrough))]
@@ -42,7 +45,6 @@ public class SheetColumnKindTests
     [InlineData("eficiency [%]", "did you mean efficiency?")]
     [InlineData("find", "a question that a sheet does not take")]
     [InlineData("inlet.p [inHg]", "inHg on a pressure needs its basis")]
-    [InlineData("flow [scfm]", "scfm names no reference state")]
     public void A_heading_that_claims_to_be_known_must_be(string heading, string words)
     {
         FlowDuctException refused = Assert.Throws<FlowDuctException>(() => SheetColumn.Parse(heading));

@@ -64,7 +64,7 @@ internal sealed class CaseBinder
         if (_arguments.Has("--exit")) Fill(ref exit, "--exit", Station.Exit);
         if (_arguments.Has("--throat")) Fill(ref throat, "--throat", Station.Throat);
         if (_arguments.Has("--back")) Fill(ref back, "--back", StationLists.Back);
-        FlowReference? reference = FlowBinder.Reference(_arguments, fluid);
+        FlowReference? reference = new FlowReferenceReader("--flow", "--reference-state").Read(_arguments.Value("--flow"), _arguments.Value("--reference-state"), fluid);
         RefuseHeatRateOfUnknownMass(reference, fluid);
         (GivenSlots options, bool flowIsVolume, bool onsetIsDifference) = Options(reference?.MassPerVolume(fluid) ?? 1, kind != DeviceKind.Nozzle);
         var c = new DeviceCase
@@ -200,7 +200,7 @@ internal sealed class CaseBinder
         {
             string name = "--" + row.Word;
             if (row.OptionSlot is not CaseOption option || _arguments.Value(name) is not string typed) continue;
-            string text = option == CaseOption.Flow ? FlowBinder.WithoutMoisture(typed) : typed;
+            string text = option == CaseOption.Flow ? FlowReferenceReader.WithoutMoisture(typed) : typed;
             if ((option == CaseOption.DischargeCoefficient && Correlation is not null) || (option == CaseOption.LossCoefficient && isDiffuser && LossWord is not null)) continue;
             GivenValue value = ValueParser.Parse(name, row, text, AmbientPressure);
             double size = option switch
@@ -221,11 +221,11 @@ internal sealed class CaseBinder
     // The mass that goes with a reference volume of humid air is known only once the inlet is.
     private void RefuseHeatRateOfUnknownMass(FlowReference? reference, Fluid fluid)
     {
-        if (reference is null || fluid is not IdealGas { Mixture.IsHumidAir: true }) return;
+        if (reference is null) return;
         foreach (string option in (string[])["--heat", "--heat-loss"])
         {
             if (_arguments.Value(option) is string text && ValueParser.Parse(option, QuantityCatalogue.Of(CaseOption.Heat), text, AmbientPressure).Unit.Dimension == Dimension.HeatRate)
-                throw Usage.Refuse(option, "a heat rate needs the mass flow that takes it, and that of humid air by volume follows from its humidity", "give --flow in kg/s, or the heat in kJ/kg");
+                OptionRules.RequireKnownMass(option, reference, fluid);
         }
     }
 }

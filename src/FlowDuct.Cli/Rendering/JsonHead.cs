@@ -10,7 +10,7 @@ internal static class JsonHead
 {
     private const int Schema = 1;
 
-    internal static void Write(Utf8JsonWriter json, string verdict, Fluid fluid, JsonRow? row)
+    internal static void Write(Utf8JsonWriter json, string verdict, Fluid fluid, JsonRow? row = null)
     {
         WriteTool(json, verdict, row);
         json.WriteStartObject("method");

@@ -78,7 +78,9 @@ internal sealed class BlockPipeline(int jobs, Func<BlockWorker> worker)
         {
             foreach (Ticket ticket in queue.GetConsumingEnumerable()) ticket.Work(own);
         })
-        { IsBackground = true };
+        {
+            IsBackground = true,
+        };
         thread.Start();
         return thread;
     }

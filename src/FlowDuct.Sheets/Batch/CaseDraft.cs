@@ -82,6 +82,7 @@ internal sealed class CaseDraft
         AmbientTemperature = _frame.AmbientTemperature,
         AmbientGiven = _frame.AmbientGiven,
         AmbientAltitude = _frame.Altitude,
+        FlowReference = _frame.FlowReference,
         FlowIsVolume = _frame.FlowIsVolume,
         OnsetIsDifference = _frame.OnsetIsDifference,
         UsesGauge = _frame.UsesGauge,

@@ -35,6 +35,8 @@ internal record struct CaseFrame
 
     internal AmbientAltitude? Altitude { get; set; }
 
+    internal FlowReference? FlowReference { get; set; }
+
     internal bool FlowIsVolume { get; set; }
 
     internal bool OnsetIsDifference { get; set; }

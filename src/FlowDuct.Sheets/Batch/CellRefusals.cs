@@ -20,8 +20,13 @@ internal static class CellRefusals
     internal static FlowDuctException IdleFractions(string fluid) => Refuse(
         "fractions", $"{fluid} is no mixture and has no fractions", "leave the cell empty, or give a composition such as N2=0.72,CO2=0.13,H2O=0.15");
 
-    internal static FlowDuctException NoReference(string fluid) => Refuse(
-        "equation-of-state", $"{fluid} has no reference equation of state here", $"leave the cell empty; {string.Join(", ", Fluids.Gases.ReferenceEquations.Names)} have one");
+    internal static FlowDuctException OneEquation(Fluids.Fluid fluid) => Refuse(
+        "equation-of-state", $"{fluid.Name} has one equation of state here, {fluid.Source}", "leave the cell empty");
+
+    internal static FlowDuctException NoReferenceEquation(string name) => Refuse(
+        "equation-of-state",
+        $"{Echo.Ascii(name)} has no reference equation of state here",
+        $"leave the cell empty for an ideal gas; {string.Join(", ", Fluids.Gases.ReferenceEquations.Names)} have one");
 
     internal static FlowDuctException NotOneOf(string heading, string text, string[] words) => Refuse(
         heading,

@@ -54,6 +54,20 @@ internal sealed class FigureCell
         return new FigureValue(si, ValueParser.IsAnEnd(Row, si) ? 0 : scale.IntervalToSi(half), Column.Unit!.Value.Dimension, scale.NeedsAmbient);
     }
 
+    /// <summary>True for a flow that may count a volume at a reference state, or is beside one: anything but a plain number in a unit of mass or actual volume.</summary>
+    internal bool IsAmount(ReadOnlySpan<byte> cell, bool besideReferenceState) =>
+        besideReferenceState || Column.Unit is not { Dimension: Dimension.MassFlow or Dimension.VolumeFlow } || !DecimalCell.TryRead(cell, _decimalMark, out _, out _);
+
+    /// <summary>A cell as it would be typed on a command line: with its unit, and a decimal point.</summary>
+    internal string Typed(ReadOnlySpan<byte> cell)
+    {
+        string text = WithPoint(Encoding.UTF8.GetString(cell));
+        int length = NumberParser.Measure(text, out _);
+        string behind = text[length..].Trim();
+        bool bare = behind is "" or "dry" or "wet";
+        return bare && Column.Unit is UnitReading unit ? $"{text[..length]} {unit.Spelling} {behind}".TrimEnd() : text;
+    }
+
     /// <summary>Reads the two sides of a shape, such as 600x400 or 900x500 mm.</summary>
     /// <exception cref="FlowDuctException">The cell is refused; kind NotUnderstood.</exception>
     internal StationItem ReadPair(ReadOnlySpan<byte> cell)

@@ -4,6 +4,7 @@ using FlowDuct.Devices;
 using FlowDuct.Devices.Coefficients;
 using FlowDuct.Devices.Diffusers;
 using FlowDuct.Errors;
+using FlowDuct.Fluids;
 using FlowDuct.Fluids.Gases;
 using FlowDuct.Quantities;
 
@@ -12,8 +13,12 @@ namespace FlowDuct.Sheets.Batch;
 /// <summary>Turns the cells of a record into a case. One to a worker: it keeps what rows have in common.</summary>
 internal sealed class RowBinder(SheetPlan plan)
 {
+    private static readonly FlowReferenceReader s_flows = new("flow", "reference-state");
+
     private readonly FluidCells _fluids = new();
     private UnitBasis? _basis;
+    private bool _massFractions;
+    private bool _realGas;
 
     /// <summary>The case of the record read last.</summary>
     internal CaseDraft Draft { get; } = new();
@@ -26,15 +31,23 @@ internal sealed class RowBinder(SheetPlan plan)
     internal void Read(CsvReader record)
     {
         Draft.Begin();
-        _reference = false;
         Draft.Device = DeviceOf(Cell(record, plan.Device));
         foreach (int index in plan.Choices) Choose(plan.Columns[index], Cell(record, index));
-        Draft.Frame.Fluid = _fluids.Find(Cell(record, plan.Fluid), Fractions(), _reference);
+        Draft.Frame.Fluid = _fluids.Find(Cell(record, plan.Fluid), Fractions(), Equation());
         Draft.Frame.Device = Draft.Device switch { SheetDevice.Diffuser => DeviceKind.Diffuser, SheetDevice.Venturi => DeviceKind.Venturi, _ => DeviceKind.Nozzle };
         _basis = BasisOf(Cell(record, plan.Basis));
         ReadAmbient(record);
         foreach (FigureCell figure in plan.Stations) ReadStation(figure, Cell(record, figure.Index));
-        foreach (FigureCell figure in plan.Options) ReadOption(figure, Cell(record, figure.Index));
+        string? state = Cell(record, plan.ReferenceState) is { IsEmpty: false } cell ? Encoding.UTF8.GetString(cell) : null;
+        bool flow = false;
+        foreach (FigureCell figure in plan.Options)
+        {
+            ReadOnlySpan<byte> typed = Cell(record, figure.Index);
+            flow |= figure.Slot == (int)CaseOption.Flow && !typed.IsEmpty;
+            ReadOption(figure, typed, state);
+        }
+
+        if (state is not null && !flow) s_flows.Read(null, state, Draft.Frame.Fluid);
         OptionRules.RequireRecovery("recovery", Draft.Options, Draft.Frame.RecoveryBasis == RecoveryBasis.Dynamic);
         DeviceColumns.Require(plan, Draft);
     }
@@ -57,9 +70,8 @@ internal sealed class RowBinder(SheetPlan plan)
     private FractionBasis? Fractions() =>
         (Draft.Choices >> (int)ChoiceColumn.Fractions & 1) == 0 ? null : _massFractions ? FractionBasis.Mass : FractionBasis.Mole;
 
-    private bool _massFractions;
-
-    private bool _reference;
+    private EquationOfState? Equation() =>
+        (Draft.Choices >> (int)ChoiceColumn.EquationOfState & 1) == 0 ? null : _realGas ? EquationOfState.Reference : EquationOfState.Ideal;
 
     private void Choose(SheetColumn column, ReadOnlySpan<byte> cell)
     {
@@ -75,7 +87,7 @@ internal sealed class RowBinder(SheetPlan plan)
             case ChoiceColumn.Branch: Draft.Frame.Branch = word == 0 ? Branch.Subsonic : Branch.Supersonic; break;
             case ChoiceColumn.Expansion: Draft.Frame.Expansion = (ExpansionModel)word; break;
             case ChoiceColumn.RecoveryBasis: Draft.Frame.RecoveryBasis = (RecoveryBasis)word; break;
-            case ChoiceColumn.EquationOfState: _reference = word == 1; break;
+            case ChoiceColumn.EquationOfState: _realGas = word == 1; break;
             default: _massFractions = word == 1; break;
         }
     }
@@ -105,11 +117,17 @@ internal sealed class RowBinder(SheetPlan plan)
         Draft.Frame.UsesGauge |= value.WasGauge;
     }
 
-    private void ReadOption(FigureCell figure, ReadOnlySpan<byte> cell)
+    private void ReadOption(FigureCell figure, ReadOnlySpan<byte> cell, string? referenceState)
     {
         if (cell.IsEmpty) return;
         var option = (CaseOption)figure.Slot;
         if (char.IsAsciiLetter((char)cell[0]) && TakesWord(figure, option, cell)) return;
+
+        if (option == CaseOption.Flow && figure.IsAmount(cell, referenceState is not null))
+        {
+            ReadAmount(figure, figure.Typed(cell), referenceState);
+            return;
+        }
 
         FigureValue value = figure.Read(cell, _basis, Draft.Frame.AmbientPressure);
         double size = SizeOf(figure, option, value.Dimension);
@@ -131,10 +149,26 @@ internal sealed class RowBinder(SheetPlan plan)
 
     private double SizeOf(FigureCell figure, CaseOption option, Dimension dimension) => option switch
     {
-        CaseOption.Flow => OptionRules.MassOfAmount(figure.Place, Draft.Frame.Fluid!, dimension),
-        CaseOption.Heat or CaseOption.HeatLoss when dimension == Dimension.HeatRate => 1 / OptionRules.MassFlowBeside(figure.Place, Draft.Options, Draft.Frame.FlowIsVolume),
+        CaseOption.Heat or CaseOption.HeatLoss when dimension == Dimension.HeatRate => 1 / HeatedFlow(figure),
         _ => 1,
     };
+
+    private double HeatedFlow(FigureCell figure)
+    {
+        OptionRules.RequireKnownMass(figure.Place, Draft.Frame.FlowReference, Draft.Frame.Fluid!);
+        return OptionRules.MassFlowBeside(figure.Place, Draft.Options, Draft.Frame.FlowIsVolume);
+    }
+
+    // A volume of gas at a reference state is an amount: its mass follows from the gas.
+    private void ReadAmount(FigureCell figure, string typed, string? state)
+    {
+        FlowReference? reference = (s_flows with { FlowPlace = figure.Place }).Read(typed, state, Draft.Frame.Fluid!);
+        GivenValue value = ValueParser.Parse(figure.Place, figure.Row, FlowReferenceReader.WithoutMoisture(typed), Draft.Frame.AmbientPressure);
+        double size = reference?.MassPerVolume(Draft.Frame.Fluid!) ?? 1;
+        Draft.Frame.FlowReference = reference;
+        Draft.Frame.FlowIsVolume |= value.Unit.Dimension == Dimension.VolumeFlow;
+        Draft.Options.Set(figure.Slot, value.Si * size, value.HalfWidth * size);
+    }
 
     private static DischargeCorrelation CorrelationOf(FigureCell figure, string text) =>
         DischargeCorrelation.Find(text) ?? throw CellRefusals.NotOneOf(figure.Place, text, ["a number", .. DischargeCorrelation.All.Select(row => row.Name)]);

@@ -14,6 +14,7 @@ internal sealed class SheetPlan
         Device = IndexOf(ColumnKind.Device);
         Fluid = IndexOf(ColumnKind.Fluid);
         Basis = IndexOf(ColumnKind.PressureBasis);
+        ReferenceState = IndexOf(ColumnKind.ReferenceState);
         FigureCell[] figures = [.. Of(ColumnKind.Figure).Select(index => new FigureCell(columns[index], index, decimalMark))];
         Ambient = [.. figures.Where(figure => figure.Column.List == StationLists.Ambient)];
         Stations = [.. figures.Where(figure => figure.Column.List is not (StationLists.Ambient or StationLists.None))];
@@ -34,6 +35,8 @@ internal sealed class SheetPlan
     internal int Fluid { get; }
 
     internal int Basis { get; }
+
+    internal int ReferenceState { get; }
 
     internal FigureCell[] Ambient { get; }
 
@@ -142,7 +145,7 @@ internal sealed class SheetPlan
     private static string? NearOf(string heading)
     {
         string word = heading.Replace('_', '-').ToLowerInvariant();
-        IEnumerable<string> known = ["tag", "case", "device", "fluid", "pressure-basis", "waiver", .. ChoiceWords.All.Select(row => row.Name), .. QuantityCatalogue.Options.Select(row => row.Word)];
+        IEnumerable<string> known = ["tag", "case", "device", "fluid", "pressure-basis", "reference-state", "waiver", .. ChoiceWords.All.Select(row => row.Name), .. QuantityCatalogue.Options.Select(row => row.Word)];
         return word.Length >= 3 && Slips.NearestWord(word, known) is string near && (near == word || word.Length >= 5) ? near : null;
     }
 }

@@ -21,6 +21,9 @@ internal enum ColumnKind
     /// <summary>absolute or gauge, for headings whose pressure unit does not say it.</summary>
     PressureBasis,
 
+    /// <summary>Pressure and temperature at which a volume of gas is counted.</summary>
+    ReferenceState,
+
     /// <summary>A figure of a station or of the device.</summary>
     Figure,
 

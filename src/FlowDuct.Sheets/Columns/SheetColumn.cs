@@ -1,4 +1,3 @@
-using FlowDuct.Devices;
 using FlowDuct.Errors;
 using FlowDuct.Quantities;
 
@@ -95,6 +94,7 @@ internal sealed record SheetColumn(string Heading, ColumnKind Kind)
         "device" => ColumnKind.Device,
         "fluid" => ColumnKind.Fluid,
         "pressure-basis" => ColumnKind.PressureBasis,
+        "reference-state" => ColumnKind.ReferenceState,
         "waiver" => ColumnKind.Waiver,
         _ => ColumnKind.PassThrough,
     };
@@ -114,8 +114,7 @@ internal sealed record SheetColumn(string Heading, ColumnKind Kind)
         if (unit is null && row.Dimension is not (Dimension.Ratio or Dimension.Count)) return null;
         foreach (Dimension dimension in (Dimension[])[row.Dimension, .. row.AlsoGivenAs])
         {
-            if (!UnitTable.TryFind(unit ?? "1", dimension, out UnitReading reading)) continue;
-            return dimension != Dimension.ReferenceVolumeFlow ? reading : throw HeadingRefusals.Unit(heading, OptionRules.NoReferenceState(unit!));
+            if (UnitTable.TryFind(unit ?? "1", dimension, out UnitReading reading)) return reading;
         }
 
         throw HeadingRefusals.Unit(heading, UnitSuggestion.For(unit!, row));
