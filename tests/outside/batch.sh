@@ -1,7 +1,7 @@
 #!/bin/bash
 # Sheets on the native binary: a reader that goes away, interrupts, a full disk, a run that is killed and goes on, memory that stays flat.
 # usage: tests/outside/batch.sh [NATIVE BINARY]
-# needs: time
+# needs: python3 time
 set -u
 here=$(realpath "$(dirname "$0")/../..")
 flowduct=$(realpath "${1:-$here/artifacts/native/flowduct}")
