@@ -27,7 +27,7 @@ internal static class BatchCommand
         using Stream sheet = SheetFile.Open(file, streams);
         using var source = new RecordSource(name, sheet, comma);
         string place = $"{name} line {source.FirstLine}";
-        SheetPlan plan = SheetPlan.Compile(source.Headings, source.Dialect.DecimalMark, place);
+        SheetPlan plan = SheetPlan.Compile(source.Headings, source.Dialect.DecimalMark, place, binder.Mixtures());
         IReadOnlyList<ResultColumn> results = arguments.Value("--show") is string list ? ResultSet.Parse(list, options.Units) : ResultSet.Default(plan.Columns, options.Units);
         if (format == BatchFormat.Csv) plan.RequireFree(CsvRows.Titles(results), place);
         RowRenderer renderer = Renderer(format, source.Dialect, source.RawHeading, results, options);
@@ -43,7 +43,7 @@ internal static class BatchCommand
         };
         var report = new BatchReport(name, streams.Error, options.Quiet);
         foreach ((string heading, string near) in plan.NearMisses) report.NearMiss(heading, near);
-        BatchEnd end = Finish(arguments, streams, new BatchRun(source, request, plan, renderer), Settings(source, renderer, format, shard, options), progress);
+        BatchEnd end = Finish(arguments, streams, new BatchRun(source, request, plan, renderer), Settings(source, plan, renderer, format, shard, options), progress);
         report.Tell(end);
         if (stop.Status != 0 && arguments.Value("--output") is string output) report.TellKept(output);
         return stop.Status != 0 ? stop.Status : BatchReport.StatusOf(end.Tally.Gravest);
@@ -66,12 +66,13 @@ internal static class BatchCommand
     };
 
     // Everything but the rows that decides the bytes of the results.
-    private static string Settings(RecordSource source, RowRenderer renderer, BatchFormat format, Shard shard, RenderOptions options)
+    private static string Settings(RecordSource source, SheetPlan plan, RowRenderer renderer, BatchFormat format, Shard shard, RenderOptions options)
     {
         var sink = new ByteSink();
         renderer.Begin(sink);
         sink.Write(source.RawHeading.Span);
         sink.Write($"{format} {shard.Index}/{shard.Count} {options.Digits} {options.Strict} {source.Dialect.DecimalMark}");
+        foreach ((string name, Fluids.Fluid mixture) in plan.Mixtures) sink.Write($" {name} {mixture.Name} {mixture.Formulation}");
         var check = new RecordCheck();
         check.Add(sink.Written);
         return check.Value.ToString("x8", System.Globalization.CultureInfo.InvariantCulture);

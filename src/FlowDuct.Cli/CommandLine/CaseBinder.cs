@@ -7,6 +7,7 @@ using FlowDuct.Errors;
 using FlowDuct.Fluids;
 using FlowDuct.Fluids.Gases;
 using FlowDuct.Quantities;
+using FlowDuct.Sheets;
 
 namespace FlowDuct.Cli.CommandLine;
 
@@ -33,9 +34,26 @@ internal sealed class CaseBinder
     {
         string name = _arguments.Value("--fluid")!;
         FractionBasis basis = Choice("--fractions", FractionBasis.Mole, ("mole", FractionBasis.Mole), ("mass", FractionBasis.Mass));
+        if (Mixtures() is IReadOnlyDictionary<string, Fluid> mixtures && mixtures.TryGetValue(name, out Fluid? named)) return _arguments.Has("--fractions") ? RefuseIdleFractions(named, name) : ByEquation(name, named);
         if (FluidCatalogue.Find(name, basis) is Fluid fluid) return ByEquation(name, RefuseIdleFractions(fluid));
         string? near = Usage.Nearest(name, FluidCatalogue.Words);
         throw Usage.Refuse("--fluid", $"{Echo.Ascii(name)} is not a fluid of this version", near is null ? "flowduct fluids lists them" : $"did you mean {near}?");
+    }
+
+    /// <summary>Mixtures under names of the user's own; null where no file is given.</summary>
+    internal IReadOnlyDictionary<string, Fluid>? Mixtures()
+    {
+        if (_arguments.Value("--mixtures") is not string file) return null;
+        try
+        {
+            using var content = new FileStream(file, FileMode.Open, FileAccess.Read, FileShare.ReadWrite);
+            return MixtureFile.Read(Echo.Ascii(file), content);
+        }
+        catch (Exception failure) when (failure is IOException or UnauthorizedAccessException or NotSupportedException or ArgumentException)
+        {
+            string reason = failure is FileNotFoundException ? "there is no such file" : OutputFile.Reason(failure);
+            throw Usage.Refuse("--mixtures", $"{Echo.Ascii(file)} could not be read: {reason}", "check the name");
+        }
     }
 
     /// <summary>The slots of a property question.</summary>
@@ -140,6 +158,9 @@ internal sealed class CaseBinder
 
         throw Usage.NotOneOf(option, typed, [.. choices.Select(choice => choice.Word)]);
     }
+
+    private static Fluid RefuseIdleFractions(Fluid fluid, string name) => throw Usage.Refuse(
+        "--fractions", $"the file of mixtures says what the fractions of {Echo.Ascii(name)} ({fluid.Name}) count", "leave it out, or write mass in the column fractions");
 
     private Fluid RefuseIdleFractions(Fluid fluid) => !_arguments.Has("--fractions") || fluid is IdealGas { Mixture.IsHumidAir: false }
         ? fluid

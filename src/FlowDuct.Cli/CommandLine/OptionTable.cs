@@ -9,6 +9,7 @@ internal static class OptionTable
     [
         new("--fluid", "NAME", "Fluid by name, or a mixture of gases such as N2=0.72,CO2=0.13,H2O=0.15; flowduct fluids lists them.", "steam", CommandName.Answering, IsRequired: true),
         new("--fractions", "BASIS", "What the fractions of a mixture count: mole (the default) or mass.", "mass", CommandName.Answering),
+        new("--mixtures", "FILE", "Mixtures under names of your own: a CSV with the columns name, composition and, if need be, fractions (mole or mass).", "mixtures.csv", CommandName.Answering | CommandName.Run),
         new("--equation-of-state", "MODEL", "ideal (the default) or reference: the real gas by its published equation of state; for air, nitrogen, carbon-dioxide.", "reference", CommandName.Answering),
         new("--at", "LIST", "Two independent properties, each with its unit; one may be a range (T=300..600 K by 50 K, p=1..9 bar in 5 points). Of an ideal gas T=200..1000 K by 100 K alone prints the gas table: h, u, s0, p_r, v_r.", "\"p=7 bar, superheat=20 K\"", CommandName.State, IsRequired: true),
         new("--inlet", "LIST", "State and velocity at the inlet.", "\"p=9 bar, T=230 degC, V=25 m/s\"", CommandName.Devices, IsRequired: true),

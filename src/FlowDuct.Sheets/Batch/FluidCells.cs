@@ -6,7 +6,8 @@ using FlowDuct.Fluids.Gases;
 namespace FlowDuct.Sheets.Batch;
 
 /// <summary>Fluids by their cell; a sheet names the same few again and again.</summary>
-internal sealed class FluidCells
+/// <param name="mixtures">Mixtures of the user's own, by name.</param>
+internal sealed class FluidCells(IReadOnlyDictionary<string, Fluid> mixtures)
 {
     private const int MostKept = 256;
 
@@ -32,8 +33,8 @@ internal sealed class FluidCells
     private Fluid LookUp(string name, FractionBasis? basis, EquationOfState? equation)
     {
         if (_known.TryGetValue((name, basis, equation), out Fluid? known)) return known;
-        Fluid fluid = (name.Length == 0 ? null : FluidCatalogue.Find(name, basis ?? FractionBasis.Mole)) ?? throw CellRefusals.NoFluid(name);
-        if (basis is not null && fluid is not IdealGas { Mixture.IsHumidAir: false }) throw CellRefusals.IdleFractions(fluid.Name);
+        Fluid fluid = mixtures.GetValueOrDefault(name) ?? (name.Length == 0 ? null : FluidCatalogue.Find(name, basis ?? FractionBasis.Mole)) ?? throw CellRefusals.NoFluid(name);
+        if (basis is not null && (mixtures.ContainsKey(name) || fluid is not IdealGas { Mixture.IsHumidAir: false })) throw CellRefusals.IdleFractions(fluid.Name);
         if (_known.Count == MostKept) _known.Clear();
         return _known[(name, basis, equation)] = ByEquation(name, fluid, equation);
     }

@@ -15,7 +15,7 @@ internal sealed class RowBinder(SheetPlan plan)
 {
     private static readonly FlowReferenceReader s_flows = new("flow", "reference-state");
 
-    private readonly FluidCells _fluids = new();
+    private readonly FluidCells _fluids = new(plan.Mixtures);
     private UnitBasis? _basis;
     private bool _massFractions;
     private bool _realGas;

@@ -25,6 +25,9 @@ internal sealed class SheetPlan
     /// <summary>Every column, in the order of the sheet.</summary>
     internal IReadOnlyList<SheetColumn> Columns { get; }
 
+    /// <summary>Mixtures of the user's own, by name.</summary>
+    internal IReadOnlyDictionary<string, Fluids.Fluid> Mixtures { get; init; } = new Dictionary<string, Fluids.Fluid>();
+
     /// <summary>Which cell holds the tag, and so on; -1 where there is no such column.</summary>
     internal int Tag { get; }
 
@@ -59,8 +62,9 @@ internal sealed class SheetPlan
     /// <param name="headings">The headings, unquoted.</param>
     /// <param name="decimalMark">Of the numbers in cells.</param>
     /// <param name="file">The file and the line of the heading, for refusals.</param>
+    /// <param name="mixtures">Mixtures of the user's own, by name; null where there are none.</param>
     /// <exception cref="FlowDuctException">A heading that is not understood; kind NotUnderstood.</exception>
-    internal static SheetPlan Compile(IReadOnlyList<string> headings, byte decimalMark, string file)
+    internal static SheetPlan Compile(IReadOnlyList<string> headings, byte decimalMark, string file, IReadOnlyDictionary<string, Fluids.Fluid>? mixtures = null)
     {
         List<SheetColumn> columns = [];
         for (int i = 0; i < headings.Count; i++)
@@ -69,7 +73,7 @@ internal sealed class SheetPlan
             columns.Add(At(file, i, () => Accept(headings[index], columns)));
         }
 
-        var plan = new SheetPlan(columns, decimalMark);
+        var plan = new SheetPlan(columns, decimalMark) { Mixtures = mixtures ?? new Dictionary<string, Fluids.Fluid>() };
         for (int i = 0; i < columns.Count && plan.Basis < 0; i++)
         {
             SheetColumn column = columns[i];
