@@ -94,9 +94,13 @@ internal static class Choking
         if (top < p0 && fluid.FromPS(top, s, default, out throat) == Outcome.Ok && Secant(fluid, h0, s, p0, ref throat)) return true;
         double low = top;
         while (excess.At(low) > 0) low *= 0.85;
-        if (fluid.FromPS(low, s, default, out throat) != Outcome.Ok) low = RangeEdge.Find(p => fluid.FromPS(p, s, default, out _) == Outcome.Ok, Math.Min(top, low / 0.85), low);
+        if (fluid.FromPS(low, s, default, out throat) != Outcome.Ok) low = LastInRange(fluid, s, Math.Min(top, low / 0.85), low);
         return excess.At(low) <= 0 && Solve(fluid, s, excess, low, top, out throat);
     }
+
+    // Apart from its caller: what it captures is allocated only where the range ends.
+    private static double LastInRange(Fluid fluid, double s, double inside, double outside) =>
+        RangeEdge.Find(p => fluid.FromPS(p, s, default, out _) == Outcome.Ok, inside, outside);
 
     private static double Flux(in FluidState at, double h0) => Energy.Velocity(h0, at.h) / at.v;
 

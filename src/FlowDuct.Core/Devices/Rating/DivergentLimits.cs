@@ -69,7 +69,7 @@ internal readonly record struct DivergentLimits
         {
             low *= Step;
             if (path.At(low, default, out _, out _) == Outcome.Ok) continue;
-            low = RangeEdge.Find(p => path.At(p, default, out _, out _) == Outcome.Ok, low / Step, low);
+            low = LastInRange(path, low / Step, low);
             if (FluxAt(path, low) > target) return RatingOutcome.OutsideRange;
         }
         while (FluxAt(path, low) > target);
@@ -93,6 +93,10 @@ internal readonly record struct DivergentLimits
     // A held phase that gives way in the throat and leaves a stream slower than sound would need a second throat.
     private static bool SlowBehindReversion(Fluid fluid, in FluidState throat, double V) => !ReferenceEquals(fluid, fluid.Relaxed)
         && fluid.Relaxed.FromPH(throat.p, throat.h, default, out FluidState relaxed) == Outcome.Ok && V <= relaxed.w;
+
+    // Apart from its caller: what it captures is allocated only where the range ends.
+    private static double LastInRange(LossPath path, double inside, double outside) =>
+        RangeEdge.Find(p => path.At(p, default, out _, out _) == Outcome.Ok, inside, outside);
 
     private static double OfDivergence(LossPath path, in FluidState throat, in FluidState exit)
     {
