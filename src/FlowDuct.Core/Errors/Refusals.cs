@@ -194,6 +194,9 @@ internal static class Refusals
     internal static FlowDuctException VenturiSections() => NotUnderstood(
         "--throat", "a venturi has a section at its inlet, its throat and its exit", "give for example --inlet \"p=6 bar, T=40 degC, d=100 mm\" --throat \"d=60 mm, dp=25 kPa\" --exit \"d=100 mm\"");
 
+    internal static FlowDuctException VenturiFollows(Devices.Figure extra) => NotUnderstood(
+        "--exit", $"{Devices.Figures.Names(extra)} behind the inlet follows from the sections and one reading", "give sections there, and one of the throat's pressure, --flow, --back");
+
     internal static FlowDuctException VenturiReadings(int given) => NotUnderstood(
         "--throat", given == 0 ? "nothing says how much flows" : "the flow is given more than once", "give one of the throat's pressure (p or dp), --flow, --back");
 

@@ -97,6 +97,8 @@ public class VenturiTests
     [InlineData(Pipe, "d=60 mm", "d=100 mm", "", "nothing says how much flows")]
     [InlineData(Pipe, "d=60 mm, dp=25 kPa", "d=100 mm", "p=5 bar", "more than once")]
     [InlineData(Pipe, "d=30 mm", "d=100 mm", "p=6.5 bar", "leaves no flow")]
+    [InlineData(Pipe, "d=60 mm, dp=25 kPa", "d=100 mm, V=20 m/s", "", "V behind the inlet follows")]
+    [InlineData(Pipe, "d=60 mm, T=30 degC", "d=100 mm", "p=5 bar", "T behind the inlet follows")]
     public void What_does_not_say_one_flow_is_refused(string inlet, string throat, string exit, string back, string reason)
     {
         FlowDuctException refused = Assert.Throws<FlowDuctException>(() => Solve(GasCatalogue.Air, inlet, throat, exit, back, (CaseOption.LossCoefficient, "0.1")));

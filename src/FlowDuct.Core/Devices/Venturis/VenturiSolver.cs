@@ -52,6 +52,8 @@ internal static class VenturiSolver
     {
         if (!StationFigures.HaveSection(c.Inlet) || !StationFigures.HaveSection(c.Throat) || !StationFigures.HaveSection(c.Exit)) throw Refusals.VenturiSections();
         if (c.Has(CaseOption.Heat) || c.Has(CaseOption.HeatLoss)) throw Refusals.HeatWithChoking();
+        Figure extra = (StationFigures.Read(c.Throat, Station.Throat).Given | StationFigures.Read(c.Exit, Station.Exit).Given) & ~(Figure.Section | Figure.P);
+        if (extra != Figure.None) throw Refusals.VenturiFollows(extra);
         int given = (c.Has(CaseOption.Flow) ? 1 : 0) + (c.Throat.Has(StationSymbol.Pressure) || RelativeThroat(c) ? 1 : 0) + (HasBack(c) ? 1 : 0);
         if (given != 1) throw Refusals.VenturiReadings(given);
     }
