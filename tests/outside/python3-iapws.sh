@@ -1,6 +1,6 @@
 #!/bin/bash
 # needs: python3-iapws
-# The same states of water by an independent general-purpose library.
+# The same states of water, and of air by its reference equation, by an independent general-purpose library.
 # usage: tests/outside/python3-iapws.sh [NATIVE BINARY]
 set -u
 flowduct=$(realpath "${1:-$(dirname "$0")/../../artifacts/native/flowduct}")
