@@ -11,6 +11,23 @@ public class KernelTests
     private static readonly Gen<(double x, double y)> s_points = Gen.OneOf(
         Gen.Select(Gen.Double[0.001, 3.2], Gen.Double[0.1, 2]), Gen.Select(Gen.Double[0.9, 1.1], Gen.Double[0.98, 1.02]));
 
+    [Theory]
+    [InlineData("nitrogen")]
+    [InlineData("carbon-dioxide")]
+    [InlineData("air")]
+    public void Constants_are_those_of_the_tables(string fluid)
+    {
+        HelmholtzEquation kernel = Equations.Of(fluid).Equation;
+        IReadOnlyDictionary<string, string> row = Row("eos_parameters", fluid), melting = Row("eos_melting", fluid);
+        IEnumerable<double> parameters = [.. ((string[])["T_reducing_K", "rho_reducing_mol_per_m3", "R_J_per_molK", "M_kg_per_mol", "T_low_K", "T_high_K"]).Select(column => Equations.Number(row[column]))];
+        EquationParameters p = kernel.Parameters;
+        Assert.Equal(parameters, (IEnumerable<double>)[p.Treducing, p.rhoReducing, p.Rmolar, p.M, p.Tleast, p.Tmost]);
+        Assert.Equal(Equations.Number(row["p_high_MPa"]), p.pMost / 1e6);
+        MeltingLine line = kernel.Melting;
+        IEnumerable<double> constants = [.. ((string[])["T_triple_K", "p_triple_Pa", "a1", "t1", "a2"]).Select(column => Equations.Number(melting[column]))];
+        Assert.Equal(constants, (IEnumerable<double>)[line.Tt, line.pt, line.a1, line.t1, line.a2]);
+    }
+
     // Sums of up to 50 terms, some of them thousands of times the result near the critical point: 1e-11 of one.
     [Theory]
     [InlineData("nitrogen")]
@@ -103,6 +120,9 @@ public class KernelTests
         foreach (double value in (double[])[at.p, at.h, at.s, at.cv, at.prho, at.pT, at.w2]) Assert.True(double.IsFinite(value), $"{value}");
         Assert.True(at.cv > 0 || y > 1.1);
     }
+
+    private static IReadOnlyDictionary<string, string> Row(string table, string fluid) =>
+        ReferenceTable.Read(SourceTree.File($"src/FlowDuct.Core/Fluids/Gases/Coefficients/{table}.csv")).Single(row => row["fluid"] == fluid);
 
     private static double Term(IReadOnlyDictionary<string, string> row, double x, double y)
     {
